@@ -1,0 +1,107 @@
+import type { Element } from '../expression/element';
+import type { Expression } from '../expression/expression';
+import type { Condition } from '../expression/statement';
+
+export type Verdict = 'equal' | 'different' | 'undecided';
+
+/** The homomorphisms by which classes are compared. */
+export type MapName =
+  | 'rank'
+  | 'signature'
+  | 'residue' // ∂ at a place, against its default uniformizer
+  | 'specialisation' // s at a place
+  | 'product' // the class modulo η in degree 1: the product of the entries in F^×
+  | 'symbol' // the norm residue symbol modulo η in degree 2
+  | 'discriminant'
+  | 'hasse'
+  | 'class' // the class itself, in a field where it has a closed form
+  | 'word'; // the coefficient part of a canonical word in letters
+
+/** One homomorphism applied to both sides, in one degree. */
+export interface Compared {
+  readonly map: MapName;
+  /** `real`, a prime such as `7`; absent when the map belongs to no place. */
+  readonly place?: string;
+  readonly left: Expression;
+  readonly right: Expression;
+  readonly same: boolean;
+  /** Whether both values are zero. */
+  readonly zero: boolean;
+  /** The group the values lie in, in TeX. */
+  readonly target: string;
+}
+
+export interface ComparedDegree {
+  readonly degree: number;
+  readonly verdict: Verdict;
+  readonly compared: readonly Compared[];
+}
+
+/** The first invariant that takes two values, in words a mathematician uses. */
+export interface Separating {
+  readonly degree: number;
+  readonly map: MapName;
+  readonly place?: string;
+  readonly left: Expression;
+  readonly right: Expression;
+  readonly sentence: string;
+}
+
+export interface Evidence {
+  readonly kind: 'invariants' | 'certificate' | 'counterexample';
+  readonly separating?: Separating;
+  /** Why the compared maps see everything: the theorem and its published source. */
+  readonly theorem: string;
+  /** Equal modulo η, that is in Milnor K-theory. */
+  readonly modEta: boolean;
+  /** Equal modulo h, that is in the Witt ring. */
+  readonly modH: boolean;
+}
+
+export interface CompareOutcome {
+  readonly verdict: Verdict;
+  readonly parts: readonly ComparedDegree[];
+  readonly sideConditions: readonly Condition[];
+  readonly evidence: Evidence;
+}
+
+export interface NormalizedDegree {
+  readonly degree: number;
+  readonly normalForm: Expression;
+  /** Promise: two elements of the field are equal iff their canonical forms print alike. */
+  readonly canonical: boolean;
+}
+
+/** One rewriting: the relation used, the field elements it was used at, the whole expression before and after. */
+export interface Step {
+  readonly relation: string;
+  readonly args: readonly Element[];
+  readonly before: Expression;
+  readonly after: Expression;
+}
+
+export interface NormalizeOutcome {
+  /** By degree, highest first; empty for zero. */
+  readonly parts: readonly NormalizedDegree[];
+  readonly sideConditions: readonly Condition[];
+  readonly steps?: readonly Step[];
+}
+
+export interface Residue {
+  /** A prime such as `7`. */
+  readonly place: string;
+  /** A field one can type. */
+  readonly residueField: string;
+  readonly uniformizer: Element;
+  readonly value: Expression;
+  /** Degree of the residue's highest non-zero part, or of the class less one when the residue is zero. */
+  readonly degree: number;
+  readonly zero: boolean;
+  readonly specialisation: Expression;
+}
+
+export interface ResiduesOutcome {
+  readonly residues: readonly Residue[];
+  /** Whether the residue is zero at every place not listed. */
+  readonly unramifiedElsewhere: boolean;
+}

@@ -1,0 +1,2 @@
+/** Stands in for modules that only mark a file as server code. */
+export {};
