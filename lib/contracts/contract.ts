@@ -1,0 +1,48 @@
+import type { z } from 'zod';
+import type { PermissionName } from './permission-name';
+import type { ProblemCode } from './problem';
+
+/** One worked exchange, shown in the documentation and held against the running service by a test. */
+export interface Example {
+  readonly name: string;
+  readonly summary: string;
+  readonly request?: unknown;
+  readonly answer: unknown;
+}
+
+/**
+ * One call of the API: the only source of its validation, its types, its documentation and its tests.
+ *
+ * @typeParam Request - the schema of the body; `undefined` for a call without one
+ * @typeParam Answer - the schema of the body of a success (status 200)
+ */
+export interface Contract<Request extends z.ZodType | undefined, Answer extends z.ZodType> {
+  readonly method: 'GET' | 'POST';
+  readonly path: `/api/v1/${string}`;
+  /** Name of the call in the OpenAPI document. */
+  readonly operation: string;
+  readonly summary: string;
+  readonly description: string;
+  readonly permission: PermissionName;
+  readonly request: Request;
+  readonly answer: Answer;
+  /** The problems particular to this call; those of every call (method, quota, …) are added by the document. */
+  readonly problems: readonly ProblemCode[];
+  readonly examples: readonly Example[];
+}
+
+export type AnyContract = Contract<z.ZodType | undefined, z.ZodType>;
+
+/** Any problem that reading texts and naming a field can raise. */
+export const readingProblems = [
+  'invalid',
+  'syntax',
+  'field',
+  'not-a-unit',
+  'division-by-zero',
+  'unknown-letter',
+  'not-yet',
+  'size',
+  'budget',
+  'busy',
+] as const satisfies readonly ProblemCode[];
