@@ -27,6 +27,11 @@ export interface Field<E> {
   letter(name: string): E | undefined;
   /** The element as it is written in canonical form; reading it back gives the same element. */
   write(a: E): Element;
+  /**
+   * How many binary digits an element takes, for a field whose elements grow, so that powers can be refused before they
+   * are computed: size(aⁿ) is more than (size(a)−1)·|n|. Absent where all elements take the same room.
+   */
+  size?(a: E): number;
 }
 
 /** A finite field 𝔽_q. Its elements are ordered by their coefficients from the top, as integers 0…p−1. */

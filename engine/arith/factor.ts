@@ -1,0 +1,64 @@
+import type { Budget } from './budget';
+import { bitLength } from './bits';
+import { perfectPower } from './perfect-power';
+import { isPrimeWithoutSmallFactor } from './prime';
+import { rho } from './rho';
+import { smallPrimeDivisors, TRIAL_BOUND } from './small-primes';
+import { valuation } from './valuation';
+
+export interface PrimePower {
+  readonly prime: bigint;
+  readonly exponent: number;
+}
+
+/**
+ * The prime factorisation of |n| for n ≠ 0, primes ascending; empty for ±1. Throws a RangeError for 0.
+ *
+ * Trial division to 2^12, perfect powers, then rho. Primes are primes in the sense of `isPrime`; the product is compared
+ * with n before the answer is given. The same n always takes the same way. `budget.spend` is called all along, so that the
+ * caller can stop it.
+ */
+export function factor(n: bigint, budget: Budget): readonly PrimePower[] {
+  if (n === 0n) throw new RangeError('0 has no prime factorisation');
+  const whole = n < 0n ? -n : n;
+  const found = new Map<bigint, number>();
+  let rest = whole;
+  for (const p of smallPrimeDivisors(whole)) {
+    const { exponent, unit } = valuation(rest, BigInt(p));
+    found.set(BigInt(p), exponent);
+    rest = unit;
+  }
+  split(rest, 1, found, budget, `factoring ${named(whole)}`);
+  const factors = [...found].map(([prime, exponent]) => ({ prime, exponent }));
+  factors.sort((a, b) => (a.prime < b.prime ? -1 : 1));
+  const product = factors.reduce((value, { prime, exponent }) => value * prime ** BigInt(exponent), 1n);
+  if (product !== whole) throw new Error(`the factors found do not multiply back to ${named(whole)}`);
+  return factors;
+}
+
+/** Adds the prime factors of n^multiplicity to `found`; n ≥ 1 has no prime factor below 2^12. */
+function split(n: bigint, multiplicity: number, found: Map<bigint, number>, budget: Budget, doing: string): void {
+  if (n === 1n) return;
+  budget.spend(doing);
+  if (n < BigInt(TRIAL_BOUND) ** 2n || isPrimeWithoutSmallFactor(n)) {
+    found.set(n, (found.get(n) ?? 0) + multiplicity);
+    return;
+  }
+  const { root, exponent } = perfectPower(n);
+  if (exponent > 1) return split(root, multiplicity * exponent, found, budget, doing);
+  const divisor = properDivisor(n, budget, doing);
+  split(divisor, multiplicity, found, budget, doing);
+  split(n / divisor, multiplicity, found, budget, doing);
+}
+
+function properDivisor(n: bigint, budget: Budget, doing: string): bigint {
+  const divisor = rho(n, Number.POSITIVE_INFINITY, budget, doing);
+  if (divisor === undefined) throw new Error(`no factor found of ${named(n)}`);
+  return divisor;
+}
+
+/** A number as it is named in a message. */
+function named(n: bigint): string {
+  const bits = bitLength(n);
+  return bits <= 200 ? n.toString() : `a number of ${n.toString().length} digits`;
+}
