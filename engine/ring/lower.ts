@@ -1,0 +1,82 @@
+import { integerElement, negateElement, type Element } from '../expression/element';
+import type { Expression } from '../expression/expression';
+import { boundedCoefficient, checkDegree } from './limits';
+import { constantTerm, degreeRange, multiplyTerms, type Factor, type Term } from './term';
+
+const minusOne = negateElement(integerElement(1n));
+
+/**
+ * Lowers an expression to its kernel form; `read` turns an entry into a unit of the field (and refuses what is none).
+ *
+ * The definitions used: [a, b] = [a][b]; ⟨a, b⟩ = ⟨a⟩ + ⟨b⟩; ⟪a⟫ = 1 − ⟨a⟩; h = 1 + ⟨−1⟩; ε = −⟨−1⟩; (2m)_ε = m·h,
+ * (2m+1)_ε = 1 + m·h for m ≥ 0, n_ε = −⟨−1⟩(−n)_ε for n < 0 (F. Morel, LNM 2052, ch. 3).
+ * A product with one sum among its factors is multiplied out, one with more is kept, so the kernel form is never longer than
+ * the number of leaves of the expression times its depth.
+ */
+export function lower<A>(expression: Expression, read: (entry: Element) => A): readonly Term<A>[] {
+  const terms = lowerNode(expression, read);
+  for (const term of terms) for (const bound of degreeRange(term)) checkDegree(bound);
+  return terms;
+}
+
+function lowerNode<A>(node: Expression, read: (entry: Element) => A): readonly Term<A>[] {
+  switch (node.kind) {
+    case 'integer':
+      return node.value === 0n ? [] : [constantTerm(boundedCoefficient(node.value))];
+    case 'symbol':
+      return [{ ...constantTerm<A>(1n), factors: node.entries.map((entry) => ({ kind: 'symbol', entry: read(entry) })) }];
+    case 'angle':
+      return node.entries.map((entry) => angleTerm(1n, read(entry)));
+    case 'pfister':
+      return multiply(node.entries.map((entry) => [constantTerm<A>(1n), angleTerm(-1n, read(entry))]));
+    case 'eta':
+      return [{ ...constantTerm<A>(1n), eta: 1 }];
+    case 'hyperbolic':
+      return [constantTerm<A>(1n), angleTerm(1n, read(minusOne))];
+    case 'epsilon':
+      return [angleTerm(-1n, read(minusOne))];
+    case 'epsilonInteger':
+      return lowerEpsilonInteger(boundedCoefficient(node.count), read);
+    case 'negate':
+      return lowerNode(node.of, read).map((term) => ({ ...term, coefficient: -term.coefficient }));
+    case 'sum':
+      return node.terms.flatMap((term) => lowerNode(term, read));
+    case 'product':
+      return multiply(node.factors.map((factor) => lowerNode(factor, read)));
+    case 'power':
+      return lowerPower(lowerNode(node.base, read), node.exponent);
+  }
+}
+
+const angleTerm = <A>(coefficient: bigint, entry: A): Term<A> => ({ coefficient, eta: 0, angles: [entry], factors: [] });
+
+/** n_ε = x + y⟨−1⟩: ⌈n/2⌉ + ⌊n/2⌋⟨−1⟩ for n ≥ 0, and −⟨−1⟩ times that of −n for n < 0. */
+function lowerEpsilonInteger<A>(n: bigint, read: (entry: Element) => A): readonly Term<A>[] {
+  const size = n < 0n ? -n : n;
+  const [more, fewer] = [(size + 1n) / 2n, size / 2n];
+  const [x, y] = n < 0n ? [-fewer, -more] : [more, fewer];
+  return [constantTerm<A>(x), angleTerm(y, read(minusOne))].filter((term) => term.coefficient !== 0n);
+}
+
+function multiply<A>(factors: readonly (readonly Term<A>[])[]): readonly Term<A>[] {
+  if (factors.some((terms) => terms.length === 0)) return [];
+  const sums = factors.filter((terms) => terms.length > 1).length;
+  let product: readonly Term<A>[] = [constantTerm<A>(1n)];
+  for (const terms of factors) {
+    const kept = terms.length > 1 && sums > 1 ? [powerTerm(terms, 1)] : terms;
+    product = product.flatMap((x) => kept.map((y) => multiplyTerms(x, y)));
+  }
+  for (const term of product) boundedCoefficient(term.coefficient);
+  return product;
+}
+
+function lowerPower<A>(base: readonly Term<A>[], exponent: number): readonly Term<A>[] {
+  if (exponent === 0) return [constantTerm<A>(1n)];
+  if (base.length === 0 || exponent === 1) return base;
+  return [powerTerm(base, exponent)];
+}
+
+function powerTerm<A>(of: readonly Term<A>[], exponent: number): Term<A> {
+  const factor: Factor<A> = { kind: 'power', of, exponent };
+  return { ...constantTerm<A>(1n), factors: [factor] };
+}

@@ -1,0 +1,63 @@
+/**
+ * The kernel form of an expression, in which rings are evaluated: a sum of terms
+ *
+ *   coefficient · η^eta · ∏⟨angles⟩ · factors in order,
+ *
+ * where η and ⟨a⟩ have been moved to the front, since both are central (F. Morel, A¹-Algebraic Topology over a Field, LNM 2052,
+ * Lemma 3.5, number from memory).
+ */
+export interface Term<A> {
+  readonly coefficient: bigint;
+  readonly eta: number;
+  readonly angles: readonly A[];
+  readonly factors: readonly Factor<A>[];
+}
+
+export type Factor<A> =
+  | { readonly kind: 'symbol'; readonly entry: A }
+  | { readonly kind: 'power'; readonly of: readonly Term<A>[]; readonly exponent: number };
+
+export const constantTerm = <A>(coefficient: bigint): Term<A> => ({ coefficient, eta: 0, angles: [], factors: [] });
+
+/** The product of two terms. */
+export function multiplyTerms<A>(x: Term<A>, y: Term<A>): Term<A> {
+  return {
+    coefficient: x.coefficient * y.coefficient,
+    eta: x.eta + y.eta,
+    angles: y.angles.length === 0 ? x.angles : x.angles.length === 0 ? y.angles : [...x.angles, ...y.angles],
+    factors: y.factors.length === 0 ? x.factors : x.factors.length === 0 ? y.factors : [...x.factors, ...y.factors],
+  };
+}
+
+/** The entries that occur in a term, with repetitions. */
+export function* entriesOf<A>(term: Term<A>): Generator<A> {
+  yield* term.angles;
+  for (const factor of term.factors) {
+    if (factor.kind === 'symbol') yield factor.entry;
+    else for (const inner of factor.of) yield* entriesOf(inner);
+  }
+}
+
+/** The least and the greatest degree of a product of terms; exact for a word of symbols, an outer bound otherwise. */
+export function degreeRange<A>(term: Term<A>): readonly [number, number] {
+  let low = -term.eta;
+  let high = -term.eta;
+  for (const factor of term.factors) {
+    if (factor.kind === 'symbol') {
+      low += 1;
+      high += 1;
+      continue;
+    }
+    let [innerLow, innerHigh] = [Infinity, -Infinity];
+    for (const inner of factor.of) {
+      const [l, h] = degreeRange(inner);
+      innerLow = Math.min(innerLow, l);
+      innerHigh = Math.max(innerHigh, h);
+    }
+    if (factor.of.length > 0) {
+      low += innerLow * factor.exponent;
+      high += innerHigh * factor.exponent;
+    }
+  }
+  return [low, high];
+}
