@@ -32,6 +32,8 @@ export interface Field<E> {
    * are computed: size(aⁿ) is more than (size(a)−1)·|n|. Absent where all elements take the same room.
    */
   size?(a: E): number;
+  /** a^n for any integer n (a a unit if n < 0), where the field knows a quicker way than repeated multiplication. */
+  power?(a: E, n: bigint): E;
 }
 
 /** A finite field 𝔽_q. Its elements are ordered by their coefficients from the top, as integers 0…p−1. */

@@ -63,6 +63,13 @@ export const rationals: Field<Rational> = Object.freeze({
   fromInteger: (n: bigint) => ({ num: n, den: 1n }),
   letter: () => undefined,
   write,
+  /** Numerator and denominator stay coprime. */
+  power(a: Rational, n: bigint) {
+    if (n >= 0n) return { num: a.num ** n, den: a.den ** n };
+    if (a.num === 0n) throw new RangeError('0 has no inverse');
+    const sign = a.num < 0n ? -1n : 1n;
+    return { num: (sign * a.den) ** -n, den: (sign * a.num) ** -n };
+  },
   size(a: Rational) {
     const top = bitLength(a.num);
     const bottom = bitLength(a.den);
