@@ -1,13 +1,50 @@
 import path from 'node:path';
 import { defineConfig } from 'vitest/config';
 
+const root = import.meta.dirname;
+
+export default ${JSON.stringify(readFileSync(id, 'utf8'))};` : undefined,
+};
+
 export default defineConfig({
-  resolve: { alias: { '@': path.resolve(import.meta.dirname), 'server-only': path.resolve(import.meta.dirname, 'tests/empty.ts') } },
+  resolve: { alias: { '@': root, 'server-only': path.resolve(root, 'tests/empty.ts') } },
   test: {
+    root,
     projects: [
       {
         extends: true,
         test: { name: 'mathematics', include: ['tests/{unit,property,reference}/**/*.test.ts'], testTimeout: 120_000 },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'database',
+          include: ['tests/{database,bootstrap}/**/*.test.ts'],
+          globalSetup: ['tests/harness/global-cluster.ts'],
+          testTimeout: 60_000,
+          hookTimeout: 60_000,
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'api',
+          include: ['tests/api/**/*.test.ts'],
+          globalSetup: ['tests/harness/global-server.ts'],
+          testTimeout: 60_000,
+          hookTimeout: 120_000,
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'browser',
+          include: ['tests/browser/**/*.test.ts'],
+          globalSetup: ['tests/harness/global-server.ts'],
+          testTimeout: 60_000,
+          hookTimeout: 120_000,
+          maxWorkers: 2,
+        },
       },
     ],
   },

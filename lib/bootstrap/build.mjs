@@ -1,0 +1,92 @@
+import { createHash } from 'node:crypto';
+import fs from 'node:fs';
+import path from 'node:path';
+import { inState, root, tail } from './paths.mjs';
+import { servingRun } from './run.mjs';
+import { Trouble, say } from './trouble.mjs';
+
+const sources = ['app', 'engine', 'grammar', 'lib', 'models', 'public'];
+const sourceFiles = [
+  'package-lock.json',
+  'tsconfig.json',
+  'tailwind.config.ts',
+  'next.config.mjs',
+  'postcss.config.mjs',
+  'proxy.ts',
+  'instrumentation.ts',
+];
+const worker = path.join(root, 'dist', 'engine.worker.mjs');
+const stamp = path.join(root, '.next', 'built-from');
+
+export const nextProgram = path.join(root, 'node_modules', 'next', 'dist', 'bin', 'next');
+export const nextEnvironment = { NEXT_TELEMETRY_DISABLED: '1' };
+
+/** A digest of everything the build is made from. */
+function sourceDigest() {
+  const digest = createHash('sha256').update(process.versions.node);
+  const files = sourceFiles.filter((file) => fs.existsSync(path.join(root, file)));
+  for (const folder of sources) {
+    for (const entry of fs.readdirSync(path.join(root, folder), { recursive: true, withFileTypes: true })) {
+      if (entry.isFile()) files.push(path.relative(root, path.join(entry.parentPath, entry.name)));
+    }
+  }
+  for (const file of files.sort()) digest.update(`\0${file}\0`).update(fs.readFileSync(path.join(root, file)));
+  return digest.digest('hex');
+}
+
+/** How the worker threads' file is bundled: one file of modern JavaScript that Node loads without a compiler. */
+export const workerBundle = {
+  absWorkingDir: root,
+  entryPoints: ['lib/compute/engine.worker.ts'],
+  outfile: worker,
+  bundle: true,
+  platform: 'node',
+  format: 'esm',
+  target: 'node20',
+  conditions: ['react-server'],
+  // Bundled CommonJS packages ask for Node's own modules by require.
+  banner: { js: "import { createRequire } from 'node:module'; const require = createRequire(import.meta.url);" },
+  logLevel: 'warning',
+};
+
+async function bundleWorker() {
+  const { build } = await import('esbuild');
+  try {
+    await build(workerBundle);
+  } catch (error) {
+    throw new Trouble('The worker bundle could not be made.', `Mend what the messages above name.\n${error.message}`);
+  }
+}
+
+/** Builds the worker bundle and the pages when they are not those of the present sources. */
+export async function ensureBuild(run) {
+  const digest = sourceDigest();
+  const current = fs.existsSync(stamp) && fs.readFileSync(stamp, 'utf8') === digest;
+  if (current && fs.existsSync(worker)) return;
+  const serving = servingRun();
+  if (serving !== undefined && serving.owner.pid !== process.pid && serving.command === 'npm start') {
+    throw new Trouble(
+      `The sources have changed, and a server (process ${serving.owner.pid}) still runs on the build they would replace.`,
+      'Stop that server first, or work in a second clone.',
+    );
+  }
+  say('Building (about a minute) …');
+  fs.rmSync(stamp, { force: true });
+  await bundleWorker();
+  const log = inState('build.log');
+  const output = fs.openSync(log, 'w', 0o600);
+  const code = await run.finish(process.execPath, [nextProgram, 'build'], {
+    stdio: ['ignore', output, output],
+    env: { ...process.env, ...nextEnvironment, NODE_ENV: 'production' },
+  });
+  fs.closeSync(output);
+  if (code !== 0 && !run.leaving) {
+    throw new Trouble(
+      `next build failed (exit code ${code ?? 'none: it was killed'}). The end of ${log}:\n${tail(log, 40)}`,
+      code === undefined
+        ? 'See that the machine has about 1.5 GB of memory to spare.'
+        : 'Mend what it names, then start again.',
+    );
+  }
+  fs.writeFileSync(stamp, digest);
+}

@@ -1,0 +1,47 @@
+import { z } from 'zod';
+
+const seconds = z.coerce.number().positive().max(3600);
+
+/** Everything the server reads from its environment. There is no default for anything secret. */
+const settings = z.object({
+  /** Where the PostgreSQL database is; the launcher sets it when it runs a cluster of its own. */
+  DATABASE_URL: z.string().regex(/^postgres(ql)?:\/\//, 'must begin with postgres:// or postgresql://'),
+  /** The port the server listens on. */
+  PORT: z.coerce.number().int().min(1).max(65535).default(3000),
+  /** Computations one address may ask for in a minute; 0 sets no limit. */
+  COMPUTE_QUOTA_PER_MINUTE: z.coerce.number().int().min(0).default(3000),
+  /** Seconds of CPU one interactive computation may take. */
+  COMPUTE_SECONDS_INTERACTIVE: seconds.default(2),
+  /** Seconds of CPU one computation of a batch may take. */
+  COMPUTE_SECONDS_BATCH: seconds.default(60),
+  /** Worker threads for computations; 0 takes one for each processor, at least two. */
+  COMPUTE_THREADS: z.coerce.number().int().min(0).max(64).default(0),
+  /** Largest heap of one worker thread, in MiB. */
+  COMPUTE_MEMORY_MIB: z.coerce.number().int().min(64).max(16384).default(512),
+  /** Connections the server keeps to the database, at most. */
+  DATABASE_CONNECTIONS: z.coerce.number().int().min(1).max(200).default(10),
+  /** Whether X-Forwarded-For names the caller; only behind a proxy of one's own that sets it. */
+  TRUST_PROXY: z.enum(['0', '1']).default('0'),
+});
+
+export type Config = z.infer<typeof settings>;
+
+/** Reads and checks an environment. Throws an Error that names every setting that is wrong and what is wrong with it. */
+export function readConfig(environment: Record<string, string | undefined>): Config {
+  const given = Object.fromEntries(Object.entries(environment).filter(([, value]) => value !== ''));
+  const result = settings.safeParse(given);
+  if (result.success) return result.data;
+  const lines = result.error.issues.map((issue) => {
+    const name = issue.path.join('.');
+    return given[name] === undefined ? `${name} is not set` : `${name}: ${issue.message}`;
+  });
+  throw new Error(`The configuration cannot be used. ${lines.join('; ')}. README.md lists the settings.`);
+}
+
+let current: Config | undefined;
+
+/** The configuration of this process, read from its environment at the first call. */
+export function config(): Config {
+  current ??= readConfig(process.env);
+  return current;
+}

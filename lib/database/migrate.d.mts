@@ -1,0 +1,3 @@
+export function migrate(url: string): Promise<string[]>;
+export function rollBack(url: string): Promise<string[]>;
+export function seed(url: string): Promise<string[]>;

@@ -1,0 +1,49 @@
+// Plain JavaScript, so that the launcher can migrate before anything has been compiled.
+import path from 'node:path';
+import pg from 'pg';
+import { Sequelize } from 'sequelize';
+import { SequelizeStorage, Umzug, memoryStorage } from 'umzug';
+
+const root = path.resolve(import.meta.dirname, '..', '..');
+
+/** Two servers over one database must not migrate at the same time; the number is arbitrary but fixed. */
+const migrationLock = 7_318_220;
+
+async function withDatabase(url, work) {
+  const database = new Sequelize(url, { dialect: 'postgres', dialectModule: pg, logging: false, pool: { max: 3 } });
+  try {
+    return await database.transaction(async (transaction) => {
+      await database.query('SELECT pg_advisory_xact_lock(:lock)', {
+        replacements: { lock: migrationLock },
+        transaction,
+      });
+      return await work(database);
+    });
+  } finally {
+    await database.close();
+  }
+}
+
+const runner = (database, folder, storage) =>
+  new Umzug({
+    migrations: { glob: [`${folder}/*.mjs`, { cwd: root }] },
+    context: database.getQueryInterface(),
+    storage,
+    logger: undefined,
+  });
+
+const migrations = (database) =>
+  runner(database, 'migrations', new SequelizeStorage({ sequelize: database, tableName: 'migrations' }));
+
+const names = (steps) => steps.map((step) => step.name);
+
+/** Brings the schema up to date; returns the names of the migrations it ran. */
+export const migrate = (url) => withDatabase(url, async (database) => names(await migrations(database).up()));
+
+/** Undoes every migration, the newest first; returns their names. Every row is lost. */
+export const rollBack = (url) =>
+  withDatabase(url, async (database) => names(await migrations(database).down({ to: 0 })));
+
+/** Runs every seeder. Each one may be run any number of times. */
+export const seed = (url) =>
+  withDatabase(url, async (database) => names(await runner(database, 'seeders', memoryStorage()).up()));

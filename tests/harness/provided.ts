@@ -1,0 +1,13 @@
+/** What the set-ups of the test projects hand to their tests. */
+declare module 'vitest' {
+  interface ProvidedContext {
+    /** Base address of the running server. */
+    serverUrl: string;
+    /** Connection to the throw-away cluster, as its superuser. */
+    adminUrl: string;
+    /** The migrated and seeded database that tests copy. */
+    template: string;
+  }
+}
+
+export {};
