@@ -3,9 +3,6 @@ import { defineConfig } from 'vitest/config';
 
 const root = import.meta.dirname;
 
-export default ${JSON.stringify(readFileSync(id, 'utf8'))};` : undefined,
-};
-
 export default defineConfig({
   resolve: { alias: { '@': root, 'server-only': path.resolve(root, 'tests/empty.ts') } },
   test: {
