@@ -1,0 +1,46 @@
+import katex from 'katex';
+import { breakable } from './breakable';
+
+/** Braces around ⟨a⟩ keep a line from breaking inside it. */
+const macros: Record<string, string> = {
+  '\\q': '{\\langle #1\\rangle}',
+  '\\pf': '{\\langle\\!\\langle #1\\rangle\\!\\rangle}',
+  '\\e': '\\varepsilon',
+  '\\Q': '\\mathbb{Q}',
+  '\\R': '\\mathbb{R}',
+  '\\C': '\\mathbb{C}',
+  '\\Z': '\\mathbb{Z}',
+  '\\F': '\\mathbb{F}',
+  '\\K': 'K^{\\mathrm{MW}}',
+  '\\GW': '\\mathrm{GW}',
+  '\\ne': '\\mathrel{\\char"2260}',
+};
+
+const kept = new Map<string, string>();
+const keptAtMost = 2000;
+
+/**
+ * TeX as HTML with MathML beside it for screen readers. TeX that cannot be set comes back as it was typed.
+ * With `breaks`, lines may break before + − = outside brackets; without, nowhere but where TeX would.
+ */
+export function formulaHtml(tex: string, breaks = false): string {
+  const key = `${breaks ? '1' : '0'}${tex}`;
+  const known = kept.get(key);
+  if (known !== undefined) return known;
+  const html = katex.renderToString(breaks ? breakable(tex) : tex, {
+    throwOnError: false,
+    displayMode: false,
+    output: 'htmlAndMathml',
+    strict: false,
+    maxExpand: 20_000,
+    macros: { ...macros },
+  });
+  if (kept.size >= keptAtMost) kept.clear();
+  kept.set(key, html);
+  return html;
+}
+
+/** Set mathematics, in server and client components alike. */
+export function Formula({ tex, breaks = false, className }: { tex: string; breaks?: boolean; className?: string }) {
+  return <span className={className} dangerouslySetInnerHTML={{ __html: formulaHtml(tex, breaks) }} />;
+}

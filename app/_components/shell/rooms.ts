@@ -1,0 +1,16 @@
+import type { Route } from 'next';
+
+export interface Room {
+  readonly href: Route;
+  readonly name: string;
+  /** What one does there, for the contents. */
+  readonly says: string;
+}
+
+/** The rooms, in the order of the running head. A new room is one line here. */
+export const rooms: readonly Room[] = [
+  { href: '/bench', name: 'Bench', says: 'one statement at a time: its canonical form, a verdict, and the reason' },
+  { href: '/help', name: 'Help', says: 'the language, the conventions, what is decided over which field, and the REST API' },
+];
+
+export const isIn = (pathname: string, room: Room): boolean => pathname === room.href || pathname.startsWith(`${room.href}/`);

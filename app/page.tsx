@@ -1,0 +1,1 @@
+export default function Landing() { return <main className="sheet" id="sheet">x</main>; }
