@@ -1,0 +1,4 @@
+import { compareContract } from '@/lib/contracts/compare';
+import { computeRoute } from '@/lib/http/compute-route';
+
+export const { GET, HEAD, POST, PUT, PATCH, DELETE, OPTIONS } = computeRoute('compare', compareContract);

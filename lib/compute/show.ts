@@ -1,0 +1,29 @@
+import type { DecidableField } from '@/engine/decide/registry';
+import type { Expression } from '@/engine/expression/expression';
+import type { Condition, Statement } from '@/engine/expression/statement';
+import { conditionTex, expressionTex, statementTex } from '@/engine/expression/to-tex';
+import { conditionText, expressionText, statementText } from '@/engine/expression/to-text';
+import type { FieldAnswer, Typeset } from '@/lib/contracts/typeset';
+
+export const showExpression = (expression: Expression): Typeset => ({
+  text: expressionText(expression),
+  tex: expressionTex(expression),
+});
+
+export const showCondition = (condition: Condition): Typeset => ({
+  text: conditionText(condition),
+  tex: conditionTex(condition),
+});
+
+export const showStatement = (statement: Statement): Typeset => ({
+  text: statementText(statement),
+  tex: statementTex(statement),
+});
+
+/** The Milnor–Witt group of a field in one degree. */
+export const showGroup = (fieldTex: string, degree: number): { tex: string } => ({
+  tex: `K^{\\mathrm{MW}}_{${degree}}(${fieldTex})`,
+});
+
+/** A field as answers name it. */
+export const showField = ({ name, tex }: DecidableField): FieldAnswer => ({ text: name, tex });
