@@ -40,7 +40,7 @@ export function factor(n: bigint, budget: Budget): readonly PrimePower[] {
 function split(n: bigint, multiplicity: number, found: Map<bigint, number>, budget: Budget, doing: string): void {
   if (n === 1n) return;
   budget.spend(doing);
-  if (n < BigInt(TRIAL_BOUND) ** 2n || isPrimeWithoutSmallFactor(n)) {
+  if (n < BigInt(TRIAL_BOUND) ** 2n || isPrimeWithoutSmallFactor(n, budget)) {
     found.set(n, (found.get(n) ?? 0) + multiplicity);
     return;
   }

@@ -1,3 +1,4 @@
+import { unlimited, type Budget } from './budget';
 import { trailingZeros } from './bits';
 import { gcd } from './gcd';
 import { jacobi } from './jacobi';
@@ -8,7 +9,7 @@ import { exactSquareRoot } from './roots';
  * The strong Lucas test of odd n > 2 with Selfridge's parameters (method A of R. Baillie, S. Wagstaff, Lucas pseudoprimes,
  * Math. Comp. 35 (1980)): D the first of 5, −7, 9, −11, … with (D/n) = −1, P = 1, Q = (1−D)/4. False proves n composite.
  */
-export function isStrongLucasProbablePrime(n: bigint): boolean {
+export function isStrongLucasProbablePrime(n: bigint, budget: Budget = unlimited): boolean {
   const d = discriminant(n);
   if (d === undefined) return false;
   const q = modulo((1n - d) / 4n, n);
@@ -20,6 +21,7 @@ export function isStrongLucasProbablePrime(n: bigint): boolean {
   let v = 1n;
   let qk = q;
   for (const bit of ((n + 1n) >> BigInt(twos)).toString(2).slice(1)) {
+    budget.spend('testing whether a number is prime');
     u = (u * v) % n;
     v = modulo(v * v - 2n * qk, n);
     qk = (qk * qk) % n;

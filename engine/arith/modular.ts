@@ -49,10 +49,11 @@ export function smallInverse(a: number, m: number): number {
 /**
  * b^e modulo m ≥ 1, in 0…m−1, for any integer e; a negative exponent inverts first (RangeError when b is no unit).
  * 0^0 = 1. Left-to-right powering with windows of four bits: Cohen, Algorithm 1.2.4.2 (number from memory).
+ * `spend` is called along a long exponent.
  */
-export function powerModulo(b: bigint, e: bigint, m: bigint): bigint {
+export function powerModulo(b: bigint, e: bigint, m: bigint, spend?: () => void): bigint {
   if (m === 1n) return 0n;
-  if (e < 0n) return powerModulo(inverseModulo(b, m), -e, m);
+  if (e < 0n) return powerModulo(inverseModulo(b, m), -e, m, spend);
   const base = modulo(b, m);
   if (m < SMALL) return BigInt(smallPower(Number(base), e, Number(m)));
   if (e < 65536n) return binaryPower(base, Number(e), m);
@@ -60,6 +61,7 @@ export function powerModulo(b: bigint, e: bigint, m: bigint): bigint {
   for (let i = 2; i < 16; i++) table.push((table[i - 1]! * base) % m);
   let result = 1n;
   for (const digit of e.toString(16)) {
+    spend?.();
     const square = (result * result) % m;
     const fourth = (square * square) % m;
     const eighth = (fourth * fourth) % m;

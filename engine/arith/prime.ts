@@ -1,4 +1,5 @@
 import bigInt from 'big-integer';
+import { unlimited, type Budget } from './budget';
 import { trailingZeros } from './bits';
 import { isStrongLucasProbablePrime } from './lucas';
 import { powerModulo } from './modular';
@@ -34,29 +35,30 @@ const leastStrongPseudoprime: readonly bigint[] = [
  * (a strong test to base 2 and a strong Lucas test; R. Baillie, S. Wagstaff, Lucas pseudoprimes, Math. Comp. 35 (1980)) and
  * four further strong tests. No composite is known to pass the first alone, but that none does is not proved.
  */
-export function isPrime(n: bigint): boolean {
+export function isPrime(n: bigint, budget: Budget = unlimited): boolean {
   if (n < 2n) return false;
   const divisors = smallPrimeDivisors(n);
   if (divisors.length > 0) return BigInt(divisors[0]!) === n;
-  return n < BigInt(TRIAL_BOUND) ** 2n || isPrimeWithoutSmallFactor(n);
+  return n < BigInt(TRIAL_BOUND) ** 2n || isPrimeWithoutSmallFactor(n, budget);
 }
 
 /** As `isPrime`, for odd n > 2^24 that no prime below 2^12 divides. */
-export function isPrimeWithoutSmallFactor(n: bigint): boolean {
+export function isPrimeWithoutSmallFactor(n: bigint, budget: Budget = unlimited): boolean {
   for (let k = 0; k < leastStrongPseudoprime.length; k++) {
-    if (!isStrongProbablePrime(n, BigInt(smallPrimes[k]!))) return false;
+    if (!isStrongProbablePrime(n, BigInt(smallPrimes[k]!), budget)) return false;
     if (n < leastStrongPseudoprime[k]!) return true;
     // The table is used up, or the number is beyond it: one base is then enough before the Lucas test.
     if (k === 0 && n >= leastStrongPseudoprime[leastStrongPseudoprime.length - 1]!) break;
   }
-  if (!isStrongLucasProbablePrime(n)) return false;
+  if (!isStrongLucasProbablePrime(n, budget)) return false;
   return bigInt(n).isProbablePrime(4, seeded(Number(n & 0x7fffffffn)));
 }
 
 /** The strong test (Miller, Rabin) of odd n > base ≥ 2: Cohen, Algorithm 8.2.2 (number from memory). */
-export function isStrongProbablePrime(n: bigint, base: bigint): boolean {
+export function isStrongProbablePrime(n: bigint, base: bigint, budget: Budget = unlimited): boolean {
+  const spend = (): void => budget.spend('testing whether a number is prime');
   const twos = trailingZeros(n - 1n);
-  let x = powerModulo(base, (n - 1n) >> BigInt(twos), n);
+  let x = powerModulo(base, (n - 1n) >> BigInt(twos), n, spend);
   if (x === 1n || x === n - 1n) return true;
   for (let i = 1; i < twos; i++) {
     x = (x * x) % n;

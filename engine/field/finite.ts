@@ -11,7 +11,7 @@ import { primeField } from './prime-field';
  * under the name `F_q`. Throws a RangeError when q is no power of a prime.
  */
 export function finiteField(order: bigint, letter = 'z', budget: Budget = unlimited): FiniteField<unknown> {
-  const { prime, degree } = primePower(order) ?? {};
+  const { prime, degree } = primePower(order, budget) ?? {};
   if (prime === undefined || degree === undefined) throw new RangeError(`${order} is not a power of a prime`);
   const base = primeField(prime);
   if (degree === 1) return base;
@@ -20,8 +20,11 @@ export function finiteField(order: bigint, letter = 'z', budget: Budget = unlimi
 }
 
 /** q = prime^degree, or `undefined` when q is no power of a prime. */
-export function primePower(q: bigint): { readonly prime: bigint; readonly degree: number } | undefined {
+export function primePower(
+  q: bigint,
+  budget: Budget = unlimited,
+): { readonly prime: bigint; readonly degree: number } | undefined {
   if (q < 2n) return undefined;
   const { root, exponent } = perfectPower(q);
-  return isPrime(root) ? { prime: root, degree: exponent } : undefined;
+  return isPrime(root, budget) ? { prime: root, degree: exponent } : undefined;
 }
