@@ -73,7 +73,7 @@ async function readValid(
 }
 
 /** One method is served; the others are told which. */
-export function handlers(method: 'GET' | 'POST', handle: Handler): Handlers {
+function handlers(method: 'GET' | 'POST', handle: Handler): Handlers {
   const allow = method === 'GET' ? 'GET, HEAD, OPTIONS' : 'POST, OPTIONS';
   const refuse = guarded(async (request, headers) =>
     problemResponse(problemOf('method', `${request.method} does not answer here. Use ${method}.`), {
