@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import fs from 'node:fs';
 import path from 'node:path';
 import { databaseAccount, makeOwnFolder, makeTemporaryFolder, reaches } from './account.mjs';
@@ -148,7 +149,7 @@ async function serve(run, data, account, programs, logFile, extra) {
  */
 export async function startCluster(run, { throwAway = false } = {}) {
   await ensurePackages(run, ['postgresql']);
-  const password = secrets().databasePassword;
+  const password = throwAway ? randomBytes(24).toString('base64url') : secrets().databasePassword;
   const folder = throwAway ? makeTemporaryFolder(databaseAccount()) : lastingFolder();
   if (throwAway) run.ownFolder(folder);
   const account = databaseAccount(folder);

@@ -1,8 +1,10 @@
 // npm run dev: the same database as npm start, pages compiled as they are asked for, the worker bundled anew at every change.
+import fs from 'node:fs';
 import { nextEnvironment, nextProgram, workerBundle } from './build.mjs';
 import { openDatabase } from './database.mjs';
 import { ensureDependencies, requireNode } from './dependencies.mjs';
 import { launch } from './launch.mjs';
+import { inState } from './paths.mjs';
 import { requirePort } from './ports.mjs';
 import { say } from './trouble.mjs';
 
@@ -13,11 +15,11 @@ await launch('server', 'npm run dev', 0, async (run) => {
   const database = await openDatabase(run);
   const { context } = await import('esbuild');
   const bundler = await context(workerBundle);
-  await bundler.rebuild().catch(() => say('The worker bundle has errors; it is made again at the next change.'));
   await bundler.watch();
   const address = `http://127.0.0.1:${port}`;
   run.serves(address);
-  say(`Database for tools: see DATABASE_URL below (it holds the secret of this clone).\n  ${database.url}`);
+  fs.writeFileSync(inState('database-url'), `${database.url}\n`, { mode: 0o600 });
+  say('The address of the database, for tools such as psql, is in .quadrel/database-url.');
   const server = run.start(process.execPath, [nextProgram, 'dev', '-H', '127.0.0.1', '-p', String(port)], {
     env: {
       ...process.env,

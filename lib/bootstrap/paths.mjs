@@ -5,7 +5,7 @@ import { Trouble } from './trouble.mjs';
 export const root = path.resolve(import.meta.dirname, '..', '..');
 
 /** What this clone makes for itself while it runs: the cluster, secrets, logs, records of runs. Ignored by git. */
-export const stateFolder = path.join(root, '.quadrel');
+export const stateFolder = path.resolve(root, process.env.QUADREL_STATE_FOLDER || '.quadrel');
 
 export const inState = (...parts) => path.join(stateFolder, ...parts);
 

@@ -1,3 +1,0 @@
-export function migrate(url: string): Promise<string[]>;
-export function rollBack(url: string): Promise<string[]>;
-export function seed(url: string): Promise<string[]>;
