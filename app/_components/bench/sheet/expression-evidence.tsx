@@ -1,0 +1,129 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import { useCallback, useRef, useState } from 'react';
+import type { ComparedPart } from '@/lib/contracts/compare';
+import type { NormalizeAnswer } from '@/lib/contracts/normalize';
+import { Button } from '../../button/button';
+import { useKey } from '../../keys/keys-provider';
+import { Row } from '../../shell/row';
+import { Floor, type FloorCell } from '../../tile/floor';
+import { askInvariants, askResidues } from '../ask';
+import { floorOfExpression } from '../floor-of-expression';
+import { FormFacts } from './form-facts';
+import { LongFormula } from './long-formula';
+import { ResidueTable } from './residue-table';
+import { StepTable } from './step-table';
+
+const once = { retry: false, staleTime: Infinity, refetchOnWindowFocus: false } as const;
+
+function InvariantsFloor({
+  parts,
+  answer,
+}: {
+  readonly parts: readonly ComparedPart[];
+  readonly answer: NormalizeAnswer;
+}) {
+  const [chosen, setChosen] = useState<FloorCell>();
+  const { places, rows } = floorOfExpression(parts);
+  const formOf = (degree: number) => answer.parts.find((part) => part.degree === degree)?.normalForm;
+  const states = new Set(rows.flatMap((row) => row.cells.map((cell) => cell?.state)));
+  return (
+    <>
+      <Floor
+        label="Values by degree and place"
+        places={places}
+        rows={rows.map((row) => {
+          const form = formOf(row.degree);
+          return { ...row, of: form && <LongFormula text={form.text} tex={form.tex} /> };
+        })}
+        heading="canonical form"
+        onShow={setChosen}
+      />
+      <p className="legend">
+        {states.has('solid') && <span>Filled: there is something there.</span>}
+        {states.has('none') && <span>Faint: there is nothing.</span>}
+      </p>
+      {chosen && (
+        <p className="text cell-said" role="status">
+          {chosen.name}.
+        </p>
+      )}
+    </>
+  );
+}
+
+interface Props {
+  readonly answer: NormalizeAnswer;
+  /** The expression as it was typed. */
+  readonly expression: string;
+}
+
+/** What there is to see of one class: its floor, its form in degree 0, its derivation, its residues. */
+export function ExpressionEvidence({ answer, expression }: Props) {
+  const field = answer.field.text;
+  const rational = field === 'Q';
+  const [open, setOpen] = useState(true);
+  const why = useRef<HTMLDivElement>(null);
+  const residueMatter = useRef<HTMLDivElement>(null);
+  const invariants = useQuery({
+    queryKey: ['invariants', field, expression],
+    queryFn: ({ signal }) => askInvariants(field, expression, signal),
+    ...once,
+  });
+  const residues = useQuery({
+    queryKey: ['residues', field, expression],
+    queryFn: ({ signal }) => askResidues(field, expression, signal),
+    enabled: rational,
+    ...once,
+  });
+
+  const toggle = useCallback(() => {
+    setOpen(!open);
+    if (!open) requestAnimationFrame(() => why.current?.scrollIntoView({ block: 'nearest' }));
+  }, [open]);
+  useKey({
+    keyName: 'W',
+    label: 'why: open or close the derivation',
+    act: toggle,
+    enabled: answer.steps !== undefined,
+  });
+  useKey({
+    keyName: 'R',
+    label: 'residues of this class',
+    act: () => residueMatter.current?.scrollIntoView({ block: 'center' }),
+    enabled: rational,
+  });
+
+  const seen = invariants.data?.parts.filter((part) => part.compared.length > 0) ?? [];
+  const degreeZero = seen.find((part) => part.degree === 0);
+  return (
+    <>
+      <Row label="Invariants">{seen.length > 0 && <InvariantsFloor parts={seen} answer={answer} />}</Row>
+      {degreeZero && <FormFacts part={degreeZero} />}
+      {answer.steps && (
+        <Row side="why" sideClass="to-chain" id="why">
+          <div ref={why}>
+            <Button kind="plain" keyName="W" tip="Why" aria-expanded={open} onClick={toggle}>
+              {open
+                ? 'Fold the derivation'
+                : `Derivation, ${answer.steps.length} ${answer.steps.length === 1 ? 'step' : 'steps'}`}
+            </Button>
+            {open && <StepTable steps={answer.steps} />}
+          </div>
+        </Row>
+      )}
+      {rational && (
+        <Row side="residues" sideClass="to-table" id="residues">
+          <div ref={residueMatter}>
+            {residues.data ? (
+              <ResidueTable answer={residues.data} />
+            ) : (
+              <p className="text quiet">{residues.error?.message}</p>
+            )}
+          </div>
+        </Row>
+      )}
+    </>
+  );
+}

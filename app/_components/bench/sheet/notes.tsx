@@ -1,0 +1,97 @@
+import type { Answer } from '../ask';
+import { degreeMeaning, degreeName } from '../degrees';
+import { Formula } from '../../math/formula';
+import { type Phrase, Said, tex } from '../phrase';
+
+function conditionsPhrase(answer: Answer): Phrase {
+  const { field } = answer.body;
+  if (field.text === 'any') return ['None but that every entry is a unit.'];
+  if (/^(Q|R|C)(_|$)/.test(field.text)) return ['None. Every entry is a fixed non-zero rational.'];
+  return ['None. Every entry is a fixed unit of ', tex(field.tex), '.'];
+}
+
+function SideConditions({ answer }: { readonly answer: Answer }) {
+  const conditions = answer.body.sideConditions;
+  return (
+    <div>
+      <h2>side conditions</h2>
+      {conditions.length === 0 && (
+        <p>
+          <Said phrase={conditionsPhrase(answer)} />
+        </p>
+      )}
+      {conditions.map((condition) => (
+        <p key={condition.text}>
+          <Formula tex={condition.tex} />
+        </p>
+      ))}
+    </div>
+  );
+}
+
+function Degrees({ answer }: { readonly answer: Answer }) {
+  const { parts } = answer.body;
+  if (parts.length === 0) return null;
+  return (
+    <div>
+      <h2>where it lies</h2>
+      <ul>
+        {parts.slice(0, 6).map((part) => (
+          <li key={part.degree}>
+            {degreeName(part.degree)}: <Formula tex={part.group.tex} />, {degreeMeaning(part.degree)}
+          </li>
+        ))}
+      </ul>
+    </div>
+  );
+}
+
+interface Props {
+  readonly answer: Answer;
+  readonly meaning: Phrase | undefined;
+  /** Puts another text into the line. */
+  readonly onWrite: (text: string) => void;
+}
+
+/** The notes at the edge of the sheet: what the answer rests on, where the parts lie, where one can go from here. */
+export function Notes({ answer, meaning, onWrite }: Props) {
+  const statement = answer.kind === 'statement' ? answer.body : undefined;
+  const left = statement?.sides[0];
+  const right = statement?.sides.at(-1);
+  return (
+    <aside className="notes" aria-label={statement ? 'With this statement' : 'With this expression'}>
+      <SideConditions answer={answer} />
+      {statement && statement.evidence.theorem !== '' && (
+        <div>
+          <h2>why this is enough</h2>
+          <p>{statement.evidence.theorem}</p>
+        </div>
+      )}
+      <Degrees answer={answer} />
+      {meaning && (
+        <div>
+          <h2>the field</h2>
+          <p>
+            <Formula tex={answer.body.field.tex} />, <Said phrase={meaning} />.
+          </p>
+        </div>
+      )}
+      {left && right && (
+        <div>
+          <h2>go on with</h2>
+          <p>
+            the{' '}
+            <button type="button" className="plain" onClick={() => onWrite(left.text)}>
+              left side
+            </button>{' '}
+            or the{' '}
+            <button type="button" className="plain" onClick={() => onWrite(right.text)}>
+              right side
+            </button>{' '}
+            by itself: its canonical form, derivation and residues
+          </p>
+        </div>
+      )}
+    </aside>
+  );
+}

@@ -1,0 +1,128 @@
+'use client';
+
+import { useMemo } from 'react';
+import { readFieldName } from '@/grammar/read';
+import { Button } from '../../button/button';
+import { useKey } from '../../keys/keys-provider';
+import { Formula } from '../../math/formula';
+import type { Answer } from '../ask';
+import { fieldMeaning } from '../field-meaning';
+import type { Phrase } from '../phrase';
+import type { BenchState } from '../use-bench';
+import { Deeds } from './deeds';
+import { useDifference } from './difference';
+import { EmptySheet } from './empty-sheet';
+import { ExpressionEvidence } from './expression-evidence';
+import { LongFormula } from './long-formula';
+import { Notes } from './notes';
+import { StatementEvidence } from './statement-evidence';
+import { UnreadRow, VerdictRow } from './verdict-row';
+import { wholeForm } from './whole-form';
+
+/** What is copied: a statement as it was understood, an expression together with its canonical form. */
+function copied(answer: Answer): { text: string; tex: string } {
+  if (answer.kind === 'statement') return answer.body.statement;
+  const form = wholeForm(answer.body.parts);
+  const { expression } = answer.body;
+  return { text: `${expression.text} = ${form.text}`, tex: `${expression.tex} = ${form.tex}` };
+}
+
+/** What the name and the answer together say about the field. */
+function meaningOf(answer: Answer): Phrase | undefined {
+  try {
+    return fieldMeaning(readFieldName(answer.body.field.text), answer.body.field);
+  } catch {
+    return undefined;
+  }
+}
+
+/** The one thing an answer calls for: the missing term, or another side to compare with. */
+function Repair({ bench, answer }: { readonly bench: BenchState; readonly answer: Answer }) {
+  const { line, asked } = bench;
+  const statement = answer.kind === 'statement' && answer.body.sides.length === 2 ? answer.body : undefined;
+  const different = statement?.verdict === 'different';
+  const form = useDifference(
+    answer.body.field.text,
+    statement?.sides[0],
+    statement?.sides[1],
+    different && asked.current,
+  );
+  const unavailable = asked.current ? undefined : 'Only a current answer can be worked on';
+  const compare = () => line.current?.append(' = ');
+  const expression = answer.kind === 'expression';
+  useKey({ keyName: '=', label: 'compare it with another', act: compare, enabled: expression && asked.current });
+  const add = () => {
+    if (!form) return;
+    const line = `${answer.question.text} ${form.text.startsWith('-') ? `- (${form.text.slice(1).trimStart()})` : `+ ${form.text}`}`;
+    bench.change(line);
+  };
+  useKey({
+    keyName: 'A',
+    label: 'add the missing term',
+    act: add,
+    enabled: different && form !== undefined && asked.current,
+  });
+  if (expression)
+    return (
+      <Button wide keyName="=" tip="Put it on the left of an equation" unavailable={unavailable} onClick={compare}>
+        Compare it with another
+      </Button>
+    );
+  if (!different || !form?.repairs || answer.question.text.includes(';')) return null;
+  return (
+    <Button wide keyName="A" tip="Put the missing term on the right side" unavailable={unavailable} onClick={add}>
+      Add <Formula tex={form.tex} /> on the right
+    </Button>
+  );
+}
+
+/** The sheet: the statement as it is set, the verdict, and what it rests on. An answer to an earlier text is marked old. */
+export function Sheet({ bench }: { readonly bench: BenchState }) {
+  const { asked, reading, live, noted, fault } = bench;
+  const { answer, current } = asked;
+  const meaning = useMemo(() => (answer ? meaningOf(answer) : undefined), [answer]);
+  if (reading?.state === 'empty') return <EmptySheet bench={bench} />;
+  const old = answer !== undefined && !current;
+  const oldSaid = old && (noted || asked.slow || asked.stopped || asked.declined !== undefined || asked.offline);
+  const shown = answer && (answer.kind === 'statement' ? answer.body.statement : answer.body.expression);
+  const set = live ? { text: live.text, tex: live.tex } : shown;
+  return (
+    <main
+      className={`sheet spread bench-sheet ${old ? 'is-old' : ''}`}
+      id="sheet"
+      tabIndex={-1}
+      aria-busy={asked.waiting}
+    >
+      {oldSaid && (
+        <p className="old">
+          <b>Old answer.</b>{' '}
+          {live
+            ? 'It belongs to the text before, and changes when the new one is answered.'
+            : 'It belongs to the last text that could be read, and changes when the line above can be read again.'}
+        </p>
+      )}
+      {set && (
+        <p className="set">
+          <LongFormula text={set.text} tex={set.tex} />
+        </p>
+      )}
+      {answer ? <VerdictRow answer={answer} old={old} /> : <UnreadRow unread={fault !== undefined && noted} />}
+      {answer && (
+        <>
+          <Deeds
+            field={answer.question.field}
+            line={answer.question.text}
+            {...copied(answer)}
+            repair={<Repair bench={bench} answer={answer} />}
+          />
+          {answer.kind === 'statement' ? (
+            <StatementEvidence key={`${answer.question.field} ${answer.question.text}`} answer={answer.body} />
+          ) : (
+            <ExpressionEvidence answer={answer.body} expression={answer.question.text} />
+          )}
+          <Notes answer={answer} meaning={meaning} onWrite={bench.change} />
+        </>
+      )}
+    </main>
+  );
+}

@@ -1,0 +1,83 @@
+'use client';
+
+import { useCallback, useRef, useState } from 'react';
+import type { CompareAnswer } from '@/lib/contracts/compare';
+import { Button } from '../../button/button';
+import { useKey } from '../../keys/keys-provider';
+import { Row } from '../../shell/row';
+import type { FloorCell } from '../../tile/floor';
+import { ApartTable } from './apart-table';
+import { ChainTable } from './chain-table';
+import { Difference } from './difference';
+import { EvidenceFloor } from './evidence-floor';
+
+/** A statement longer than this is not asked about once more for its difference. */
+const shortEnough = 2000;
+
+/** What a verdict rests on: the chain, the floor of tiles, left and right apart, left minus right. */
+export function StatementEvidence({ answer }: { readonly answer: CompareAnswer }) {
+  const chain = answer.chain && answer.chain.length > 1 ? answer.chain : undefined;
+  const begin = chain ? Math.max(0, answer.firstWrong ?? chain.findIndex((step) => step.verdict !== 'equal')) : 0;
+  const [step, setStep] = useState(begin);
+  const [open, setOpen] = useState<boolean>();
+  const [chosen, setChosen] = useState<FloorCell>();
+  const apart = useRef<HTMLDivElement>(null);
+
+  const judged = chain?.[step];
+  const parts = judged?.parts ?? answer.parts;
+  const verdict = judged?.verdict ?? answer.verdict;
+  const left = judged?.left ?? answer.sides[0];
+  const right = judged?.right ?? answer.sides[1];
+  const shown = open ?? verdict !== 'equal';
+
+  const toggle = useCallback(() => {
+    setOpen(!shown);
+    if (!shown) requestAnimationFrame(() => apart.current?.scrollIntoView({ block: 'nearest' }));
+  }, [shown]);
+  useKey({ keyName: 'W', label: 'why: left and right apart', act: toggle });
+  const showCell = useCallback((cell: FloorCell | undefined) => {
+    setChosen(cell);
+    if (cell) setOpen(true);
+  }, []);
+
+  return (
+    <>
+      {chain && (
+        <Row side="steps" sideClass="to-chain" id="steps">
+          <ChainTable chain={chain} firstWrong={answer.firstWrong} shown={step} onShow={setStep} />
+        </Row>
+      )}
+      <Row label={chain ? `Evidence for step ${step + 1}` : 'Evidence'}>
+        {chain && (
+          <p className="text quiet floor-of">
+            Step {step + 1} of {chain.length}:
+          </p>
+        )}
+        {parts.length === 0 ? (
+          <p className="text quiet">Both sides are zero in every degree.</p>
+        ) : (
+          <EvidenceFloor parts={parts} onShow={showCell}>
+            <Button kind="plain" keyName="W" tip="Why" aria-expanded={shown} className="legend-act" onClick={toggle}>
+              Left and right apart
+            </Button>
+          </EvidenceFloor>
+        )}
+        {chosen && (
+          <p className="text cell-said" role="status">
+            {chosen.name}.
+          </p>
+        )}
+      </Row>
+      {shown && parts.length > 0 && (
+        <Row side="left and right apart" sideClass="to-table" id="apart">
+          <div ref={apart}>
+            <ApartTable parts={parts} chosen={chosen?.key} />
+          </div>
+        </Row>
+      )}
+      {verdict === 'different' && left && right && left.text.length + right.text.length <= shortEnough && (
+        <Difference field={answer.field.text} left={left} right={right} evidence={(judged ?? answer).evidence} />
+      )}
+    </>
+  );
+}

@@ -1,0 +1,74 @@
+'use client';
+
+import { useCallback, useDeferredValue, useEffect, useMemo, useRef, useState } from 'react';
+import type { Question } from './ask';
+import { type Draft, lastField, rememberField } from './drafts';
+import type { LineHandle } from './editor/line-editor';
+import { faultOfDeclined, faultOfReading } from './fault';
+import { useAnswer } from './use-answer';
+import { useReading } from './use-reading';
+
+/** How long a line must stay unread before a note under it says why, so that the page does not move at each bracket that is opened. */
+const patience = 350;
+
+function useAfterRest(active: boolean, delay: number): boolean {
+  const [rested, setRested] = useState(false);
+  useEffect(() => {
+    if (!active) return;
+    const timer = setTimeout(() => setRested(true), delay);
+    return () => {
+      clearTimeout(timer);
+      setRested(false);
+    };
+  }, [active, delay]);
+  return active && rested;
+}
+
+/** Everything that is known while one writes: the text, how it reads, what is wrong in it, and the last answer. */
+export function useBench(opened: Draft | undefined) {
+  const line = useRef<LineHandle>(null);
+  const [field, setFieldState] = useState(opened?.field ?? 'Q');
+  const [text, setText] = useState(opened?.statement ?? '');
+  const [edited, setEdited] = useState(false);
+  const [lastKey, setLastKey] = useState(0);
+
+  useEffect(() => {
+    if (!opened) setFieldState((now) => lastField() ?? now);
+  }, [opened]);
+
+  const reading = useReading(text);
+  const settled = useDeferredValue(reading);
+  const question = useMemo<Question | undefined>(
+    () => (reading?.state === 'read' ? { kind: reading.kind, field, text: reading.text.trimEnd() } : undefined),
+    [reading, field],
+  );
+  const asked = useAnswer(question, lastKey);
+  const fault = useMemo(
+    () => faultOfReading(reading) ?? faultOfDeclined(asked.declined, text),
+    [reading, asked.declined, text],
+  );
+  const noted = useAfterRest(fault !== undefined, patience);
+
+  const change = useCallback((next: string) => {
+    setText(next);
+    setEdited(true);
+    setLastKey(performance.now());
+  }, []);
+  const setField = useCallback((next: string) => {
+    setFieldState(next);
+    setEdited(true);
+    setLastKey(performance.now());
+    rememberField(next);
+  }, []);
+  const write = useCallback((draft: Draft) => {
+    setText(draft.statement);
+    setFieldState(draft.field);
+    setEdited(true);
+    setLastKey(performance.now());
+  }, []);
+
+  const live = settled?.state === 'read' ? settled : undefined;
+  return { line, field, setField, text, change, write, edited, reading, live, question, asked, fault, noted };
+}
+
+export type BenchState = ReturnType<typeof useBench>;
