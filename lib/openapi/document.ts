@@ -1,4 +1,10 @@
-import { OpenApiBuilder, type OpenAPIObject, type OperationObject, type ResponseObject } from 'openapi3-ts/oas31';
+import {
+  OpenApiBuilder,
+  type HeadersObject,
+  type OpenAPIObject,
+  type OperationObject,
+  type ResponseObject,
+} from 'openapi3-ts/oas31';
 import type { AnyContract, Example } from '@/lib/contracts/contract';
 import { apiVersion } from '@/lib/contracts/openapi';
 import { type ProblemCode, problemKinds } from '@/lib/contracts/problem';
@@ -100,7 +106,7 @@ const quotaHeaders = {
   'RateLimit-Reset': header('Seconds until all of them are there again.', 'integer'),
 };
 
-function declineHeaders(status: string) {
+function declineHeaders(status: string): HeadersObject {
   if (status === '405') return { Allow: header('The methods that answer.', 'string') };
   if (status === '429' || status === '503') return { 'Retry-After': header('Seconds to wait.', 'integer') };
   return {};
