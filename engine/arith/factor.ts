@@ -1,7 +1,9 @@
 import type { Budget } from './budget';
 import { bitLength } from './bits';
+import { ellipticCurves } from './elliptic-curves';
 import { perfectPower } from './perfect-power';
 import { isPrimeWithoutSmallFactor } from './prime';
+import { quadraticSieve } from './quadratic-sieve/quadratic-sieve';
 import { rho } from './rho';
 import { smallPrimeDivisors, TRIAL_BOUND } from './small-primes';
 import { valuation } from './valuation';
@@ -14,7 +16,7 @@ export interface PrimePower {
 /**
  * The prime factorisation of |n| for n ≠ 0, primes ascending; empty for ±1. Throws a RangeError for 0.
  *
- * Trial division to 2^12, perfect powers, then rho. Primes are primes in the sense of `isPrime`; the product is compared
+ * Trial division to 2^12, perfect powers, rho, elliptic curves for long numbers, then the quadratic sieve. Primes are primes in the sense of `isPrime`; the product is compared
  * with n before the answer is given. The same n always takes the same way. `budget.spend` is called all along, so that the
  * caller can stop it.
  */
@@ -51,9 +53,30 @@ function split(n: bigint, multiplicity: number, found: Map<bigint, number>, budg
   split(n / divisor, multiplicity, found, budget, doing);
 }
 
+/** Up to this length rho alone is quickest; up to the second the quadratic sieve ends in a time worth waiting for. */
+const RHO_BITS = 56;
+const SIEVE_BITS = 320;
+
+/** Elliptic curves against factors of about 12, 15, 20, 25, … digits: how long n must be for them, the bound B₁, how many. */
+const stages: readonly { readonly bits: number; readonly bound: number; readonly curves: number }[] = [
+  { bits: 150, bound: 500, curves: 10 },
+  { bits: 165, bound: 2000, curves: 25 },
+  { bits: 190, bound: 11000, curves: 90 },
+  { bits: 230, bound: 50000, curves: 240 },
+  { bits: 270, bound: 250000, curves: 500 },
+];
+
+/** A divisor other than 1 and n of a composite n that is no perfect power and has no prime factor below 2^12. */
 function properDivisor(n: bigint, budget: Budget, doing: string): bigint {
-  const divisor = rho(n, Number.POSITIVE_INFINITY, budget, doing);
-  if (divisor === undefined) throw new Error(`no factor found of ${named(n)}`);
+  const bits = bitLength(n);
+  let divisor = rho(n, bits <= RHO_BITS ? Number.POSITIVE_INFINITY : 8192, budget, doing);
+  for (const stage of stages) {
+    if (bits < stage.bits) break;
+    divisor ??= ellipticCurves(n, stage.bound, stage.curves, budget, doing);
+  }
+  if (bits <= SIEVE_BITS) divisor ??= quadraticSieve(n, budget, doing);
+  for (let bound = 1_000_000; divisor === undefined; bound *= 2)
+    divisor = ellipticCurves(n, bound, 1000, budget, doing);
   return divisor;
 }
 
