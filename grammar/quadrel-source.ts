@@ -106,7 +106,7 @@ Quadrel {
             | rationalsSign                                                        -- rationals
             | realsSign                                                            -- reals
             | complexesSign                                                        -- complexes
-            | "any" ~latin                                                         -- any
+            | ("any" ~latin | boldface<"any">)                                     -- any
   fieldStep = "(" gap fieldLetter gap ")" gap                                           -- functions
             | "[" gap fieldLetter gap "]" gap ("/" | otherOver) gap "(" gap element ")" gap              -- extension
   rationalsSign = "Q" | "ℚ" | "𝐐" | boldface<"Q"> | "\\QQ" ~latin | "\\Q" ~latin
