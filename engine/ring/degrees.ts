@@ -1,34 +1,68 @@
 import { checkDegree } from './limits';
 import type { Term } from './term';
 
-/** The degrees of the words a sum of terms multiplies out to. */
-export function degreesOf<A>(terms: readonly Term<A>[]): ReadonlySet<number> {
-  const degrees = new Set<number>();
-  for (const term of terms) for (const degree of degreesOfTerm(term)) degrees.add(degree);
-  return degrees;
+/** A non-empty finite set of degrees: bit i of `bits` stands for the degree low + i, and bit 0 is set. */
+interface DegreeSet {
+  readonly low: number;
+  readonly bits: bigint;
 }
 
-function degreesOfTerm<A>(term: Term<A>): Iterable<number> {
-  let plain = -term.eta;
-  let degrees: ReadonlySet<number> | undefined;
-  for (const factor of term.factors) {
-    if (factor.kind === 'symbol') plain += 1;
-    else degrees = sums(degrees, multiples(degreesOf(factor.of), factor.exponent));
+/** The degrees of the words a sum of terms multiplies out to, highest first. */
+export function degreesOf<A>(terms: readonly Term<A>[]): readonly number[] {
+  const set = degreeSet(terms);
+  if (set === undefined) return [];
+  return bitsOf(set.bits)
+    .map((i) => set.low + i)
+    .reverse();
+}
+
+function degreeSet<A>(terms: readonly Term<A>[]): DegreeSet | undefined {
+  const plain = new Set<number>();
+  let union: DegreeSet | undefined;
+  for (const term of terms) {
+    let degree = -term.eta;
+    let compound: DegreeSet | undefined = { low: 0, bits: 1n };
+    for (const factor of term.factors) {
+      if (factor.kind === 'symbol') degree += 1;
+      else compound = compound && sums(compound, multiples(degreeSet(factor.of), factor.exponent));
+    }
+    if (compound === undefined) continue;
+    if (compound.bits === 1n) plain.add(degree + compound.low);
+    else union = unite(union, { low: compound.low + degree, bits: compound.bits });
   }
-  if (degrees === undefined) return [plain];
-  return [...degrees].map((degree) => degree + plain);
+  for (const low of plain) union = unite(union, { low, bits: 1n });
+  return union;
 }
 
-function multiples(degrees: ReadonlySet<number>, times: number): ReadonlySet<number> {
-  let result: ReadonlySet<number> | undefined;
-  for (let i = 0; i < times; i += 1) result = sums(result, degrees);
-  return result ?? new Set([0]);
-}
-
-function sums(x: ReadonlySet<number> | undefined, y: ReadonlySet<number>): ReadonlySet<number> {
+function unite(x: DegreeSet | undefined, y: DegreeSet): DegreeSet {
   if (x === undefined) return y;
-  const result = new Set<number>();
-  for (const a of x) for (const b of y) result.add(a + b);
-  for (const degree of result) checkDegree(degree);
+  const low = Math.min(x.low, y.low);
+  return { low, bits: (x.bits << BigInt(x.low - low)) | (y.bits << BigInt(y.low - low)) };
+}
+
+function sums(x: DegreeSet, y: DegreeSet | undefined): DegreeSet | undefined {
+  if (y === undefined) return undefined;
+  let bits = 0n;
+  for (const i of bitsOf(y.bits)) bits |= x.bits << BigInt(i);
+  const low = x.low + y.low;
+  checkDegree(low);
+  checkDegree(low + bits.toString(2).length - 1);
+  return { low, bits };
+}
+
+function multiples(x: DegreeSet | undefined, times: number): DegreeSet | undefined {
+  let result: DegreeSet | undefined = { low: 0, bits: 1n };
+  let square = x;
+  for (let rest = times; rest > 0; rest >>= 1) {
+    if (rest & 1) result = result && sums(result, square);
+    if (rest > 1) square = square && sums(square, square);
+  }
   return result;
+}
+
+function bitsOf(bits: bigint): readonly number[] {
+  const positions: number[] = [];
+  const digits = bits.toString(2);
+  for (let i = 0; i < digits.length; i += 1) if (digits[digits.length - 1 - i] === '1') positions.push(i);
+  return positions;
 }

@@ -11,11 +11,16 @@ export function fieldUnits<E>(field: FiniteField<E>): UnitGroup<E> {
     equal: field.equal,
     minusOne,
     classOfMinusOne: field.isSquare(minusOne) ? 0n : 1n,
-    orderModFour: field.characteristic === 2n ? 2 : field.order % 4n === 1n ? 1 : 3,
+    orderModFour: orderModFour(field),
   };
 }
 
 /** A unit of a finite field with its square class. */
 export function classedUnit<E>(field: FiniteField<E>, unit: E): ClassedUnit<E> {
   return { unit, squareClass: field.isSquare(unit) ? 0n : 1n };
+}
+
+/** q mod 4 for odd q, 2 in characteristic 2. */
+export function orderModFour(field: { readonly order: bigint; readonly characteristic: bigint }): 1 | 2 | 3 {
+  return field.characteristic === 2n ? 2 : field.order % 4n === 1n ? 1 : 3;
 }

@@ -1,0 +1,31 @@
+import type { Budget } from '../arith/budget';
+import type { Element } from '../expression/element';
+import type { Expression } from '../expression/expression';
+import type { Condition } from '../expression/statement';
+import type { Finding } from './finding';
+import type { NormalizedDegree, ResiduesOutcome } from './outcome';
+
+/** What was compared, map by map, and why that is complete: theorem and source. */
+export interface Decision {
+  readonly findings: readonly Finding[];
+  readonly theorem: string;
+}
+
+/** What a field offers to whoever decides over it: generic code asks only this. */
+export interface DecidableField {
+  /** The name as it is typed. */
+  readonly name: string;
+  readonly tex: string;
+  decide(left: Expression, right: Expression, conditions: readonly Condition[], budget: Budget): Decision;
+  /** The canonical form by degree, highest first; parts that are zero are left out. */
+  normalForm(expression: Expression, conditions: readonly Condition[], budget: Budget): readonly NormalizedDegree[];
+  /** Side conditions under which the entries make sense; none over a field whose elements are known. */
+  sideConditions(expressions: readonly Expression[], conditions: readonly Condition[], budget: Budget): readonly Condition[];
+  /** Residues; absent for a field that has no discrete valuation the engine knows. */
+  readonly residues?: (
+    expression: Expression,
+    places: readonly string[] | undefined,
+    uniformizer: Element | undefined,
+    budget: Budget,
+  ) => ResiduesOutcome;
+}

@@ -1,0 +1,92 @@
+import type { Budget } from '../arith/budget';
+import type { Element } from '../expression/element';
+import type { Expression } from '../expression/expression';
+import type { FiniteField } from '../field/field';
+import { degreesOf } from '../ring/degrees';
+import { evaluate } from '../ring/evaluate';
+import { classedUnit, fieldUnits } from '../ring/field-units';
+import type { GradedRing } from '../ring/graded-ring';
+import { lower } from '../ring/lower';
+import { residueClassRing, type ClassedUnit, type ResidueClass } from '../ring/residue-class-ring';
+import type { Term } from '../ring/term';
+import { writeResidueClass } from '../ring/write-residue-class';
+import type { DecidableField } from './decidable-field';
+import type { Finding } from './finding';
+import { checkConcreteConditions } from './concrete-conditions';
+import { readUnit } from './read-unit';
+import { residueReason } from './residue-reason';
+
+const THEOREM =
+  'Over a finite field K^MW_n is 0 for n ≥ 2, the units for n = 1, and forms are classified by rank and discriminant ' +
+  '(K_2 = 0: J. Milnor, Introduction to Algebraic K-Theory, §9; forms: T. Y. Lam, Introduction to Quadratic Forms over Fields, II.3; ' +
+  'J. Milnor, D. Husemoller, Symmetric Bilinear Forms, for characteristic 2).';
+
+/**
+ * 𝔽_q decides by its own closed form: K^MW_n(𝔽_q) is 0 for n ≥ 2, 𝔽_q^× for n = 1, GW(𝔽_q) for n = 0 and W(𝔽_q) for n < 0.
+ */
+export function decidableFiniteField<E>(field: FiniteField<E>): DecidableField {
+  const units = fieldUnits(field);
+  const ring = residueClassRing(units);
+  const read = (expression: Expression, budget: Budget): readonly Term<ClassedUnit<E>>[] =>
+    lower(expression, (entry: Element) => classedUnit(field, readUnit(entry, field, budget)));
+
+  return {
+    name: field.name,
+    tex: field.tex,
+    decide(left, right, conditions, budget) {
+      checkConcreteConditions(field, conditions, budget);
+      const sides = [read(left, budget), read(right, budget)] as const;
+      const [l, r] = [evaluate(sides[0], ring, budget), evaluate(sides[1], ring, budget)];
+      const findings = degreesOf([...sides[0], ...sides[1]]).map((degree) =>
+        finding(field, ring, degree, l.get(degree), r.get(degree)),
+      );
+      return { findings, theorem: THEOREM };
+    },
+    normalForm(expression, conditions, budget) {
+      checkConcreteConditions(field, conditions, budget);
+      const value = evaluate(read(expression, budget), ring, budget);
+      return [...value]
+        .sort(([a], [b]) => b - a)
+        .map(([degree, part]) => ({ degree, normalForm: writeResidueClass(field, degree, part), canonical: true }));
+    },
+    sideConditions: () => [],
+  };
+}
+
+function finding<E>(
+  field: FiniteField<E>,
+  ring: GradedRing<ClassedUnit<E>, ResidueClass<E>>,
+  degree: number,
+  left: ResidueClass<E> | undefined,
+  right: ResidueClass<E> | undefined,
+): Finding {
+  const same = left === undefined || right === undefined ? left === right : ring.equal(degree, left, right);
+  return {
+    map: 'class',
+    degree,
+    same,
+    zero: left === undefined && right === undefined,
+    sameModEta: same || degree < 0 || (degree === 0 && (left?.rank ?? 0n) === (right?.rank ?? 0n)),
+    sameModH: same || sameWittClass(field, left, right),
+    left: () => writeResidueClass(field, degree, left),
+    right: () => writeResidueClass(field, degree, right),
+    target: () =>
+      degree > 1
+        ? '0'
+        : degree === 1
+          ? `${field.tex}^{\\times}`
+          : `\\mathrm{${degree === 0 ? 'GW' : 'W'}}(${field.tex})`,
+    reason: () => residueReason(degree, left, right, `in ${field.name}`),
+  };
+}
+
+/** Whether two classes have the same image in W(𝔽_q): even difference of ranks and the same signed discriminant. */
+function sameWittClass<E>(
+  field: FiniteField<E>,
+  left: ResidueClass<E> | undefined,
+  right: ResidueClass<E> | undefined,
+): boolean {
+  const rank = (left?.rank ?? 0n) - (right?.rank ?? 0n);
+  const twist = (rank & 2n) === 2n ? fieldUnits(field).classOfMinusOne : 0n;
+  return (rank & 1n) === 0n && ((left?.squareClass ?? 0n) ^ (right?.squareClass ?? 0n) ^ twist) === 0n;
+}

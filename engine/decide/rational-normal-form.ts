@@ -1,0 +1,114 @@
+import type { Budget } from '../arith/budget';
+import { factor } from '../arith/factor';
+import { integerElement } from '../expression/element';
+import { symbol, type Expression } from '../expression/expression';
+import { primeField } from '../field/prime-field';
+import type { RationalEntry } from '../place/rational-entry';
+import { rationalPlace } from '../place/rational-place';
+import type { BaseElement } from '../place/sight';
+import { thetaRing } from '../place/theta-ring';
+import { evaluate } from '../ring/evaluate';
+import { orderModFour } from '../ring/field-units';
+import { residueWords } from '../ring/residue-words';
+import { rankRing, signatureRing } from '../ring/signature-ring';
+import type { Term } from '../ring/term';
+import { writeResidueClass } from '../ring/write-residue-class';
+import { etaFactors, isZero, minusOneElement, multiple, symbolFactors, total } from '../ring/write-word';
+import type { NormalizedDegree } from './outcome';
+import { incidence, type RationalStatement } from './rational-statement';
+
+/**
+ * The tower normal form over ℚ: α = b + Σ_p [p]·r̃_p, unique, so that two classes are equal iff their forms are identical.
+ *
+ * For p from the largest prime downwards let r_p be the residue at p of what is left and r̃_p its canonical lift, written with
+ * integers in 1 … p − 1; subtract [p]·r̃_p. All primes of r̃_p are smaller than p, so this ends, and what is left lies in the
+ * constants B_n, seen by signature and rank: c[−1]ⁿ for n ≥ 1 with signature (−2)ⁿc, x + yη[−1] for n = 0, cη⁻ⁿ for n < 0
+ * (the filtration of J. Milnor, Introduction to Algebraic K-Theory, §11, after Tate, lifted along the pull-back theorem).
+ */
+export function rationalNormalForm(statement: RationalStatement, budget: Budget): readonly NormalizedDegree[] {
+  const parts = new Map<number, Expression[]>();
+  const put = (degree: number, word: Expression): void => {
+    if (isZero(word)) return;
+    const words = parts.get(degree);
+    if (words === undefined) parts.set(degree, [word]);
+    else words.push(word);
+  };
+  for (const [degree, word] of tower(statement, budget)) put(degree, word);
+  const [terms = []] = statement.sides;
+  const rank = evaluate(terms, rankRing, budget).get(0) ?? 0n;
+  const signatures = evaluate(terms, signatureRing<RationalEntry>((entry) => entry.negative), budget);
+  for (const degree of new Set([...signatures.keys(), 0])) put(degree, constantPart(degree, signatures.get(degree) ?? 0n, rank));
+  return [...parts]
+    .sort(([a], [b]) => b - a)
+    .map(([degree, words]) => ({ degree, normalForm: total(words.reverse()), canonical: true }));
+}
+
+/** The class of B_n with this signature and, for n = 0, this rank. */
+export function constantPart(degree: number, signature: bigint, rank: bigint): Expression {
+  if (degree > 0) {
+    const c = signature / (-2n) ** BigInt(degree);
+    return c === 0n ? total([]) : multiple(c, symbolFactors(minusOneElement, degree));
+  }
+  if (degree < 0) return signature === 0n ? total([]) : multiple(signature, etaFactors(-degree));
+  const minus = (rank - signature) / 2n;
+  const words = minus === 0n ? [] : [multiple(minus, [...etaFactors(1), ...symbolFactors(minusOneElement, 1)])];
+  return total(rank === 0n ? words : [multiple(rank, []), ...words]);
+}
+
+/** The products [p]·r̃_p with their degree, largest prime first. */
+function* tower(statement: RationalStatement, budget: Budget): Generator<readonly [number, Expression]> {
+  const sight = incidence(statement, 'all', budget);
+  const base: BaseElement[] = [...sight.base];
+  const indexOf = new Map(base.map(({ value }, index) => [value, index]));
+  const pending: Term<RationalEntry>[][] = sight.terms.map(([terms = []]) => [...terms]);
+  const queue = [...base.map(({ value }) => value)]; // ascending; the next prime is the last
+
+  const indexOfPrime = (p: bigint): number => {
+    const known = indexOf.get(p);
+    if (known !== undefined) return known;
+    const index = base.push({ value: p, prime: true }) - 1;
+    indexOf.set(p, index);
+    pending.push([]);
+    let at = queue.length;
+    while (at > 0 && (queue[at - 1] ?? 0n) > p) at -= 1;
+    queue.splice(at, 0, p);
+    return index;
+  };
+  const entries = new Map<bigint, RationalEntry>();
+  const entryOf = (n: bigint): RationalEntry => {
+    const known = entries.get(n);
+    if (known !== undefined) return known;
+    const exponents = new Map(factor(n, budget).map(({ prime, exponent }) => [indexOfPrime(prime), BigInt(exponent)]));
+    const entry: RationalEntry = { value: { num: n, den: 1n }, negative: false, at: undefined, exponents };
+    entries.set(n, entry);
+    return entry;
+  };
+
+  for (let p = queue.pop(); p !== undefined; p = queue.pop()) {
+    budget.spend('building the tower of residues');
+    const index = indexOfPrime(p);
+    const field = primeField(p);
+    const { units, local } = rationalPlace(base, index);
+    const residues = evaluate(pending[index] ?? [], thetaRing(units, local), budget);
+    for (const [degree, { d }] of residues) {
+      if (d === undefined) continue;
+      const prefix = [symbol([integerElement(p)])];
+      yield [degree, writeResidueClass(field, degree - 1, d, prefix)];
+      for (const word of residueWords(degree - 1, d, { nonSquare: field.nonSquare, orderModFour: orderModFour(field) })) {
+        const lift = word.symbol ?? word.angle;
+        if (lift === undefined) continue; // [p]ηᵏ ramifies at p only
+        const entry = entryOf(lift);
+        const term: Term<RationalEntry> = {
+          coefficient: -word.coefficient,
+          eta: word.eta,
+          angles: word.angle === undefined ? [] : [entry],
+          factors: [
+            { kind: 'symbol', entry: entryOf(p) },
+            ...(word.symbol === undefined ? [] : [{ kind: 'symbol' as const, entry }]),
+          ],
+        };
+        for (const other of entry.exponents.keys()) pending[other]?.push(term);
+      }
+    }
+  }
+}

@@ -1,0 +1,44 @@
+import type { Budget } from '../arith/budget';
+import type { Expression } from '../expression/expression';
+import { rationals } from '../field/rational';
+import { rationalEntries, type RationalEntry } from '../place/rational-entry';
+import { see, type BaseElement, type Splitting } from '../place/sight';
+import { lower } from '../ring/lower';
+import { entriesOf, type Term } from '../ring/term';
+import { readUnit } from './read-unit';
+
+/** Words with rational entries in kernel form, and all entries that occur in them. */
+export interface RationalStatement {
+  readonly sides: readonly (readonly Term<RationalEntry>[])[];
+  readonly entries: readonly RationalEntry[];
+}
+
+/** Reads the entries of expressions as non-zero rationals. */
+export function rationalStatement(expressions: readonly Expression[], budget: Budget): RationalStatement {
+  const entries = rationalEntries();
+  const sides = expressions.map((side) =>
+    lower(side, (entry) => entries.intern(readUnit(entry, rationals, budget), entry.at)),
+  );
+  return { sides, entries: entries.all() };
+}
+
+/** The terms of each side that ramify at each element of the base, by its index. */
+export interface Incidence {
+  readonly base: readonly BaseElement[];
+  /** For every base index, one list of terms for each side. */
+  readonly terms: readonly (readonly (readonly Term<RationalEntry>[])[])[];
+}
+
+/** Finds the primes in sight and which terms ramify where: linear in the number of pairs of a term and a prime in it. */
+export function incidence({ sides, entries }: RationalStatement, split: Splitting, budget: Budget): Incidence {
+  const base = see(entries, split, budget);
+  const terms: Term<RationalEntry>[][][] = base.map(() => sides.map(() => []));
+  sides.forEach((side, s) => {
+    for (const term of side) {
+      const seen = new Set<number>();
+      for (const entry of entriesOf(term)) for (const index of entry.exponents.keys()) seen.add(index);
+      for (const index of seen) terms[index]?.[s]?.push(term);
+    }
+  });
+  return { base, terms };
+}

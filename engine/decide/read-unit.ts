@@ -1,0 +1,20 @@
+import type { Budget } from '../arith/budget';
+import type { Element } from '../expression/element';
+import { Refusal } from '../expression/refusal';
+import { elementText } from '../expression/to-text';
+import type { Field } from '../field/field';
+import { readElement } from '../field/read-element';
+
+/** The value of an entry in a field; an entry that is zero there is refused. */
+export function readUnit<E>(entry: Element, field: Field<E>, budget: Budget): E {
+  const value = readElement(entry, field, budget);
+  if (field.isZero(value)) throw notAUnit(entry, field.name);
+  return value;
+}
+
+/** The refusal of an entry that is zero. */
+export function notAUnit(entry: Element, fieldName: string): Refusal {
+  const text = elementText(entry);
+  const zero = text === '0' ? '0 is none' : `${text} is 0 in ${fieldName}`;
+  return new Refusal('not-a-unit', `An entry of a symbol must be a unit, and ${zero}.`, entry.at);
+}

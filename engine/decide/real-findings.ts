@@ -1,0 +1,55 @@
+import type { Budget } from '../arith/budget';
+import type { Expression } from '../expression/expression';
+import { degreesOf } from '../ring/degrees';
+import { evaluate } from '../ring/evaluate';
+import { rankRing, signatureRing } from '../ring/signature-ring';
+import type { Term } from '../ring/term';
+import { multiple, zeroExpression } from '../ring/write-word';
+import type { Finding } from './finding';
+
+/** The rank in degree 0, and in every degree of the words the signature at the real place. */
+export function realFindings<A extends { readonly negative: boolean }>(
+  left: readonly Term<A>[],
+  right: readonly Term<A>[],
+  budget: Budget,
+): readonly Finding[] {
+  const ring = signatureRing<A>((entry) => entry.negative);
+  const [l, r] = [evaluate(left, ring, budget), evaluate(right, ring, budget)];
+  return degreesOf([...left, ...right]).flatMap((degree): readonly Finding[] => {
+    const values = [l.get(degree) ?? 0n, r.get(degree) ?? 0n] as const;
+    // in degree n ≥ 1 the signature is a multiple of 2ⁿ, and Milnor K-theory sees that multiple modulo 2
+    const sameModEta = degree < 1 || (values[0] - values[1]) % 2n ** BigInt(degree + 1) === 0n;
+    const signature = integerFinding('signature', degree, values, sameModEta, values[0] === values[1]);
+    return [...(degree === 0 ? [rankFinding(left, right, budget)] : []), { ...signature, place: 'real' }];
+  });
+}
+
+/** The ranks of the parts of degree 0. */
+export function rankFinding<A>(left: readonly Term<A>[], right: readonly Term<A>[], budget: Budget): Finding {
+  const rank = (terms: readonly Term<A>[]): bigint => evaluate(terms, rankRing, budget).get(0) ?? 0n;
+  const values = [rank(left), rank(right)] as const;
+  return integerFinding('rank', 0, values, values[0] === values[1], (values[0] - values[1]) % 2n === 0n);
+}
+
+/** Two integers compared. */
+export function integerFinding(
+  map: 'rank' | 'signature',
+  degree: number,
+  [left, right]: readonly [bigint, bigint],
+  sameModEta: boolean,
+  sameModH: boolean,
+): Finding {
+  const write = (n: bigint): Expression => (n === 0n ? zeroExpression : multiple(n, []));
+  return {
+    map,
+    degree,
+    same: left === right,
+    zero: left === 0n && right === 0n,
+    sameModEta,
+    sameModH,
+    left: () => write(left),
+    right: () => write(right),
+    target: () => '\\mathbb{Z}',
+    reason: () => `The ${map}s are ${left} and ${right}.`,
+  };
+}
