@@ -16,7 +16,8 @@ import {
 
 /**
  * An irreducible monic factor of least degree of a monic f of degree ≥ 1, or `undefined` when f is irreducible. Among the
- * factors of that degree it is the least, coefficients compared from the top in the order of the field.
+ * factors of that degree it is the one with the least root for degree 1, and the least one for higher degree, coefficients
+ * compared from the top in the order of the field.
  *
  * M. Ben-Or, Probabilistic algorithms in finite fields, FOCS 1981: f is irreducible iff gcd(f, x^(q^i) − x) = 1 for
  * i = 1 … ⌊deg f / 2⌋, because x^(q^i) − x is the product of the monic irreducible polynomials whose degree divides i.
@@ -39,7 +40,10 @@ export function leastFactor<E>(
 }
 
 function least<E>(field: FiniteField<E>, polynomials: readonly Polynomial<E>[]): Polynomial<E> {
-  const place = (f: Polynomial<E>): bigint => f.reduceRight((value, c) => value * field.order + field.index(c), 0n);
+  const place = (f: Polynomial<E>): bigint =>
+    degree(f) === 1
+      ? field.index(field.negate(f[0]!))
+      : f.reduceRight((value, c) => value * field.order + field.index(c), 0n);
   return polynomials.reduce((best, f) => (place(f) < place(best) ? f : best));
 }
 

@@ -57,7 +57,8 @@ const tooLarge = (at: Span | undefined): Refusal =>
   new Refusal('size', 'The order of this field has more than 10000 digits. Type a smaller field.', at);
 
 function notPrimePower(order: bigint, budget: Budget): string {
-  const fact = `${short(order)} is not a power of a prime, so that there is no field with ${short(order)} elements.`;
+  const elements = order === 1n ? 'element' : 'elements';
+  const fact = `${short(order)} is not a power of a prime, so that there is no field with ${short(order)} ${elements}.`;
   if (order < 2n) return `${fact} The least finite field is F_2.`;
   if (bitLength(order) > 64) return `${fact} Type a power of a prime.`;
   let below = order - 1n;
@@ -83,8 +84,7 @@ function withModulus<E>(
   const modulus = readModulus(written, base, letter, budget);
   const text = short(elementText(written));
   if (modulus.length < 2) {
-    const fact =
-      modulus.length === 0 ? `The modulus ${text} is 0 over ${base.name}.` : `The modulus ${text} is a constant.`;
+    const fact = modulus.length === 0 ? `The modulus is 0 over ${base.name}.` : `The modulus ${text} is a constant.`;
     throw new Refusal(
       'field',
       `${fact} Type an irreducible polynomial in ${letter}, ${example(base, letter, budget)}.`,
