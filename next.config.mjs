@@ -10,7 +10,8 @@ const describing = ['openapi-3-1', 'openapi-3-2', 'json-schema-2020-12'].map(
 const config = {
   reactStrictMode: true,
   poweredByHeader: false,
-  typedRoutes: true,
+  // Its badge would cover the page, also in browser tests.
+  devIndicators: false,
   // Types are checked once, by `npm test`; a start need not wait for them again.
   typescript: { ignoreBuildErrors: true },
   // Loaded from node_modules as they are: their own files look for others beside them.
