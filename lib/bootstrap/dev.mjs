@@ -48,7 +48,13 @@ await launch('server', 'npm run dev', 0, async (run) => {
   say('The address of the database, for tools such as psql, is in .quadrel/database-url.');
   while (!run.leaving) {
     const server = run.start(process.execPath, [nextProgram, 'dev', '-H', '127.0.0.1', '-p', String(port)], {
-      env: { ...process.env, ...nextEnvironment, NODE_ENV: 'development', PORT: String(port), DATABASE_URL: database.url },
+      env: {
+        ...process.env,
+        ...nextEnvironment,
+        NODE_ENV: 'development',
+        PORT: String(port),
+        DATABASE_URL: database.url,
+      },
     });
     const result = await Promise.race([server.ended, worker.settled()]);
     if (result !== undefined) {
