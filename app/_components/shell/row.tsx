@@ -4,7 +4,7 @@ interface Props {
   /** The italic side-head; without it the column stays empty. */
   side?: ReactNode;
   /** How far down it sits beside what follows. */
-  sideClass?: '' | 'to-chain' | 'to-lead' | 'to-strip' | 'to-table';
+  sideClass?: '' | 'to-chain' | 'to-lead' | 'to-strip' | 'to-table' | 'to-contents';
   id?: string;
   className?: string;
   /** Names the section where there is no side-head. */

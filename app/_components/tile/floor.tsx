@@ -42,6 +42,9 @@ const shownUpTo = 16;
 
 const isQuiet = (cell: FloorCell | undefined) => cell === undefined || cell.state === 'agree' || cell.state === 'none';
 
+const placeLabel = (place: FloorPlace): ReactNode =>
+  place.word ?? (/^\d+$/.test(place.tex ?? '') ? place.tex : <Formula tex={place.tex ?? place.key} />);
+
 /** Degrees down, places across; the canonical form ends each row. One tab stop a row, arrows walk, Enter shows. */
 export function Floor({ label, places, rows, heading, onShow }: Props) {
   const [stops, setStops] = useState<Record<number, number>>({});
@@ -87,7 +90,7 @@ export function Floor({ label, places, rows, heading, onShow }: Props) {
           <span className="places" role="presentation">
             {columns.map(({ place }) => (
               <span key={place.key} role="columnheader" className={place.word === undefined ? undefined : 'word'}>
-                {place.word ?? <Formula tex={place.tex ?? place.key} />}
+                {placeLabel(place)}
               </span>
             ))}
           </span>
@@ -115,7 +118,7 @@ export function Floor({ label, places, rows, heading, onShow }: Props) {
                       ) : (
                         <button
                           type="button"
-                          className={tileClass(cell.state, firings[(rowIndex + column) % 3], cell.left ?? cell.right)}
+                          className={tileClass(cell.state, firings[(2 * (rowIndex + column + 1)) % 3], cell.left ?? cell.right)}
                           aria-label={cell.name}
                           aria-pressed={chosen === cell.key}
                           data-spot={`${rowIndex}:${column}`}
