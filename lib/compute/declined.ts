@@ -1,5 +1,5 @@
 import { Refusal, type RefusalCode } from '@/engine/expression/refusal';
-import { ReadingError } from '@/grammar/reading-error';
+import type { ReadingError } from '@/grammar/reading-error';
 import { type Problem, type ProblemCode, problemOf } from '@/lib/contracts/problem';
 import { locate } from './locate';
 import { type Source, sourceOf } from './source';

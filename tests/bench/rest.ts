@@ -2,7 +2,7 @@ import autocannon from 'autocannon';
 
 const connections = 32;
 const seconds = Number(process.env.BENCH_SECONDS ?? 10);
-const base = process.env.BENCH_URL ?? `http://127.0.0.1:${process.env.PORT ?? 3000}`;
+const base = process.env.QUADREL_URL ?? 'http://127.0.0.1:3000';
 
 /** One run of `compare` on a short word over loopback. */
 const load = (duration: number) =>
