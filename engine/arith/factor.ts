@@ -30,7 +30,8 @@ export function factor(n: bigint, budget: Budget): readonly PrimePower[] {
     found.set(BigInt(p), exponent);
     rest = unit;
   }
-  split(rest, 1, found, budget, `factoring ${named(whole)}`);
+  const doing = `factoring ${named(whole)}`;
+  split(rest, 1, found, { spend: () => budget.spend(doing) }, doing);
   const factors = [...found].map(([prime, exponent]) => ({ prime, exponent }));
   factors.sort((a, b) => (a.prime < b.prime ? -1 : 1));
   const product = factors.reduce((value, { prime, exponent }) => value * prime ** BigInt(exponent), 1n);

@@ -1,7 +1,7 @@
 import type { Budget } from '@/engine/arith/budget';
 import { compare } from '@/engine/decide/compare';
 import type { Compared, CompareOutcome, ComparedDegree, Evidence, Verdict } from '@/engine/decide/outcome';
-import type { DecidableField } from '@/engine/decide/registry';
+import type { DecidableField } from '@/engine/decide/decidable-field';
 import type { Expression } from '@/engine/expression/expression';
 import type { Statement } from '@/engine/expression/statement';
 import { engineVersion } from '@/engine/version';
@@ -23,7 +23,8 @@ interface Judged {
 /** The verdict on an equality or on every step of a chain. */
 export function answerCompare(body: CompareRequest, reader: Reader, budget: Budget): CompareAnswer {
   const statement = readQuestion(body, reader);
-  const field = fieldOf(reader.fieldName(body.field), budget);
+  const resolved = fieldOf(reader.fieldName(body.field), budget);
+  const { field } = resolved;
   const judged = steps(statement.sides).map(([left, right]): Judged => ({
     left,
     right,
@@ -43,7 +44,7 @@ export function answerCompare(body: CompareRequest, reader: Reader, budget: Budg
   if (leading === undefined) throw new Error('A statement without steps was judged.');
   return {
     engine: engineVersion,
-    field: showField(field),
+    field: showField(resolved),
     statement: showStatement(statement),
     sides: statement.sides.map(showExpression),
     verdict: overall(judged.map(({ outcome }) => outcome.verdict)),

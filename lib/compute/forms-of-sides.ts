@@ -1,6 +1,6 @@
 import type { Budget } from '@/engine/arith/budget';
 import { normalize } from '@/engine/decide/normalize';
-import type { DecidableField } from '@/engine/decide/registry';
+import type { DecidableField } from '@/engine/decide/decidable-field';
 import { Refusal } from '@/engine/expression/refusal';
 import type { Statement } from '@/engine/expression/statement';
 import type { Typeset } from '@/lib/contracts/typeset';

@@ -24,11 +24,12 @@ export function answerNormalize(body: NormalizeRequest, reader: Reader, budget: 
     );
   const expression = reader.expression('expression', body.expression);
   const conditions = reader.conditions(body.hypotheses);
-  const field = fieldOf(reader.fieldName(body.field), budget);
+  const resolved = fieldOf(reader.fieldName(body.field), budget);
+  const { field } = resolved;
   const outcome = normalize(field, expression, { steps: body.steps ?? false, conditions }, budget);
   return {
     engine: engineVersion,
-    field: showField(field),
+    field: showField(resolved),
     expression: showExpression(expression),
     parts: outcome.parts.map(({ degree, normalForm, canonical }) => ({
       degree,

@@ -14,11 +14,12 @@ import { showExpression, showField } from './show';
 export function answerResidues(body: ResiduesRequest, reader: Reader, budget: Budget): ResiduesAnswer {
   const expression = reader.expression('expression', body.expression);
   const uniformizer = body.uniformizer === undefined ? undefined : reader.element('uniformizer', body.uniformizer);
-  const field = fieldOf(reader.fieldName(body.field), budget);
+  const resolved = fieldOf(reader.fieldName(body.field), budget);
+  const { field } = resolved;
   const outcome = residues(field, expression, { places: body.places, uniformizer }, budget);
   return {
     engine: engineVersion,
-    field: showField(field),
+    field: showField(resolved),
     expression: showExpression(expression),
     residues: outcome.residues.map(showResidue),
     unramifiedElsewhere: outcome.unramifiedElsewhere,

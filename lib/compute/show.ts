@@ -1,9 +1,9 @@
-import type { DecidableField } from '@/engine/decide/registry';
 import type { Expression } from '@/engine/expression/expression';
 import type { Condition, Statement } from '@/engine/expression/statement';
-import { conditionTex, expressionTex, statementTex } from '@/engine/expression/to-tex';
-import { conditionText, expressionText, statementText } from '@/engine/expression/to-text';
+import { conditionTex, elementTex, expressionTex, statementTex } from '@/engine/expression/to-tex';
+import { conditionText, elementText, expressionText, statementText } from '@/engine/expression/to-text';
 import type { FieldAnswer, Typeset } from '@/lib/contracts/typeset';
+import type { ResolvedField } from './fields';
 
 export const showExpression = (expression: Expression): Typeset => ({
   text: expressionText(expression),
@@ -26,4 +26,8 @@ export const showGroup = (fieldTex: string, degree: number): { tex: string } => 
 });
 
 /** A field as answers name it. */
-export const showField = ({ name, tex }: DecidableField): FieldAnswer => ({ text: name, tex });
+export const showField = ({ field, modulus }: ResolvedField): FieldAnswer => ({
+  text: field.name,
+  tex: field.tex,
+  ...(modulus === undefined ? {} : { modulus: { text: elementText(modulus), tex: elementTex(modulus) } }),
+});

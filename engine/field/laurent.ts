@@ -1,0 +1,145 @@
+import type { Budget } from '../arith/budget';
+import type { Element } from '../expression/element';
+import { Refusal } from '../expression/refusal';
+import type { Span } from '../expression/span';
+import type { Field } from './field';
+
+/** A monomial with its coefficient, which is not zero; exponents by letter, those that are 0 left out. */
+export interface LaurentTerm<E> {
+  readonly coefficient: E;
+  readonly exponents: ReadonlyMap<string, bigint>;
+}
+
+/** A Laurent polynomial in letters over a field: its terms by a name of their monomial. Zero has none. */
+export type Laurent<E> = ReadonlyMap<string, LaurentTerm<E>>;
+
+/** Polynomials are not multiplied out past this many terms. */
+const TERM_LIMIT = 2_000;
+
+/** Arithmetic of Laurent polynomials over a field of coefficients. */
+export interface LaurentRing<E> {
+  readonly field: Field<E>;
+  constant(value: E): Laurent<E>;
+  letter(name: string): Laurent<E>;
+  add(f: Laurent<E>, g: Laurent<E>): Laurent<E>;
+  negate(f: Laurent<E>): Laurent<E>;
+  multiply(f: Laurent<E>, g: Laurent<E>): Laurent<E>;
+  /** The inverse of a single term; `undefined` for a polynomial that is no unit of the ring. */
+  invert(f: Laurent<E>): Laurent<E> | undefined;
+}
+
+export function laurentRing<E>(field: Field<E>, budget: Budget): LaurentRing<E> {
+  const put = (terms: Map<string, LaurentTerm<E>>, term: LaurentTerm<E>): void => {
+    const key = keyOf(term.exponents);
+    const present = terms.get(key);
+    const coefficient = present === undefined ? term.coefficient : field.add(present.coefficient, term.coefficient);
+    if (field.isZero(coefficient)) terms.delete(key);
+    else terms.set(key, { coefficient, exponents: term.exponents });
+  };
+  const of = (...list: readonly LaurentTerm<E>[]): Laurent<E> => {
+    const terms = new Map<string, LaurentTerm<E>>();
+    for (const term of list) put(terms, term);
+    return terms;
+  };
+  return {
+    field,
+    constant: (value) => of({ coefficient: value, exponents: new Map() }),
+    letter: (name) => of({ coefficient: field.one, exponents: new Map([[name, 1n]]) }),
+    add: (f, g) => of(...f.values(), ...g.values()),
+    negate: (f) => of(...[...f.values()].map((term) => ({ ...term, coefficient: field.negate(term.coefficient) }))),
+    multiply(f, g) {
+      if (f.size * g.size > TERM_LIMIT)
+        throw new Refusal('not-yet', 'An entry has too many terms to multiply out. Entries in letters are decided when they are products of letters.');
+      const terms = new Map<string, LaurentTerm<E>>();
+      for (const a of f.values()) {
+        budget.spend('reading an entry');
+        for (const b of g.values())
+          put(terms, {
+            coefficient: field.multiply(a.coefficient, b.coefficient),
+            exponents: addExponents(a.exponents, b.exponents),
+          });
+      }
+      return terms;
+    },
+    invert(f) {
+      const [term, more] = f.values();
+      if (term === undefined || more !== undefined) return undefined;
+      const exponents = new Map([...term.exponents].map(([name, e]) => [name, -e] as const));
+      return of({ coefficient: field.inverse(term.coefficient), exponents });
+    },
+  };
+}
+
+const keyOf = (exponents: ReadonlyMap<string, bigint>): string =>
+  [...exponents]
+    .sort(([a], [b]) => (a < b ? -1 : 1))
+    .map(([name, e]) => `${name}^${e}`)
+    .join('*');
+
+function addExponents(a: ReadonlyMap<string, bigint>, b: ReadonlyMap<string, bigint>): ReadonlyMap<string, bigint> {
+  if (a.size === 0) return b;
+  const sum = new Map(a);
+  for (const [name, e] of b) {
+    const next = (sum.get(name) ?? 0n) + e;
+    if (next === 0n) sum.delete(name);
+    else sum.set(name, next);
+  }
+  return sum;
+}
+
+/**
+ * The value of a written element as a Laurent polynomial; `letterValue` gives what a letter stands for. Division is by single
+ * terms, or by a polynomial of which the numerator is a multiple by a single term; other quotients are refused as `not-yet`.
+ */
+export function readLaurent<E>(
+  element: Element,
+  ring: LaurentRing<E>,
+  letterValue: (name: string) => Laurent<E>,
+): Laurent<E> {
+  const read = (e: Element): Laurent<E> => {
+    switch (e.kind) {
+      case 'integer': {
+        const value = ring.field.fromInteger(e.value);
+        return ring.field.isZero(value) ? new Map() : ring.constant(value);
+      }
+      case 'letter':
+        return letterValue(e.name);
+      case 'negate':
+        return ring.negate(read(e.of));
+      case 'sum':
+        return e.terms.map(read).reduce(ring.add);
+      case 'product':
+        return e.factors.map(read).reduce(ring.multiply);
+      case 'quotient':
+        return divide(read(e.numerator), read(e.denominator), e.denominator.at ?? e.at);
+      case 'power':
+        return power(read(e.base), e.exponent, e.at);
+    }
+  };
+  const divide = (f: Laurent<E>, g: Laurent<E>, at: Span | undefined): Laurent<E> => {
+    if (g.size === 0) throw new Refusal('division-by-zero', 'The denominator is 0. Change it to a unit.', at);
+    const inverse = ring.invert(g);
+    if (inverse !== undefined) return ring.multiply(f, inverse);
+    if (f.size === 0) return f;
+    // f = m·g for a single term m, if at all for one with the quotient of two terms
+    const [top] = f.values();
+    for (const bottom of g.values()) {
+      const m = ring.multiply(single(top), ring.invert(single(bottom)) ?? new Map());
+      if (ring.add(f, ring.negate(ring.multiply(m, g))).size === 0) return m;
+    }
+    throw new Refusal('not-yet', 'Quotients by a sum of letters are not decided yet. Use entries that are products of letters.', at);
+  };
+  const single = (term: LaurentTerm<E> | undefined): Laurent<E> =>
+    term === undefined ? new Map() : new Map([[keyOf(term.exponents), term]]);
+  const power = (base: Laurent<E>, exponent: number, at: Span | undefined): Laurent<E> => {
+    if (exponent < 0) return power(divide(ring.constant(ring.field.one), base, at), -exponent, at);
+    if (base.size > 1 && exponent > TERM_LIMIT) throw new Refusal('not-yet', 'Large powers of a sum of letters are not decided yet.', at);
+    let result = ring.constant(ring.field.one);
+    for (const digit of exponent.toString(2)) {
+      result = ring.multiply(result, result);
+      if (digit === '1') result = ring.multiply(result, base);
+    }
+    return result;
+  };
+  return read(element);
+}
