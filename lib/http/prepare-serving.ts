@@ -1,9 +1,9 @@
 import 'server-only';
 import { warmPool } from '@/lib/compute/pool';
-import { markAddresses } from './address';
+import { correctIncoming } from './incoming';
 
 /** What has to stand before the first request is served. */
 export function prepareServing(): void {
-  markAddresses();
+  correctIncoming();
   warmPool();
 }

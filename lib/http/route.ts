@@ -5,8 +5,8 @@ import type { AnyContract, Contract } from '@/lib/contracts/contract';
 import { type Problem, problemOf } from '@/lib/contracts/problem';
 import { shapeProblem } from '@/lib/contracts/shape';
 import { may } from '@/lib/permissions';
-import { addressOf } from './address';
 import { readBody } from './body';
+import { addressOf, foreignMethod } from './incoming';
 import { takeQuota } from './quota';
 import { requestId } from './request-id';
 import { jsonResponse, problemResponse } from './respond';
@@ -76,13 +76,15 @@ async function readValid(
 function handlers(method: 'GET' | 'POST', handle: Handler): Handlers {
   const allow = method === 'GET' ? 'GET, HEAD, OPTIONS' : 'POST, OPTIONS';
   const refuse = guarded(async (request, headers) =>
-    problemResponse(problemOf('method', `${request.method} does not answer here. Use ${method}.`), {
-      ...headers,
-      Allow: allow,
-    }),
+    problemResponse(
+      problemOf('method', `${foreignMethod(request.headers) ?? request.method} does not answer here. Use ${method}.`),
+      { ...headers, Allow: allow },
+    ),
   );
-  const options = guarded(
-    async (_, headers) => new Response(null, { status: 204, headers: { ...headers, Allow: allow } }),
+  const options: Handler = guarded(async (request, headers) =>
+    foreignMethod(request.headers) === undefined
+      ? new Response(null, { status: 204, headers: { ...headers, Allow: allow } })
+      : refuse(request),
   );
   return {
     GET: method === 'GET' ? handle : refuse,
