@@ -54,11 +54,10 @@ function refuseAfterDivision(
 export function addElementActions(semantics: Semantics): void {
   semantics.addOperation<Element>('element', {
     ...undressed('element'),
-    element(firstSign, first, signs, innerSigns, rest) {
+    element(firstSign, first, signs, rest) {
       const terms = [signed(negateElement, optional(firstSign), read(first))];
       rest.children.forEach((node, i) => {
-        const term = signed(negateElement, innerSigns.child(i).children[0], read(node));
-        terms.push(signed(negateElement, signs.child(i), term));
+        terms.push(signed(negateElement, signs.child(i), read(node)));
       });
       const [only] = terms;
       return only && terms.length === 1 ? only : sumElement(terms, spanFrom(only?.at, terms.at(-1)?.at));
@@ -93,9 +92,6 @@ export function addElementActions(semantics: Semantics): void {
       const limit = BigInt(largestEntryExponent);
       if (power.value > limit || power.value < -limit) throw largeEntryExponent(textOf(atom), power.at);
       return powerElement(base, Number(power.value), spanFrom(spanOf(atom), power.at));
-    },
-    elementAtom(node) {
-      return read(node);
     },
     elementGroup(_open, _gap, inner, _close) {
       return { ...read(inner), at: spanOf(this) };

@@ -31,18 +31,17 @@ import {
 } from './nodes';
 
 const read = (node: Node): Expression => node.expression() as Expression;
-const readEntries = (node: Node): readonly Element[] =>
-  [node.child(0), ...node.child(3).children].map((entry) => entry.element() as Element);
+const entries = (first: Node, rest: Node): readonly Element[] =>
+  [first, ...rest.children].map((entry) => entry.element() as Element);
 
 /** The operation `expression`: from the syntax tree to the word it writes. */
 export function addExpressionActions(semantics: Semantics): void {
   semantics.addOperation<Expression>('expression', {
     ...undressed('expression'),
-    sum(firstSign, first, signs, innerSigns, rest) {
+    sum(firstSign, first, signs, rest) {
       const terms = [signed(negate, optional(firstSign), read(first))];
       rest.children.forEach((node, i) => {
-        const term = signed(negate, innerSigns.child(i).children[0], read(node));
-        terms.push(signed(negate, signs.child(i), term));
+        terms.push(signed(negate, signs.child(i), read(node)));
       });
       const [only] = terms;
       return only && terms.length === 1 ? only : sum(terms, spanFrom(only?.at, terms.at(-1)?.at));
@@ -71,20 +70,23 @@ export function addExpressionActions(semantics: Semantics): void {
       if (exponent.value > BigInt(largestPower)) throw largePower(textOf(atom), exponent.at);
       return power(base, Number(exponent.value), spanFrom(spanOf(atom), exponent.at));
     },
-    atom(node) {
-      return read(node);
-    },
     group(_open, _gap, inner, _close) {
       return { ...read(inner), at: spanOf(this) };
     },
-    symbol(_open, _gap, entries, _close) {
-      return symbol(readEntries(entries), spanOf(this));
+    symbol(_open, _gap, first, _commas, _gaps, rest, _close) {
+      return symbol(entries(first, rest), spanOf(this));
     },
-    angle(_open, _gap, entries, _close) {
-      return angle(readEntries(entries), spanOf(this));
+    angle(_open, _gap, first, _commas, _gaps, rest, _close) {
+      return angle(entries(first, rest), spanOf(this));
     },
-    pfister(_open, _gap, entries, _close) {
-      return pfister(readEntries(entries), spanOf(this));
+    otherAngle(_open, _gap, first, _commas, _gaps, rest, _close) {
+      return angle(entries(first, rest), spanOf(this));
+    },
+    pfister(_open, _gap, first, _commas, _gaps, rest, _close) {
+      return pfister(entries(first, rest), spanOf(this));
+    },
+    otherPfister(_open, _gap, first, _commas, _gaps, rest, _close) {
+      return pfister(entries(first, rest), spanOf(this));
     },
     coefficient(digits, _gap, underline, _gap2, _epsilon) {
       const value = BigInt(digits.sourceString);

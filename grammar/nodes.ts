@@ -36,16 +36,21 @@ export function plainInteger(text: string): string {
   return sign + digits;
 }
 
-/** Whether the sign that a node of the rule `addition` carries is a minus. */
-export const isMinus = (addition: Node): boolean => !addition.sourceString.startsWith('+');
+const isMinus = (sign: Node): boolean => sign.sourceString !== '+';
 
-/** Puts the minus that `addition` carries before a term. */
+/** Puts the signs that a node of the rule `addition` carries, one or two, before a term. */
 export function signed<T extends { readonly at?: Span }>(
   negate: (of: T, at?: Span) => T,
   addition: Node | undefined,
   term: T,
 ): T {
-  return addition && isMinus(addition) ? negate(term, spanFrom(spanOf(addition), term.at)) : term;
+  if (!addition) return term;
+  const [outer, , inner] = addition.children;
+  let result = term;
+  for (const sign of [inner?.children[0], outer]) {
+    if (sign && isMinus(sign)) result = negate(result, spanFrom(spanOf(sign), term.at));
+  }
+  return result;
 }
 
 /** The sign that `times` and `over` bring for the factor after them. */

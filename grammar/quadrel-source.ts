@@ -35,63 +35,58 @@ Quadrel {
   uprightChar    = ("\\operatorname" | "\\mathrm") gap braced<"char">
 
   // ---- words
+  // What begins with ~ and a range of characters only spares the parser alternatives that cannot stand there.
 
-  sum     = addition? product (addition addition? product)*
-  product = factor ((times | juxtaposed) factor)*
-  factor  = atom gap exponent*
-  atom    = symbol | coefficient | angle | eta | hyperbolic | epsilon | signedCount | group | pfister
-  signedCount = "(" gap signedInteger gap ")" gap "_" gap epsilonIndex
+  sum     = (~(".".."~") addition)? product (~(".".."~") addition product)*
+  product = factor (~(")" | "+".."-" | "=".."?" | "]") (times | juxtaposed) factor)*
+  factor  = ( symbol | coefficient | angle | eta | hyperbolic | epsilon | signedCount | group | pfister
+            | otherAngle | otherPfister) gap (~(" ".."]") exponent)*
   group   = "(" gap sum ")"
 
-  symbol  = ("[" | ~visible squareOpen) gap entries ("]" | squareClose)
-  angle   = ("<" ~"<" | ~visible angleOpen) gap entries (">" | angleClose)
-  pfister = ("<<" | ~visible pfisterOpen) gap entries (">>" | pfisterClose)
-  entries = element ("," gap element)*
+  symbol       = ("[" | "\\lbrack" ~latin) gap element ("," gap element)* ("]" | "\\rbrack" ~latin)
+  angle        = "<" ~"<" gap element ("," gap element)* ">"
+  pfister      = "<<" gap element ("," gap element)* ">>"
+  otherAngle   = ~pfisterOpen angleOpen gap element ("," gap element)* angleClose
+  otherPfister = pfisterOpen gap element ("," gap element)* pfisterClose
 
-  eta         = "eta" | ~visible otherEta
-  epsilon     = "eps" | ~visible otherEpsilon
-  hyperbolic  = "h"
-  coefficient = digits (gap "_" gap epsilonIndex)?
+  eta          = "eta" | "η" | "𝜂" | "\\eta" ~latin
+  epsilon      = "eps" | "ε" | "ϵ" | "𝜀" | "𝜖" | "\\varepsilon" ~latin | "\\epsilon" ~latin
+  hyperbolic   = "h"
+  coefficient  = ("0".."9")+ (gap "_" gap epsilonIndex)?
+  signedCount  = "(" gap signedInteger gap ")" gap "_" gap epsilonIndex
   epsilonIndex = epsilon | braced<epsilon>
 
   // ---- field elements
 
-  element        = addition? elementProduct (addition addition? elementProduct)*
-  elementProduct = elementFactor ((times | over | juxtaposed) elementFactor)*
-  elementFactor  = elementAtom gap exponent*
-  elementAtom    = integer | fieldLetter | elementGroup | fraction
+  element        = (~(".".."~") addition)? elementProduct (~(".".."~") addition elementProduct)*
+  elementProduct = elementFactor (~(")" | "+".."-" | "=".."?" | "]") (times | over | juxtaposed) elementFactor)*
+  elementFactor  = (integer | fieldLetter | elementGroup | fraction) gap (~(" ".."]") exponent)*
   elementGroup   = "(" gap element ")"
   fraction       = ("\\frac" | "\\tfrac" | "\\dfrac") gap braced<element> gap braced<element>
-  integer        = digits
+  integer        = ("0".."9")+
   fieldLetter    = latin prime* index? prime*
   latin          = "a".."z" | "A".."Z"
   index          = digits | subscriptDigits | lowered
   lowered        = "_" gap (digits | braced<digits>)
-  prime          = "'" | ~visible ("′" | "’") | "^\\prime" ~latin | raisedPrime
+  prime          = "'" | "′" | "’" | "^\\prime" ~latin | raisedPrime
   raisedPrime    = "^" gap braced<"\\prime">
 
   // ---- operations
 
-  addition   = ("+" | "-" | ~visible otherMinus) gap
-  times      = ("*" | ~visible otherTimes) gap addition?
-  over       = ("/" | ~visible otherOver) gap addition?
-  juxtaposed = ~("+".."/" | "]" | ")" | ">" | "=" | end)
-  exponent   = (raised | ~visible superscript) gap
+  addition   = ("+" | minus) gap (~(".".."~") ("+" | minus) gap)?
+  times      = ("*" | ~(" ".."[" | "]".."~") otherTimes) gap (~(".".."~") addition)?
+  over       = ("/" | "∕" | "⁄") gap (~(".".."~") addition)?
+  juxtaposed =
+  exponent   = (raised | superscript) gap
   raised     = "^" gap (signedInteger | braced<signedInteger> | parenthesised<signedInteger>)
-  signedInteger = minus? digits
+  signedInteger = (minus gap)? digits
   digits     = ("0".."9")+
 
   // ---- other spellings of one sign
 
-  minus         = ("-" | ~visible otherMinus) gap
-  otherMinus    = "−" | "‐".."―" | "﹣" | "－"
+  minus         = "-" | "−" | "‐".."―" | "﹣" | "－"
   otherTimes    = "·" | "⋅" | "×" | "∗" | "∙" | "\\cdot" ~latin | "\\times" ~latin | "\\ast" ~latin
-  otherOver     = "∕" | "⁄"
-  otherEta      = "η" | "𝜂" | "\\eta" ~latin
-  otherEpsilon  = "ε" | "ϵ" | "𝜀" | "𝜖" | "\\varepsilon" ~latin | "\\epsilon" ~latin
-  squareOpen    = "\\lbrack" ~latin
-  squareClose   = "\\rbrack" ~latin
-  angleOpen     = ~pfisterOpen ("⟨" | "〈" | "〈" | "\\langle" ~latin)
+  angleOpen     = "⟨" | "〈" | "〈" | "\\langle" ~latin
   angleClose    = "⟩" | "〉" | "〉" | "\\rangle" ~latin
   pfisterOpen   = "⟪" | "《" | twice<"⟨"> | twice<"\\langle"> ~latin | "\\llangle" ~latin
   pfisterClose  = "⟫" | "》" | twice<"⟩"> | twice<"\\rangle"> ~latin | "\\rrangle" ~latin
@@ -108,7 +103,7 @@ Quadrel {
             | complexesSign                                                        -- complexes
             | ("any" ~latin | boldface<"any">)                                     -- any
   fieldStep = "(" gap fieldLetter gap ")" gap                                           -- functions
-            | "[" gap fieldLetter gap "]" gap ("/" | otherOver) gap "(" gap element ")" gap              -- extension
+            | "[" gap fieldLetter gap "]" gap ("/" | "∕" | "⁄") gap "(" gap element ")" gap              -- extension
   rationalsSign = "Q" | "ℚ" | "𝐐" | boldface<"Q"> | "\\QQ" ~latin | "\\Q" ~latin
   realsSign     = "R" | "ℝ" | "𝐑" | boldface<"R"> | "\\RR" ~latin | "\\R" ~latin
   complexesSign = "C" | "ℂ" | "𝐂" | boldface<"C"> | "\\CC" ~latin | "\\C" ~latin
@@ -127,9 +122,8 @@ Quadrel {
 
   // A row break stands for white space only where the next row goes on with a sign or ends, so that the rows of two separate
   // equalities never run together into one product.
-  gap      = (" " | ~visible (blank | texBlank))*
-  visible  = "'".."[" | "]".."}" | "!".."%"
-  blank    = "\u{9}".." " | "~" | "&" | "\u{A0}" | "\u{2000}".."\u{200B}" | "\u{2028}".."\u{2029}" | "\u{202F}"
+  gap      = (" " | ~("'".."[" | "]".."}") (blank | texBlank))*
+  blank    = "\u{9}".."\u{D}" | "~" | "&" | "\u{A0}" | "\u{2000}".."\u{200B}" | "\u{2028}".."\u{2029}" | "\u{202F}"
            | "\u{205F}".."\u{2064}" | "\u{3000}" | "\u{FEFF}"
   texBlank = "\\" ("," | "!" | ";" | ":" | ">" | " " | "\n")                       -- sign
            | "\\" texBlankWord ~latin                                              -- word
