@@ -1,35 +1,22 @@
-import { grammar, type Grammar, type MatchResult, type Semantics } from 'ohm-js';
+import { grammar, type Grammar } from 'ohm-js';
 import type { Element } from '../engine/expression/element';
 import type { Expression } from '../engine/expression/expression';
 import type { FieldName } from '../engine/expression/field-name';
 import type { Condition, Statement } from '../engine/expression/statement';
 import { diagnose, type Reading } from './diagnose';
-import { addElementActions } from './element-actions';
-import { addExpressionActions } from './expression-actions';
-import { addFieldActions } from './field-actions';
+import { elementOf } from './element-tree';
+import { expressionOf } from './expression-tree';
+import { fieldNameOf } from './field-tree';
 import { checkSize } from './limits';
 import { quadrelSource } from './quadrel-source';
-import { addStatementActions } from './statement-actions';
+import { conditionOf, statementOf } from './statement-tree';
+import { SyntaxNode } from './syntax-node';
+import { undressed } from './tree-parts';
 
-interface Language {
-  readonly rules: Grammar;
-  readonly semantics: Semantics;
-}
+let rules: Grammar | undefined;
 
-let language: Language | undefined;
-
-/** The grammar of quadrel.ohm with its actions, built at the first use. */
-function quadrel(): Language {
-  if (language) return language;
-  const rules = grammar(quadrelSource);
-  const semantics = rules.createSemantics();
-  addElementActions(semantics);
-  addExpressionActions(semantics);
-  addStatementActions(semantics);
-  addFieldActions(semantics);
-  language = { rules, semantics };
-  return language;
-}
+/** The grammar of quadrel.ohm, built at the first use. */
+const quadrel = (): Grammar => (rules ??= grammar(quadrelSource));
 
 const startRules: Record<Reading, string> = {
   expression: 'wholeExpression',
@@ -39,11 +26,12 @@ const startRules: Record<Reading, string> = {
   field: 'wholeFieldName',
 };
 
-function match(text: string, reading: Reading): MatchResult {
+/** The syntax tree of a text without the marks around the whole, or a ReadingError. */
+function parse(text: string, reading: Reading): SyntaxNode {
   checkSize(text, reading === 'statement' ? 'statement' : 'expression');
-  const result = quadrel().rules.match(text, startRules[reading]);
+  const result = quadrel().match(text, startRules[reading]);
   if (result.failed()) throw diagnose(text, result.getRightmostFailurePosition(), reading);
-  return result;
+  return undressed(SyntaxNode.root(text, result));
 }
 
 /**
@@ -52,20 +40,16 @@ function match(text: string, reading: Reading): MatchResult {
  * Every node carries the stretch of `text` it was read from. Throws a ReadingError for anything else, and for a text past
  * the limits of limits.ts. That entries are units of a field is not looked at here.
  */
-export const readExpression = (text: string): Expression =>
-  quadrel().semantics(match(text, 'expression')).expression() as Expression;
+export const readExpression = (text: string): Expression => expressionOf(parse(text, 'expression'));
 
 /** Reads an expression, an equality or a chain of equalities, with its hypotheses after a semicolon. */
-export const readStatement = (text: string): Statement =>
-  quadrel().semantics(match(text, 'statement')).statement() as Statement;
+export const readStatement = (text: string): Statement => statementOf(parse(text, 'statement'));
 
 /** Reads a field element, as it stands inside a bracket. */
-export const readElement = (text: string): Element => quadrel().semantics(match(text, 'element')).element() as Element;
+export const readElement = (text: string): Element => elementOf(parse(text, 'element'));
 
 /** Reads one hypothesis: a ≠ b, a = b, char ≠ p, char = p. Whether p is a prime is not looked at here. */
-export const readCondition = (text: string): Condition =>
-  quadrel().semantics(match(text, 'condition')).condition() as Condition;
+export const readCondition = (text: string): Condition => conditionOf(parse(text, 'condition'));
 
 /** Reads the name of a field. Its arithmetic (is the order a prime power, the modulus irreducible) is not looked at here. */
-export const readFieldName = (text: string): FieldName =>
-  quadrel().semantics(match(text, 'field')).fieldName() as FieldName;
+export const readFieldName = (text: string): FieldName => fieldNameOf(parse(text, 'field'));
