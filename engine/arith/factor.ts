@@ -16,9 +16,9 @@ export interface PrimePower {
 /**
  * The prime factorisation of |n| for n ≠ 0, primes ascending; empty for ±1. Throws a RangeError for 0.
  *
- * Trial division to 2^12, perfect powers, rho, elliptic curves for long numbers, then the quadratic sieve. Primes are primes in the sense of `isPrime`; the product is compared
- * with n before the answer is given. The same n always takes the same way. `budget.spend` is called all along, so that the
- * caller can stop it.
+ * Trial division to 2^12, perfect powers, rho, elliptic curves for long numbers, then the quadratic sieve. Primes are primes
+ * in the sense of `isPrime`; the product is compared with n before the answer is given. The same n always takes the same
+ * way. `budget.spend` is called all along, so that the caller can stop it.
  */
 export function factor(n: bigint, budget: Budget): readonly PrimePower[] {
   if (n === 0n) throw new RangeError('0 has no prime factorisation');

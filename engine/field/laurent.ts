@@ -49,7 +49,10 @@ export function laurentRing<E>(field: Field<E>, budget: Budget): LaurentRing<E> 
     negate: (f) => of(...[...f.values()].map((term) => ({ ...term, coefficient: field.negate(term.coefficient) }))),
     multiply(f, g) {
       if (f.size * g.size > TERM_LIMIT)
-        throw new Refusal('not-yet', 'An entry has too many terms to multiply out. Entries in letters are decided when they are products of letters.');
+        throw new Refusal(
+          'not-yet',
+          'An entry has too many terms to multiply out. Entries in letters are decided when they are products of letters.',
+        );
       const terms = new Map<string, LaurentTerm<E>>();
       for (const a of f.values()) {
         budget.spend('reading an entry');
@@ -127,13 +130,18 @@ export function readLaurent<E>(
       const m = ring.multiply(single(top), ring.invert(single(bottom)) ?? new Map());
       if (ring.add(f, ring.negate(ring.multiply(m, g))).size === 0) return m;
     }
-    throw new Refusal('not-yet', 'Quotients by a sum of letters are not decided yet. Use entries that are products of letters.', at);
+    throw new Refusal(
+      'not-yet',
+      'Quotients by a sum of letters are not decided yet. Use entries that are products of letters.',
+      at,
+    );
   };
   const single = (term: LaurentTerm<E> | undefined): Laurent<E> =>
     term === undefined ? new Map() : new Map([[keyOf(term.exponents), term]]);
   const power = (base: Laurent<E>, exponent: number, at: Span | undefined): Laurent<E> => {
     if (exponent < 0) return power(divide(ring.constant(ring.field.one), base, at), -exponent, at);
-    if (base.size > 1 && exponent > TERM_LIMIT) throw new Refusal('not-yet', 'Large powers of a sum of letters are not decided yet.', at);
+    if (base.size > 1 && exponent > TERM_LIMIT)
+      throw new Refusal('not-yet', 'Large powers of a sum of letters are not decided yet.', at);
     let result = ring.constant(ring.field.one);
     for (const digit of exponent.toString(2)) {
       result = ring.multiply(result, result);

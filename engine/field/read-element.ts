@@ -48,7 +48,7 @@ export function readElement<E>(element: Element, field: Field<E>, budget: Budget
         return folded(e.factors, (a, b) => field.multiply(a, b), e.at);
       case 'quotient': {
         const below = e.denominator;
-        const message = (): string => `The denominator ${shown(below)} is 0 in ${field.name}. Change it to a unit.`;
+        const message = (): string => `The denominator ${vanishing(below)} in ${field.name}. Change it to a unit.`;
         const denominator = inverted(value(below), message, below.at ?? e.at);
         return guarded(field.multiply(value(e.numerator), denominator), e.at);
       }
@@ -59,7 +59,7 @@ export function readElement<E>(element: Element, field: Field<E>, budget: Budget
           throw tooLarge(e.at);
         if (e.exponent >= 0) return guarded(power(field, base, e.exponent, budget), e.at);
         const message = (): string =>
-          `${shown(e.base)} is 0 in ${field.name} and has no negative power. Change it to a unit.`;
+          `The base of a negative power ${vanishing(e.base)} in ${field.name}. Change it to a unit.`;
         return guarded(power(field, inverted(base, message, e.base.at ?? e.at), -e.exponent, budget), e.at);
       }
     }
@@ -77,10 +77,10 @@ function unknownLetter(field: Field<unknown>, name: string): string {
   return `${missing} Type a number, or choose a field with the letter ${name}, such as ${field.name}(${name}).`;
 }
 
-/** An element in a message, cut short when it is long. */
-function shown(element: Element): string {
+/** That an element is 0, in a message; it is named, cut short when it is long, unless it is written as 0. */
+function vanishing(element: Element): string {
   const text = elementText(element);
-  return text.length <= 60 ? text : `${text.slice(0, 57)}…`;
+  return text === '0' ? 'is 0' : `${text.length <= 60 ? text : `${text.slice(0, 57)}…`} is 0`;
 }
 
 function power<E>(field: Field<E>, base: E, exponent: number, budget: Budget): E {
