@@ -32,25 +32,25 @@ export function rationalResidues(
   budget: Budget,
 ): ResiduesOutcome {
   const asked = places?.map(readPrime);
-  const parameter = uniformizer && readUniformizer(uniformizer, asked, budget);
+  const typed = uniformizer && readUniformizer(uniformizer, asked, budget);
   const statement = rationalStatement([expression], budget);
   const [terms = []] = statement.sides;
   const sight = incidence(statement, 'all', budget);
   const indexOf = new Map(sight.base.map(({ value }, index) => [value, index]));
 
-  const at = (p: bigint): Residue => {
+  const at = (p: bigint, parameter?: Rational): Residue => {
     const index = indexOf.get(p);
     const base = index === undefined ? [...sight.base, { value: p, prime: true }] : sight.base;
     const place = rationalPlace(base, index ?? sight.base.length);
     const local = parameter === undefined ? place.local : against(parameter, p, place.local);
     const value = evaluate(terms, thetaRing(place.units, local), budget);
-    return describe(p, value, uniformizer ?? integerElement(p), Math.max(0, ...degreesOf(terms)));
+    return describe(p, value, parameter === undefined ? integerElement(p) : rationals.write(parameter), Math.max(0, ...degreesOf(terms)));
   };
 
   if (asked !== undefined) {
     const listed = new Set(asked);
     const unramifiedElsewhere = sight.base.every(({ value }) => listed.has(value) || at(value).zero);
-    return { residues: [...listed].map(at), unramifiedElsewhere };
+    return { residues: [...listed].map((p) => at(p, typed)), unramifiedElsewhere };
   }
   const residues = sight.base.map(({ value }) => at(value)).filter((residue) => !residue.zero);
   return { residues, unramifiedElsewhere: true };
