@@ -2,7 +2,8 @@ import { createHash } from 'node:crypto';
 import fs from 'node:fs';
 import path from 'node:path';
 import { inState, root, tail } from './paths.mjs';
-import { servingRun } from './run.mjs';
+import { identify, runs } from './process-identity.mjs';
+import { otherRuns } from './run.mjs';
 import { Trouble, say } from './trouble.mjs';
 
 const sources = ['app', 'engine', 'grammar', 'lib', 'models', 'public'];
@@ -58,21 +59,41 @@ async function bundleWorker() {
   }
 }
 
-/** Builds the worker bundle and the pages when they are not those of the present sources. */
-export async function ensureBuild(run) {
-  const digest = sourceDigest();
-  const current = fs.existsSync(stamp) && fs.readFileSync(stamp, 'utf8') === digest;
-  if (current && fs.existsSync(worker)) return;
-  const serving = servingRun();
-  if (serving !== undefined && serving.owner.pid !== process.pid && serving.command === 'npm start') {
-    throw new Trouble(
-      `The sources have changed, and a server (process ${serving.owner.pid}) still runs on the build they would replace.`,
-      'Stop that server first, or work in a second clone.',
-    );
+const lock = () => inState('build.lock');
+
+/** Takes the lock, when nobody that still runs holds it; returns who does. */
+function tryLock() {
+  const draft = `${lock()}.${process.pid}`;
+  fs.writeFileSync(draft, JSON.stringify(identify(process.pid)));
+  try {
+    fs.linkSync(draft, lock());
+    return undefined;
+  } catch {
+    const holder = JSON.parse(fs.readFileSync(lock(), 'utf8'));
+    if (!runs(holder)) fs.rmSync(lock(), { force: true });
+    return holder;
+  } finally {
+    fs.rmSync(draft);
   }
-  say('Building (about a minute) …');
-  fs.rmSync(stamp, { force: true });
-  await bundleWorker();
+}
+
+/** Does the work while no other run of this clone builds in the same folders. */
+async function inTurn(run, work) {
+  for (let said = false; ; said = true) {
+    const holder = tryLock();
+    if (holder === undefined) break;
+    if (!said) say(`Waiting for the build of process ${holder.pid} …`);
+    await new Promise((resolve) => setTimeout(resolve, 300));
+    if (run.leaving) return;
+  }
+  try {
+    await work();
+  } finally {
+    fs.rmSync(lock(), { force: true });
+  }
+}
+
+async function buildPages(run) {
   const log = inState('build.log');
   const output = fs.openSync(log, 'w', 0o600);
   const code = await run.finish(process.execPath, [nextProgram, 'build'], {
@@ -80,13 +101,33 @@ export async function ensureBuild(run) {
     env: { ...process.env, ...nextEnvironment, NODE_ENV: 'production' },
   });
   fs.closeSync(output);
-  if (code !== 0 && !run.leaving) {
-    throw new Trouble(
-      `next build failed (exit code ${code ?? 'none: it was killed'}). The end of ${log}:\n${tail(log, 40)}`,
-      code === undefined
-        ? 'See that the machine has about 1.5 GB of memory to spare.'
-        : 'Mend what it names, then start again.',
-    );
-  }
-  fs.writeFileSync(stamp, digest);
+  if (code === 0 || run.leaving) return;
+  throw new Trouble(
+    `next build failed (${code === undefined ? 'it was killed' : `exit code ${code}`}). The end of ${log}:\n${tail(log, 40)}`,
+    code === undefined
+      ? 'See that the machine has about 1.5 GB of memory to spare, then start again.'
+      : 'Mend what it names.',
+  );
+}
+
+/** Builds the worker bundle and the pages when they are not those of the present sources. */
+export async function ensureBuild(run) {
+  const digest = sourceDigest();
+  const current = () => fs.existsSync(worker) && fs.existsSync(stamp) && fs.readFileSync(stamp, 'utf8') === digest;
+  if (current()) return;
+  await inTurn(run, async () => {
+    if (current()) return;
+    const serving = otherRuns().find((other) => other.command === 'npm start');
+    if (serving !== undefined) {
+      throw new Trouble(
+        `The sources have changed, and a server (process ${serving.owner.pid}) still runs on the build they would replace.`,
+        'Stop that server first, or work in a second clone.',
+      );
+    }
+    say('Building (about a minute) …');
+    fs.rmSync(stamp, { force: true });
+    await bundleWorker();
+    await buildPages(run);
+    if (!run.leaving) fs.writeFileSync(stamp, digest);
+  });
 }

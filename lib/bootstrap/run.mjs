@@ -33,10 +33,11 @@ async function sweepAll() {
   }
 }
 
-/** The run that serves from this clone, if one does. */
-export function servingRun() {
-  const record = readRecord(recordFile('server'));
-  return record !== undefined && runs(record.owner) ? record : undefined;
+/** The records of the runs that are under way in this clone, but for the one of this process. */
+export function otherRuns() {
+  const files = fs.readdirSync(recordFolder()).filter((entry) => entry.endsWith('.json'));
+  const records = files.map((entry) => readRecord(path.join(recordFolder(), entry)));
+  return records.filter((record) => record !== undefined && record.owner.pid !== process.pid && runs(record.owner));
 }
 
 /**
