@@ -11,8 +11,8 @@ export default function PageError({ error, reset }: { error: Error & { digest?: 
         <div>
           <h1 className="text-title">This page could not be made.</h1>
           <p className="text mt-3">
-            The fault is on our side. What you typed is kept on this device. Read the page again; if it stays so, tell whoever runs this
-            server{error.digest === undefined ? '' : `, with the mark ${error.digest}`}.
+            The fault is on our side. What you typed is kept on this device. Read the page again; if it stays so, tell
+            whoever runs this server{error.digest === undefined ? '' : `, with the mark ${error.digest}`}.
           </p>
           <p className="mt-6">
             <Button onClick={reset}>Read again</Button>

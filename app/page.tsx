@@ -26,8 +26,9 @@ export default function Landing() {
               one class, or two?
             </h1>
             <p className="text">
-              Quadrel reads the words of Milnor–Witt <span className="whitespace-nowrap">K-theory</span> as you type them in TeX, brings them to canonical form, and decides
-              equality with evidence that a referee can recheck. The same engine answers scripts over REST.
+              Quadrel reads the words of Milnor–Witt <span className="whitespace-nowrap">K-theory</span> as you type
+              them in TeX, brings them to canonical form, and decides equality with evidence that a referee can recheck.
+              The same engine answers scripts over REST.
             </p>
           </div>
         </div>
@@ -62,9 +63,9 @@ export default function Landing() {
           <div>
             <h2>what is decided</h2>
             <p>
-              Everything over <Formula tex="\Q" />, <Formula tex="\R" />, <Formula tex="\C" />, <Formula tex="\Q_p" /> and{' '}
-              <Formula tex="\F_q" />, in every degree; and over every field at once, where the entries are monomials in letters.{' '}
-              <Link href="/help#fields">Why that is complete</Link>
+              Everything over <Formula tex="\Q" />, <Formula tex="\R" />, <Formula tex="\C" />, <Formula tex="\Q_p" />{' '}
+              and <Formula tex="\F_q" />, in every degree; and over every field at once, where the entries are monomials
+              in letters. <Link href="/help#fields">Why that is complete</Link>
             </p>
           </div>
           <div>

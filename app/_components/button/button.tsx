@@ -20,7 +20,17 @@ const looks = { primary: 'btn primary', outlined: 'btn', plain: 'plain' };
 
 /** Clay (at most one a page), outlined, or underlined. */
 export function Button(props: Props) {
-  const { kind = 'outlined', keyName, tip, tipSide, unavailable, wide = false, className = '', onClick, ...rest } = props;
+  const {
+    kind = 'outlined',
+    keyName,
+    tip,
+    tipSide,
+    unavailable,
+    wide = false,
+    className = '',
+    onClick,
+    ...rest
+  } = props;
   const text = unavailable ?? tip;
   const button = (describedBy?: string) => (
     <button

@@ -7,7 +7,6 @@ import { KeysLeaf } from './keys-leaf';
 import { letters } from './letters';
 import { isWritingPlace, KeyRegistry } from './registry';
 
-
 type OpenLeaf = 'keys' | 'rooms' | undefined;
 
 interface Keys {
@@ -27,7 +26,17 @@ function useKeys(): Keys {
 export const useOpenLeaf = () => useKeys().openLeaf;
 
 /** Registers a single letter while the component is mounted and `enabled`. It acts outside writing places and leaves only. */
-export function useKey({ keyName, label, act, enabled = true }: { keyName: string; label: string; act: () => void; enabled?: boolean }) {
+export function useKey({
+  keyName,
+  label,
+  act,
+  enabled = true,
+}: {
+  keyName: string;
+  label: string;
+  act: () => void;
+  enabled?: boolean;
+}) {
   const { registry } = useKeys();
   const latest = useRef(act);
   useEffect(() => {

@@ -49,5 +49,8 @@ export class KeyRegistry {
 /** Places where letters are text. */
 export function isWritingPlace(target: EventTarget | null): boolean {
   if (!(target instanceof HTMLElement)) return false;
-  return target.isContentEditable || target.closest('input:not([type=checkbox]):not([type=radio]), textarea, select') !== null;
+  return (
+    target.isContentEditable ||
+    target.closest('input:not([type=checkbox]):not([type=radio]), textarea, select') !== null
+  );
 }

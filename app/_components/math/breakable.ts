@@ -1,12 +1,25 @@
 /** Commands that stand between two things: TeX would break the line after them. */
-const operators = new Set(['\\cdot', '\\times', '\\ne', '\\neq', '\\equiv', '\\in', '\\mapsto', '\\to', '\\cong', '\\subset', '\\oplus', '\\le', '\\ge']);
+const operators = new Set([
+  '\\cdot',
+  '\\times',
+  '\\equiv',
+  '\\in',
+  '\\cong',
+  '\\subset',
+  '\\oplus',
+  '\\wedge',
+  '\\le',
+  '\\ge',
+  '<',
+  '>',
+]);
 const opening = new Set(['[', '(', '\\langle', '\\lbrack', '\\lparen', '\\{']);
 const closing = new Set([']', ')', '\\rangle', '\\rbrack', '\\rparen', '\\}']);
 /** At these a line may break, and the sign opens the new line. */
-const breaking = new Set(['+', '-', '=', '\\ne', '\\neq']);
+const breaking = new Set(['+', '-', '=', '\\ne', '\\neq', '\\to', '\\mapsto']);
 
 /**
- * Allows a line to break before + − = outside every bracket and nowhere else, where TeX would break after any operator.
+ * Allows a line to break before + − = (and arrows) outside every bracket and nowhere else, where TeX would break after any operator.
  * Takes and returns TeX; what stands inside braces is left alone, for no line breaks there.
  */
 export function breakable(tex: string): string {

@@ -21,9 +21,9 @@ const keptAtMost = 2000;
 
 /**
  * TeX as HTML with MathML beside it for screen readers. TeX that cannot be set comes back as it was typed.
- * With `breaks`, lines may break before + − = outside brackets; without, nowhere but where TeX would.
+ * Lines may break before + − = outside brackets only; with `breaks` false, where TeX would break them.
  */
-export function formulaHtml(tex: string, breaks = false): string {
+export function formulaHtml(tex: string, breaks = true): string {
   const key = `${breaks ? '1' : '0'}${tex}`;
   const known = kept.get(key);
   if (known !== undefined) return known;
@@ -41,6 +41,6 @@ export function formulaHtml(tex: string, breaks = false): string {
 }
 
 /** Set mathematics, in server and client components alike. */
-export function Formula({ tex, breaks = false, className }: { tex: string; breaks?: boolean; className?: string }) {
+export function Formula({ tex, breaks = true, className }: { tex: string; breaks?: boolean; className?: string }) {
   return <span className={className} dangerouslySetInnerHTML={{ __html: formulaHtml(tex, breaks) }} />;
 }

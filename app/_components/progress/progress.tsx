@@ -27,7 +27,15 @@ export function Progress({ part, doing, figure, onStop }: Props) {
   const laid = Math.round(Math.min(1, Math.max(0, part)) * stones);
   return (
     <div>
-      <div className="bar" role="progressbar" aria-label={doing} aria-valuemin={0} aria-valuemax={stones} aria-valuenow={laid} aria-valuetext={figure}>
+      <div
+        className="bar"
+        role="progressbar"
+        aria-label={doing}
+        aria-valuemin={0}
+        aria-valuemax={stones}
+        aria-valuenow={laid}
+        aria-valuetext={figure}
+      >
         {Array.from({ length: stones }, (_, index) => (
           <i key={index} className={index < laid ? 'on' : undefined} />
         ))}

@@ -14,7 +14,12 @@ export function RoomsLeaf({ open, onClose }: { open: boolean; onClose: () => voi
     <Leaf open={open} onClose={onClose} title="Rooms">
       <nav className="room-list" aria-label="Rooms">
         {rooms.map((room) => (
-          <Link key={room.href} href={room.href} aria-current={isIn(pathname, room) ? 'page' : undefined} onClick={onClose}>
+          <Link
+            key={room.href}
+            href={room.href}
+            aria-current={isIn(pathname, room) ? 'page' : undefined}
+            onClick={onClose}
+          >
             {room.name}
           </Link>
         ))}

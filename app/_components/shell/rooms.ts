@@ -10,7 +10,12 @@ export interface Room {
 /** The rooms, in the order of the running head. A new room is one line here. */
 export const rooms: readonly Room[] = [
   { href: '/bench', name: 'Bench', says: 'one statement at a time: its canonical form, a verdict, and the reason' },
-  { href: '/help', name: 'Help', says: 'the language, the conventions, what is decided over which field, and the REST API' },
+  {
+    href: '/help',
+    name: 'Help',
+    says: 'the language, the conventions, what is decided over which field, and the REST API',
+  },
 ];
 
-export const isIn = (pathname: string, room: Room): boolean => pathname === room.href || pathname.startsWith(`${room.href}/`);
+export const isIn = (pathname: string, room: Room): boolean =>
+  pathname === room.href || pathname.startsWith(`${room.href}/`);

@@ -18,7 +18,12 @@ export function Row({ side, sideClass = '', id, className = 'sec', label, level 
   const Heading = level === 2 ? 'h2' : 'h3';
   const headed = side !== undefined && id !== undefined;
   return (
-    <section className={`row ${className}`} id={id} aria-label={label} aria-labelledby={headed ? `${id}-head` : undefined}>
+    <section
+      className={`row ${className}`}
+      id={id}
+      aria-label={label}
+      aria-labelledby={headed ? `${id}-head` : undefined}
+    >
       {side === undefined ? (
         <span />
       ) : (

@@ -39,7 +39,8 @@ function cellOf(degree: number, key: string, entries: readonly ComparedMap[]): F
   const state = stateOf(entries);
   const shown = entries.find((entry) => !entry.same) ?? entries.find((entry) => !entry.zero) ?? entries[0];
   const where = key === 'real' ? 'At the real place' : key.startsWith('map:') ? `By ${key.slice(4)}` : `At ${key}`;
-  const both = entries.length > 1 ? entries.map((entry) => `${entry.map} ${entry.left.text}`).join(', ') : shown?.left.text;
+  const both =
+    entries.length > 1 ? entries.map((entry) => `${entry.map} ${entry.left.text}`).join(', ') : shown?.left.text;
   const what =
     state === 'split'
       ? `left ${shown?.left.text}, right ${shown?.right.text}`

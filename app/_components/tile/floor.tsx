@@ -70,7 +70,11 @@ export function Floor({ label, places, rows, heading, onShow }: Props) {
     if (!step || event.ctrlKey || event.altKey || event.metaKey) return;
     event.preventDefault();
     const [down = 0, across = 0] = step;
-    for (let r = row + down, c = column + across; r >= 0 && c >= 0 && r < rows.length && c < columns.length; r += down, c += across) {
+    for (
+      let r = row + down, c = column + across;
+      r >= 0 && c >= 0 && r < rows.length && c < columns.length;
+      r += down, c += across
+    ) {
       if (walk(r, c)) return;
     }
   };
@@ -118,12 +122,18 @@ export function Floor({ label, places, rows, heading, onShow }: Props) {
                       ) : (
                         <button
                           type="button"
-                          className={tileClass(cell.state, firings[(2 * (rowIndex + column + 1)) % 3], cell.left ?? cell.right)}
+                          className={tileClass(
+                            cell.state,
+                            firings[(2 * (rowIndex + column + 1)) % 3],
+                            cell.left ?? cell.right,
+                          )}
                           aria-label={cell.name}
                           aria-pressed={chosen === cell.key}
                           data-spot={`${rowIndex}:${column}`}
                           tabIndex={stop === column ? 0 : -1}
-                          onFocus={() => setStops((was) => (was[rowIndex] === column ? was : { ...was, [rowIndex]: column }))}
+                          onFocus={() =>
+                            setStops((was) => (was[rowIndex] === column ? was : { ...was, [rowIndex]: column }))
+                          }
                           onKeyDown={(event) => onKeyDown(event, rowIndex, column)}
                           onClick={() => show(cell)}
                         >

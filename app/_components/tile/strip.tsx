@@ -3,7 +3,15 @@ import type { FloorCell, FloorPlace } from './floor';
 import { TileFace, tileClass } from './tile';
 
 /** One row of places, each label above its tile; it wraps, and the labels go along. */
-export function Strip({ label, places, cells }: { label: string; places: readonly FloorPlace[]; cells: readonly FloorCell[] }) {
+export function Strip({
+  label,
+  places,
+  cells,
+}: {
+  label: string;
+  places: readonly FloorPlace[];
+  cells: readonly FloorCell[];
+}) {
   return (
     <ul className={`strip ${cells.length > 10 ? 'small-tiles' : ''}`} aria-label={label}>
       {cells.map((cell, index) => (

@@ -29,7 +29,17 @@ export function tileClass(state: TileState, firing: Firing = 'a', value?: Value)
 }
 
 /** What is painted on a tile. */
-export function TileFace({ state, left, right, small = false }: { state: TileState; left?: Value; right?: Value; small?: boolean }) {
+export function TileFace({
+  state,
+  left,
+  right,
+  small = false,
+}: {
+  state: TileState;
+  left?: Value;
+  right?: Value;
+  small?: boolean;
+}) {
   if (state === 'bare') return <>?</>;
   if (state === 'agree' || state === 'none') return <>0</>;
   if (state === 'split') {
@@ -44,7 +54,19 @@ export function TileFace({ state, left, right, small = false }: { state: TileSta
 }
 
 /** A tile that only shows. */
-export function Tile({ state, firing, left, right, className = '' }: { state: TileState; firing?: Firing; left?: Value; right?: Value; className?: string }) {
+export function Tile({
+  state,
+  firing,
+  left,
+  right,
+  className = '',
+}: {
+  state: TileState;
+  firing?: Firing;
+  left?: Value;
+  right?: Value;
+  className?: string;
+}) {
   return (
     <span className={`${tileClass(state, firing, left)} ${className}`}>
       <TileFace state={state} left={left} right={right} />

@@ -8,8 +8,9 @@ export function Errors() {
     <Row side="refusals" id="errors" className="sec ruled">
       <div className="prose">
         <p>
-          A refusal says what to change. Over REST it is a problem document (RFC 9457) whose <code>type</code> leads to its line here and whose <code>detail</code> speaks about your request. Lines and
-          columns count from 1, columns in characters; what is missing is reported where it was expected.
+          A refusal says what to change. Over REST it is a problem document (RFC 9457) whose <code>type</code> leads to
+          its line here and whose <code>detail</code> speaks about your request. Lines and columns count from 1, columns
+          in characters; what is missing is reported where it was expected.
         </p>
         <dl className="terms">
           {Object.entries(problemKinds).map(([code, kind]) => (

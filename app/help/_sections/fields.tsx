@@ -18,15 +18,17 @@ const rows: readonly FieldRow[] = [
     write: ['Q'],
     compared: (
       <>
-        Every degree. The part at the real place (in degree 0 rank and signature, else the signature), and the residue at every prime in sight, 2 included.
+        Every degree. The part at the real place (in degree 0 rank and signature, else the signature), and the residue
+        at every prime in sight, 2 included.
       </>
     ),
     why: (
       <>
-        The sequence <Formula tex="0 \to B_n \to \K_n(\Q) \to \bigoplus_p \K_{n-1}(\F_p) \to 0" /> is exact and split; <Formula tex="B_n" /> is spanned by words in{' '}
-        <Formula tex="\eta" /> and <Formula tex="[-1]" />. Tate’s computation of <Formula tex="K_2(\Q)" /> (Milnor, <i>Introduction to Algebraic K-Theory</i>, §11), the
-        Witt ring of <Formula tex="\Q" /> (Milnor and Husemoller, <i>Symmetric Bilinear Forms</i>, IV.2), and the pull-back theorem. Compare Kolderup,
-        arXiv:1906.07506.
+        The sequence <Formula tex="0 \to B_n \to \K_n(\Q) \to \bigoplus_p \K_{n-1}(\F_p) \to 0" /> is exact and split;{' '}
+        <Formula tex="B_n" /> is spanned by words in <Formula tex="\eta" /> and <Formula tex="[-1]" />. Tate’s
+        computation of <Formula tex="K_2(\Q)" /> (Milnor, <i>Introduction to Algebraic K-Theory</i>, §11), the Witt ring
+        of <Formula tex="\Q" /> (Milnor and Husemoller, <i>Symmetric Bilinear Forms</i>, IV.2), and the pull-back
+        theorem. Compare Kolderup, arXiv:1906.07506.
       </>
     ),
     example: { field: 'Q', statement: '[5][6] = [-1][6]' },
@@ -36,14 +38,15 @@ const rows: readonly FieldRow[] = [
     write: ['F_7', 'F_9', 'F_3[z]/(z^2+1)', 'F_9[y]/(y^2+z+1)'],
     compared: (
       <>
-        Every degree, in closed form. <Formula tex="q" /> odd: rank and discriminant in degree 0, the Witt ring of order 4 below, <Formula tex="\F_q^\times" /> in
-        degree 1, nothing above. <Formula tex="q" /> even: the rank, the rank modulo 2, <Formula tex="\F_q^\times" />, nothing above.
+        Every degree, in closed form. <Formula tex="q" /> odd: rank and discriminant in degree 0, the Witt ring of order
+        4 below, <Formula tex="\F_q^\times" /> in degree 1, nothing above. <Formula tex="q" /> even: the rank, the rank
+        modulo 2, <Formula tex="\F_q^\times" />, nothing above.
       </>
     ),
     why: (
       <>
-        <Formula tex="K_2(\F_q) = 0" /> and <Formula tex="I^2(\F_q) = 0" /> (Milnor, Invent. Math. 9, 1970; Lam, <i>Introduction to Quadratic Forms over Fields</i>, II.3), and
-        the pull-back theorem.
+        <Formula tex="K_2(\F_q) = 0" /> and <Formula tex="I^2(\F_q) = 0" /> (Milnor, Invent. Math. 9, 1970; Lam,{' '}
+        <i>Introduction to Quadratic Forms over Fields</i>, II.3), and the pull-back theorem.
       </>
     ),
     example: { field: 'F_9', statement: '[z][z+1] = 0' },
@@ -54,8 +57,9 @@ const rows: readonly FieldRow[] = [
     compared: <>Every degree, for rational entries: rank, signature, and in degree 1 the product of the entries.</>,
     why: (
       <>
-        Sylvester’s law, and <Formula tex="K_n^{\mathrm M}(\R)" /> is <Formula tex="\Z/2" /> with a uniquely divisible group for <Formula tex="n \ge 2" /> (Milnor 1970), where words with rational
-        entries have no part in the divisible group.
+        Sylvester’s law, and <Formula tex="K_n^{\mathrm M}(\R)" /> is <Formula tex="\Z/2" /> with a uniquely divisible
+        group for <Formula tex="n \ge 2" /> (Milnor 1970), where words with rational entries have no part in the
+        divisible group.
       </>
     ),
     example: { field: 'R', statement: '<2> + <-3> = h' },
@@ -63,11 +67,16 @@ const rows: readonly FieldRow[] = [
   {
     name: <Formula tex="\C" />,
     write: ['C'],
-    compared: <>Every degree, for rational entries: the rank, the rank modulo 2 below degree 0, and in degree 1 the product of the entries.</>,
+    compared: (
+      <>
+        Every degree, for rational entries: the rank, the rank modulo 2 below degree 0, and in degree 1 the product of
+        the entries.
+      </>
+    ),
     why: (
       <>
-        Every form is a sum of <Formula tex="\q{1}" />, and <Formula tex="K_n^{\mathrm M}(\C)" /> is uniquely divisible for <Formula tex="n \ge 2" />, so that words with rational
-        entries vanish there.
+        Every form is a sum of <Formula tex="\q{1}" />, and <Formula tex="K_n^{\mathrm M}(\C)" /> is uniquely divisible
+        for <Formula tex="n \ge 2" />, so that words with rational entries vanish there.
       </>
     ),
     example: { field: 'C', statement: '<-7> = 1' },
@@ -77,13 +86,14 @@ const rows: readonly FieldRow[] = [
     write: ['Q_2', 'Q_5'],
     compared: (
       <>
-        Every degree, for rational entries: rank, discriminant and Hasse invariant; in degree 1 the product of the entries; in degree 2 the norm residue symbol.
+        Every degree, for rational entries: rank, discriminant and Hasse invariant; in degree 1 the product of the
+        entries; in degree 2 the norm residue symbol.
       </>
     ),
     why: (
       <>
-        Classification of forms over <Formula tex="\Q_p" /> (Serre, <i>A Course in Arithmetic</i>, III and IV; Lam VI), Moore’s theorem on <Formula tex="K_2" /> of a local
-        field, and the pull-back theorem.
+        Classification of forms over <Formula tex="\Q_p" /> (Serre, <i>A Course in Arithmetic</i>, III and IV; Lam VI),
+        Moore’s theorem on <Formula tex="K_2" /> of a local field, and the pull-back theorem.
       </>
     ),
     example: { field: 'Q_5', statement: '[5][2] = [5][7]' },
@@ -93,14 +103,20 @@ const rows: readonly FieldRow[] = [
     write: ['any'],
     compared: (
       <>
-        Every degree, for entries that are monomials: ± a product of powers of letters. Letters are units of a field that is not specified; <code>char = p</code> may be assumed.
-        A statement without letters is decided over <Formula tex="\Q" />.
+        Every degree, for entries that are monomials: ± a product of powers of letters. Letters are units of a field
+        that is not specified; <code>char = p</code> may be assumed. A statement without letters is decided over{' '}
+        <Formula tex="\Q" />.
       </>
     ),
     why: (
       <>
-        In independent letters the words <Formula tex="\eta^m[p_S]" />, <Formula tex="[-1]^k[p_S]" /> and <Formula tex="\eta[-1][p_S]" /> form a basis, by the sequence for{' '}
-        <Formula tex="k(t)" /> (Morel, <i>𝔸¹-Algebraic Topology over a Field</i>, ch. 3), one letter after the other. A statement that holds there holds in every field, by specialisation.
+        In independent letters the words <Formula tex="\eta^m[p_S]" />, <Formula tex="[-1]^k[p_S]" /> and{' '}
+        <Formula tex="\eta[-1][p_S]" /> form a basis, by the sequence for <Formula tex="k(t)" /> (Morel,{' '}
+        <i>
+          <Formula tex="\mathbb{A}^1" />
+          -Algebraic Topology over a Field
+        </i>
+        , ch. 3), one letter after the other. A statement that holds there holds in every field, by specialisation.
       </>
     ),
     example: { field: 'any', statement: '[a b^2] = [a] + h[b]' },
@@ -113,11 +129,17 @@ export function Fields() {
     <Row side="fields" id="fields" className="sec ruled">
       <div className="prose">
         <p>
-          Over each of these fields the comparison is complete: when no difference is found, there is none. The <b>pull-back theorem</b> stands behind all of them: two classes
-          of degree <Formula tex="n" /> are equal if and only if they are equal in Milnor K-theory <Formula tex="K_n^{\mathrm M}(F)" /> and in the Witt ring{' '}
+          Over each of these fields the comparison is complete: when no difference is found, there is none. The{' '}
+          <b>pull-back theorem</b> stands behind all of them: two classes of degree <Formula tex="n" /> are equal if and
+          only if they are equal in Milnor K-theory <Formula tex="K_n^{\mathrm M}(F)" /> and in the Witt ring{' '}
           <Formula tex="W(F)" /> (Morel, Comment. Math. Helv. 79, 2004; Gille, Scully and Zhong, Adv. Math. 286, 2016).
         </p>
-        <Ledger caption="Fields and what is compared over them" head={['field', 'what is compared', 'why that is complete']} narrow="stack" className="fields">
+        <Ledger
+          caption="Fields and what is compared over them"
+          head={['field', 'what is compared', 'why that is complete']}
+          narrow="stack"
+          className="fields"
+        >
           {rows.map((row) => (
             <tr key={row.write[0]}>
               <td>
@@ -136,13 +158,16 @@ export function Fields() {
           ))}
         </Ledger>
         <p>
-          For <Formula tex="q = p^d" /> with <Formula tex="d \ge 2" /> the letter <code>z</code> generates <Formula tex="\F_q" />; its modulus is the least monic irreducible polynomial of degree{' '}
-          <Formula tex="d" />, coefficients compared from the top as integers <Formula tex="0 \dots p-1" />, and every answer names it. <code>z</code> generates the field; it need not generate its
-          units. With a modulus of your own any letter will do.
+          For <Formula tex="q = p^d" /> with <Formula tex="d \ge 2" /> the letter <code>z</code> generates{' '}
+          <Formula tex="\F_q" />; its modulus is the least monic irreducible polynomial of degree <Formula tex="d" />,
+          coefficients compared from the top as integers <Formula tex="0 \dots p-1" />, and every answer names it.{' '}
+          <code>z</code> generates the field; it need not generate its units. With a modulus of your own any letter will
+          do.
         </p>
         <p id="not-decided">
-          Function fields <code>Q(t)</code>, <code>F_7(t)</code>, number fields <code>Q[w]/(w^2-5)</code>, and entries over <code>any</code> that are sums, such as{' '}
-          <code>[1+a]</code>, are read in full and then refused. They are not answered by a guess.
+          Function fields <code>Q(t)</code>, <code>F_7(t)</code>, number fields <code>Q[w]/(w^2-5)</code>, and entries
+          over <code>any</code> that are sums, such as <code>[1+a]</code>, are read in full and then refused. They are
+          not answered by a guess.
         </p>
       </div>
     </Row>

@@ -22,7 +22,9 @@ export function HelpIndex() {
 
   useEffect(() => {
     const mark = () => {
-      const passed = subjects.filter(({ id }) => (document.getElementById(id)?.getBoundingClientRect().top ?? Infinity) < 160);
+      const passed = subjects.filter(
+        ({ id }) => (document.getElementById(id)?.getBoundingClientRect().top ?? Infinity) < 160,
+      );
       setHere(passed.at(-1)?.id ?? 'language');
     };
     mark();

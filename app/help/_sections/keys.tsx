@@ -32,7 +32,8 @@ export function Keys() {
         ))}
       </ul>
       <p className="text mt-4 max-w-[44em]">
-        Letters act outside writing places only. They can be turned off in the list that <kbd>H</kbd> opens; the foot of every page has a button for it too.
+        Letters act outside writing places only. They can be turned off in the list that <kbd>H</kbd> opens; the foot of
+        every page has a button for it too.
       </p>
     </Row>
   );

@@ -14,7 +14,7 @@ interface Construct {
 const constructs: readonly Construct[] = [
   {
     write: ['[a]', '[a, b, c]'],
-    or: ['the same in TeX'],
+    or: [],
     means: (
       <>
         the symbol, of degree 1; the product <Formula tex="[a][b][c]" />
@@ -54,7 +54,7 @@ const constructs: readonly Construct[] = [
   },
   {
     write: ['h'],
-    or: ['the same in TeX'],
+    or: [],
     means: (
       <>
         <Formula tex="2 + \eta[-1] = 1 + \q{-1}" />, the hyperbolic plane
@@ -73,7 +73,8 @@ const constructs: readonly Construct[] = [
     or: ['3_ε', '3_{\\varepsilon}'],
     means: (
       <>
-        <Formula tex="n_\e = 1 + \q{-1} + 1 + \cdots" /> with <Formula tex="n" /> terms; <Formula tex="(-n)_\e = -\q{-1}\,n_\e" />
+        <Formula tex="n_\e = 1 + \q{-1} + 1 + \cdots" /> with <Formula tex="n" /> terms;{' '}
+        <Formula tex="(-n)_\e = -\q{-1}\,n_\e" />
       </>
     ),
     example: { statement: '[8] = 3_eps[2]' },
@@ -94,15 +95,27 @@ const constructs: readonly Construct[] = [
 
 function Constructs() {
   return (
-    <Ledger caption="What one may write" head={['write', 'or', 'it means', 'on the bench']} narrow="stack" className="constructs">
+    <Ledger
+      caption="What one may write"
+      head={['write', 'it means', 'on the bench']}
+      narrow="stack"
+      className="constructs"
+    >
       {constructs.map(({ write, or, means, example }) => (
         <tr key={write[0]}>
           <td>
             {write.map((text) => (
               <code key={text}>{text}</code>
             ))}
+            {or.length > 0 && (
+              <span className="nm">
+                or{' '}
+                {or.map((text) => (
+                  <code key={text}>{text}</code>
+                ))}
+              </span>
+            )}
           </td>
-          <td>{or.map((text) => (text.startsWith('the same') ? <span className="quiet" key={text}>{text}</span> : <code key={text}>{text}</code>))}</td>
           <td className="text">{means}</td>
           <td>
             <Try {...example} />
@@ -120,36 +133,41 @@ export function Language() {
       <div className="prose">
         <Constructs />
         <p>
-          Text pasted from a paper is understood: dollar signs around the whole, <code>\left</code> and <code>\right</code>, thin spaces, the minus
-          sign and dashes of a typesetter, <code>\times</code>, superscript digits, <code>\mathbb&#123;Q&#125;</code> and <code>ℚ</code>.
+          Text pasted from a paper is understood: dollar signs around the whole, <code>\left</code> and{' '}
+          <code>\right</code>, thin spaces, the minus sign and dashes of a typesetter, <code>\times</code>, superscript
+          digits, <code>\mathbb&#123;Q&#125;</code> and <code>ℚ</code>.
         </p>
         <h3 id="statements">Statements and chains</h3>
         <p>
-          A statement is two expressions with <code>=</code> between them. More than two make a chain, also pasted as rows of{' '}
-          <code>align*</code> joined by <code>&amp;=</code>. Every step of a chain is judged by itself and the first wrong one is marked:{' '}
-          <Try statement="[6] = [2] + <2>[3] = [2] + [3]" />.
+          A statement is two expressions with <code>=</code> between them. More than two make a chain, also pasted as
+          rows of <code>align*</code> joined by <code>&amp;=</code>. Every step of a chain is judged by itself and the
+          first wrong one is marked: <Try statement="[6] = [2] + <2>[3] = [2] + [3]" />.
         </p>
         <h3 id="hypotheses">Hypotheses</h3>
         <p>
-          Conditions follow after a semicolon, with commas between them: <code>a != b</code>, <code>a = b</code>, <code>char != p</code> or{' '}
-          <code>char = p</code>. Over <code>any</code> they restrict what is claimed:{' '}
-          <Try field="any" statement="2eta[a] = 0 ; char = 2" />. An equation is solved for a letter whose coefficient is a monomial up to sign.
+          Conditions follow after a semicolon, with commas between them: <code>a != b</code>, <code>a = b</code>,{' '}
+          <code>char != p</code> or <code>char = p</code>. Over <code>any</code> they restrict what is claimed:{' '}
+          <Try field="any" statement="2eta[a] = 0 ; char = 2" />. An equation is solved for a letter whose coefficient
+          is a monomial up to sign.
         </p>
         <h3 id="entries">Entries of a bracket</h3>
         <p>
-          Inside a bracket stands an element of the field: integers, letters, <code>+ - * / ^</code>, parentheses, things side by side, and{' '}
-          <code>\frac&#123;a&#125;&#123;b&#125;</code>. Exponents are integers and may be negative: <Try statement="[2^-1] = -<2>[2]" />. A letter is one Latin letter
-          with an index or primes if you like; <code>x1</code> and <code>x_1</code> are the same letter. Inside a bracket <code>h</code> is a letter.
+          Inside a bracket stands an element of the field: integers, letters, <code>+ - * / ^</code>, parentheses,
+          things side by side, and <code>\frac&#123;a&#125;&#123;b&#125;</code>. Exponents are integers and may be
+          negative: <Try statement="[2^-1] = -<2>[2]" />. A letter is one Latin letter with an index or primes if you
+          like; <code>x1</code> and <code>x_1</code> are the same letter. Inside a bracket <code>h</code> is a letter.
         </p>
         <p>
-          Three things are refused because readers disagree about them: decimals; a product right after a slash, as in <code>1/2t</code> (write{' '}
-          <code>1/(2t)</code> or <code>(1/2)t</code>); and a tower of exponents, as in <code>2^3^2</code>. An entry must be a unit: <code>[0]</code> and{' '}
-          <code>[1-1]</code> are errors, and over <Formula tex="\F_7" /> so is <code>[14]</code>.
+          Three things are refused because readers disagree about them: decimals; a product right after a slash, as in{' '}
+          <code>1/2t</code> (write <code>1/(2t)</code> or <code>(1/2)t</code>); and a tower of exponents, as in{' '}
+          <code>2^3^2</code>. An entry must be a unit: <code>[0]</code> and <code>[1-1]</code> are errors, and over{' '}
+          <Formula tex="\F_7" /> so is <code>[14]</code>.
         </p>
         <h3 id="sizes">Sizes</h3>
         <p>
-          A text has at most 20 000 characters, brackets nest at most 200 deep, and an exponent inside an entry is at most 10 000 in size. A question on the bench
-          has two seconds of computing time. Past a limit you get a refusal that says which, never a guess.
+          A text has at most 20 000 characters, brackets nest at most 200 deep, and an exponent inside an entry is at
+          most 10 000 in size. A question on the bench has two seconds of computing time. Past a limit you get a refusal
+          that says which, never a guess.
         </p>
       </div>
     </Row>

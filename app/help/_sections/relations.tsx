@@ -35,7 +35,9 @@ const degrees = [
   {
     degree: 'n > 0',
     group: 'K_n^{\\mathrm M}(F) \\times_{I^n/I^{n+1}} I^n(F)',
-    says: <>pairs of a class of Milnor K-theory and one of a power of the fundamental ideal, which agree where they meet</>,
+    says: (
+      <>pairs of a class of Milnor K-theory and one of a power of the fundamental ideal, which agree where they meet</>
+    ),
   },
 ];
 
@@ -45,8 +47,14 @@ export function Relations() {
     <Row side="relations" id="relations" className="sec ruled">
       <div className="prose">
         <p>
-          <Formula tex="\K_*(F)" /> is the graded ring with generators <Formula tex="[a]" />, one for each unit <Formula tex="a" /> of <Formula tex="F" />, in degree 1, and{' '}
-          <Formula tex="\eta" /> in degree −1, and four relations (Morel, <i>𝔸¹-Algebraic Topology over a Field</i>, ch. 3):
+          <Formula tex="\K_*(F)" /> is the graded ring with generators <Formula tex="[a]" />, one for each unit{' '}
+          <Formula tex="a" /> of <Formula tex="F" />, in degree 1, and <Formula tex="\eta" /> in degree −1, and four
+          relations (Morel,{' '}
+          <i>
+            <Formula tex="\mathbb{A}^1" />
+            -Algebraic Topology over a Field
+          </i>
+          , ch. 3):
         </p>
         <Ledger caption="The four relations" head={['relation', 'it says', 'where']}>
           {relations.map((relation) => (
@@ -71,22 +79,23 @@ export function Relations() {
         <Ledger caption="The groups by degree" head={['degree', 'group', 'which is']}>
           {degrees.map((row) => (
             <tr key={row.degree}>
-              <td className="st">
+              <td className="st whitespace-nowrap">
                 <Formula tex={row.degree} />
               </td>
               <td className="st">
                 <Formula tex={row.group} />
               </td>
-              <td className="text quiet">
-                {row.says}
-              </td>
+              <td className="text quiet">{row.says}</td>
             </tr>
           ))}
         </Ledger>
         <p>
-          For <Formula tex="n \ge 2" /> and <Formula tex="r \ge 1" /> the group <Formula tex="\K_{r-j}(F)" /> is that of pointed <Formula tex="\mathbb{A}^1" />-homotopy classes of maps{' '}
-          <Formula tex="S^n \wedge \mathbb{G}_m^{\wedge j} \to S^n \wedge \mathbb{G}_m^{\wedge r}" /> (Morel, ch. 6). A class of degree 0 is such a degree: its rank is the degree over the complex
-          numbers, its signature the degree over the real ones.
+          For <Formula tex="n \ge 2" /> and <Formula tex="r \ge 1" /> the group <Formula tex="\K_{r-j}(F)" /> is that of
+          pointed <Formula tex="\mathbb{A}^1" />
+          -homotopy classes of maps{' '}
+          <Formula tex="S^n \wedge \mathbb{G}_m^{\wedge j} \to S^n \wedge \mathbb{G}_m^{\wedge r}" /> (Morel, ch. 6). A
+          class of degree 0 is such a degree: its rank is the degree over the complex numbers, its signature the degree
+          over the real ones.
         </p>
       </div>
     </Row>

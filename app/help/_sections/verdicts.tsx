@@ -3,7 +3,11 @@ import { Formula } from '../../_components/math/formula';
 import { Row } from '../../_components/shell/row';
 
 const marks: readonly { of: Mark; name: string; says: string }[] = [
-  { of: 'equal', name: 'Equal', says: 'The two sides are the same class, in every degree that occurs. The theorem that says so is named.' },
+  {
+    of: 'equal',
+    name: 'Equal',
+    says: 'The two sides are the same class, in every degree that occurs. The theorem that says so is named.',
+  },
   {
     of: 'different',
     name: 'Different',
@@ -14,8 +18,16 @@ const marks: readonly { of: Mark; name: string; says: string }[] = [
     name: 'Undecided',
     says: 'What was compared agrees, and what was compared does not see everything. Over the fields in the table above this does not occur.',
   },
-  { of: 'unread', name: 'Unread', says: 'The line could not be read. The place and what could stand there are shown under it; the last answer stays on the sheet.' },
-  { of: 'old', name: 'Old answer', says: 'The line has changed since. The tiles are hatched until the new answer is there.' },
+  {
+    of: 'unread',
+    name: 'Unread',
+    says: 'The line could not be read. The place and what could stand there are shown under it; the last answer stays on the sheet.',
+  },
+  {
+    of: 'old',
+    name: 'Old answer',
+    says: 'The line has changed since. The tiles are hatched until the new answer is there.',
+  },
 ];
 
 const maps: readonly { name: string; says: string; tex?: string }[] = [
@@ -45,8 +57,10 @@ export function Verdicts() {
         ))}
       </ul>
       <p className="text mt-4 max-w-[44em]">
-        Of a chain: different if one step is, else undecided if one is, else equal. The floor of tiles shows what was compared, degrees down and places across: a tile is{' '}
-        <i>whole</i> where both sides have the value painted on it, <i>faint</i> where both are zero, <i>split</i> where they differ, with the left value above and the right one below.
+        Of a chain: different if one step is, else undecided if one is, else equal. The floor of tiles shows what was
+        compared, degrees down and places across: a tile is <i>whole</i> where both sides have the value painted on it,{' '}
+        <i>faint</i> where both are zero, <i>split</i> where they differ, with the left value above and the right one
+        below.
       </p>
     </Row>
   );
@@ -57,8 +71,8 @@ export function Evidence() {
     <Row side="evidence" id="evidence" className="sec ruled">
       <div className="prose">
         <p>
-          A verdict rests on homomorphisms that are applied to both sides; words are never expanded for it. <i>Left and right apart</i> lists every map, its place, both values and the
-          group they lie in.
+          A verdict rests on homomorphisms that are applied to both sides; words are never expanded for it.{' '}
+          <i>Left and right apart</i> lists every map, its place, both values and the group they lie in.
         </p>
         <dl className="terms">
           {maps.map((map) => (
@@ -77,9 +91,11 @@ export function Evidence() {
         </dl>
         <h3 id="modulo">Modulo η and modulo h</h3>
         <p>
-          <code>modEta</code> says whether the sides agree in Milnor K-theory, <Formula tex="\K_*/\eta = K^{\mathrm M}_*" />; <code>modH</code> whether they agree in{' '}
-          <Formula tex="\K_*/h" />, whose part of degree <Formula tex="n" /> is <Formula tex="I^n(F)" /> inside the Witt ring. The sides are equal exactly when both hold. So of a
-          different pair they say which half of it fails: in <Formula tex="[6] = [2] + [3]" /> only the second does.
+          <code>modEta</code> says whether the sides agree in Milnor K-theory,{' '}
+          <Formula tex="\K_*/\eta = K^{\mathrm M}_*" />; <code>modH</code> whether they agree in{' '}
+          <Formula tex="\K_*/h" />, whose part of degree <Formula tex="n" /> is <Formula tex="I^n(F)" /> inside the Witt
+          ring. The sides are equal exactly when both hold. So of a different pair they say which half of it fails: in{' '}
+          <Formula tex="[6] = [2] + [3]" /> only the second does.
         </p>
       </div>
     </Row>
