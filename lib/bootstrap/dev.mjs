@@ -8,7 +8,7 @@ import { inState } from './paths.mjs';
 import { requirePort } from './ports.mjs';
 import { say } from './trouble.mjs';
 
-const quietMilliseconds = 1500;
+const quietMilliseconds = 4000;
 
 /**
  * Bundles the worker now and at every change. `settled()` resolves when a new bundle has lain there for a moment; threads

@@ -1,4 +1,4 @@
-// npm test [part …] [-- arguments for vitest]: everything, or the named parts, on a throw-away cluster and a built server.
+// npm test -- [part …] [arguments for vitest]: everything, or the named parts, on a throw-away cluster and a built server.
 import fs from 'node:fs';
 import path from 'node:path';
 import { ensureBuild } from './build.mjs';
@@ -51,10 +51,11 @@ async function runProject(run, project, extra, environment) {
   return { passed: numPassedTests, failed };
 }
 
-const separator = process.argv.indexOf('--');
-const end = separator < 0 ? process.argv.length : separator;
-const named = process.argv.slice(2, end).filter((word) => Object.hasOwn(parts, word) || !/[/.-]/.test(word));
-const extra = process.argv.slice(2).filter((word) => word !== '--' && !named.includes(word));
+// Parts come first; from the first option or path on everything is for vitest.
+const words = process.argv.slice(2).filter((word) => word !== '--');
+const firstExtra = words.findIndex((word) => /^-|[/.]/.test(word));
+const named = firstExtra < 0 ? words : words.slice(0, firstExtra);
+const extra = words.slice(named.length);
 
 await launch('test', 'npm test', 130, async (run) => {
   requireNode();
