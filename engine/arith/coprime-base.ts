@@ -30,8 +30,25 @@ export function coprimeBase(numbers: readonly bigint[]): bigint[] {
     }
     if (rest > 1n) leftovers.add(rest);
   }
-  const base = [...small].map(BigInt).concat(baseOf([...leftovers]));
+  const base = [...small].map(BigInt).concat(isolatedAndBase([...leftovers]));
   return base.sort((a, b) => (a < b ? -1 : a > b ? 1 : 0));
+}
+
+/**
+ * As `baseOf`, after those that are coprime to all others have been set aside: n is, iff it is coprime to P/n modulo n, P
+ * the product of all; P modulo n² gives all of these at once. D. Bernstein, How to find smooth parts of integers (2004).
+ */
+function isolatedAndBase(numbers: readonly bigint[]): bigint[] {
+  if (numbers.length <= SHORT) return baseOf(numbers);
+  const tree = productTree(numbers);
+  const residues = remainders(
+    tree.at(-1)![0]!,
+    tree.map((level) => level.map((n) => n * n)),
+  );
+  const isolated: bigint[] = [];
+  const sharing: bigint[] = [];
+  numbers.forEach((n, i) => (gcd(n, residues[i]! / n) === 1n ? isolated : sharing).push(n));
+  return isolated.concat(baseOf(sharing));
 }
 
 function baseOf(numbers: readonly bigint[]): bigint[] {

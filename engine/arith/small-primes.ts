@@ -50,15 +50,25 @@ const groups: readonly { readonly product: bigint; readonly bundles: readonly Bu
   return made;
 })();
 
+/** 2^26 modulo each small prime: a number below 2^53 is taken in two halves, so that all remainders are of short integers. */
+const halfWord = 67108864;
+const halfWordModulo: Uint32Array = smallPrimes.map((p) => halfWord % p);
+
 /** The primes below 2^12 that divide n ≥ 1, ascending. */
 export function smallPrimeDivisors(n: bigint): number[] {
   if (n < 9007199254740992n) return divisorsOfSmall(Number(n));
   const found: number[] = [];
+  let at = 0;
   for (const group of groups) {
     const rest = n % group.product;
     for (const bundle of group.bundles) {
       const residue = Number(rest % BigInt(bundle.product));
-      for (const p of bundle.primes) if (residue % p === 0) found.push(p);
+      const low = (residue % halfWord) | 0;
+      const high = ((residue - low) / halfWord) | 0;
+      for (let end = at + bundle.primes.length; at < end; at++) {
+        const p = smallPrimes[at]!;
+        if ((((high % p) * halfWordModulo[at]! + low) | 0) % p === 0) found.push(p);
+      }
     }
   }
   return found;
@@ -67,13 +77,17 @@ export function smallPrimeDivisors(n: bigint): number[] {
 function divisorsOfSmall(n: number): number[] {
   const found: number[] = [];
   let rest = n;
-  for (let i = 0; i < smallPrimes.length; i++) {
-    const p = smallPrimes[i]!;
-    if (p * p > rest) break;
-    if (rest % p !== 0) continue;
+  let low = (rest % halfWord) | 0;
+  let high = ((rest - low) / halfWord) | 0;
+  for (let at = 0; at < smallPrimes.length; at++) {
+    const p = smallPrimes[at]!;
+    if (high === 0 && p * p > low) break;
+    if ((((high % p) * halfWordModulo[at]! + low) | 0) % p !== 0) continue;
     found.push(p);
     do rest /= p;
     while (rest % p === 0);
+    low = (rest % halfWord) | 0;
+    high = ((rest - low) / halfWord) | 0;
   }
   if (rest > 1 && rest < TRIAL_BOUND) found.push(rest);
   return found;
