@@ -14,8 +14,8 @@ export const inDegrees = (degrees: readonly number[]): string =>
 
 /** What the part of a degree is, by the structure of Milnor–Witt K-theory (Morel, LNM 2052, chapter 3). */
 export function degreeMeaning(degree: number): string {
-  if (degree === 0) return 'the Grothendieck–Witt ring: classes of quadratic forms';
-  if (degree < 0) return 'the Witt ring: forms up to hyperbolic planes';
-  if (degree === 1) return 'units, with the ideal of even-dimensional forms';
-  return 'Milnor symbols, glued to a power of the fundamental ideal';
+  if (degree === 0) return 'classes of quadratic forms';
+  if (degree < 0) return 'forms up to hyperbolic planes';
+  if (degree === 1) return 'units paired with forms of even rank';
+  return 'Milnor symbols paired with a power of the fundamental ideal';
 }

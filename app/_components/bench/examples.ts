@@ -7,5 +7,5 @@ export const examples: readonly (Draft & { readonly shows: string })[] = [
   { field: 'F_9', statement: '[z][z+1] = 0', shows: 'two units of a finite field' },
   { field: 'any', statement: '[a b^2] = [a] + h[b]', shows: 'letters, over every field' },
   { field: 'Q', statement: '[5][2] + <2>[5][3]', shows: 'an expression: its canonical form' },
-  { field: 'Q', statement: '[12] = [4] + <4>[3] = 2[2] + <4>[3]', shows: 'a chain, step by step' },
+  { field: 'Q', statement: '[6] = [2] + <2>[3] = [2] + [3]', shows: 'a chain, step by step' },
 ];

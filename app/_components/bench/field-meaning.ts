@@ -54,30 +54,27 @@ export function orderOf(name: FieldName): bigint | undefined {
   return base === undefined || degree === undefined || degree > 64 ? undefined : base ** BigInt(degree);
 }
 
-/** Whether the comparison over a field is complete, in a few words. */
-const complete = 'complete in every degree';
-
 function finiteMeaning(name: FieldName, order: bigint | undefined, answer: FieldAnswer | undefined): Phrase {
   const count = order === undefined ? 'a finite field' : elements(order);
   if (name.kind === 'extension')
-    return [`${count}; `, tex(name.letter), ' generates it over ', tex(fieldNameTex(name.base)), `: ${complete}`];
-  if (!answer?.modulus) return [`${count}: ${complete}`];
-  return [`${count}; `, tex('z'), ' generates it, with ', tex(`${answer.modulus.tex} = 0`), `: ${complete}`];
+    return [`${count}; `, tex(name.letter), ' generates it over ', tex(fieldNameTex(name.base)), ``];
+  if (!answer?.modulus) return [`${count}`];
+  return [`${count}; `, tex('z'), ' generates it, with ', tex(`${answer.modulus.tex} = 0`), ``];
 }
 
 /**
- * What the name of a field means, as far as the name tells, and with what the service said about it: the modulus is known only there.
+ * What the name of a field stands for, as far as the name tells, and with what the service said about it: the modulus is known only there.
  */
-export function fieldMeaning(name: FieldName, answer?: FieldAnswer): Phrase {
+export function fieldWords(name: FieldName, answer?: FieldAnswer): Phrase {
   switch (name.kind) {
     case 'rationals':
-      return [`the rationals: ${complete}`];
+      return ['the rationals'];
     case 'reals':
-      return [`the real numbers; entries are rational: ${complete}`];
+      return ['the real numbers; entries are rational'];
     case 'complexes':
-      return [`the complex numbers; entries are rational: ${complete}`];
+      return ['the complex numbers; entries are rational'];
     case 'padics':
-      return ['the ', tex(name.prime.toString()), `-adic numbers; entries are rational: ${complete}`];
+      return ['the ', tex(name.prime.toString()), '-adic numbers; entries are rational'];
     case 'finite':
       return finiteMeaning(name, name.order, answer);
     case 'extension': {
@@ -96,6 +93,13 @@ export function fieldMeaning(name: FieldName, answer?: FieldAnswer): Phrase {
     case 'any':
       return ['no field is named: letters are units, and a claim is meant for every field'];
   }
+}
+
+/** The same, with what is decided over the field. */
+export function fieldMeaning(name: FieldName, answer?: FieldAnswer): Phrase {
+  const decided =
+    name.kind !== 'any' && name.kind !== 'functions' && (name.kind !== 'extension' || orderOf(name) !== undefined);
+  return decided ? [...fieldWords(name, answer), ': complete in every degree'] : fieldWords(name, answer);
 }
 
 /** Whether the service has something to add to what the name tells. */

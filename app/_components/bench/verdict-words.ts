@@ -29,17 +29,16 @@ function equalPhrase(answer: CompareAnswer): Phrase {
 }
 
 function differentPhrase(answer: CompareAnswer): Phrase {
-  const { separating, modEta, modH } = answer.evidence;
+  const { separating } = answer.evidence;
   const degrees = degreesOf(answer.parts.filter((part) => part.verdict === 'different'));
   if (!separating) return [`${inDegrees(degrees)}.`];
   const at = separating.place === undefined ? '. The' : `, at ${placeWords(separating.place)}. There the`;
-  const quotients = quotientWords(modEta, modH);
   return [
     `in ${degreeName(separating.degree)}${at} left side has ${separating.map === 'class' ? 'class' : mapWord[separating.map]} `,
     tex(separating.left.tex),
     ' and the right side ',
     tex(separating.right.tex),
-    quotients === '' ? '.' : `. ${quotients}`,
+    '.',
   ];
 }
 

@@ -13,8 +13,9 @@ interface Props {
 /** A chain of equalities, every step with its mark; a click on a step shows what was compared in it. */
 export function ChainTable({ chain, firstWrong, shown, onShow }: Props) {
   const first = chain[0];
+  const long = chain.some((step) => Math.max(step.left.text.length, step.right.text.length) > 52);
   return (
-    <table className="chain chain-judged">
+    <table className={`chain chain-judged ${long ? 'long' : ''}`}>
       <caption className="sr">The steps of the chain</caption>
       <tbody>
         {first && (

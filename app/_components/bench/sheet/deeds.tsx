@@ -44,7 +44,7 @@ export function Deeds({ field, line, text, tex, repair }: Props) {
   useKey({ keyName: 'L', label: 'copy the link', act: copyLink });
   return (
     <div className="deeds">
-      {repair && <p>{repair}</p>}
+      {repair}
       <p className="acts">
         <span className="it quiet">copy</span>
         <Button kind="plain" keyName="C" tip="Copy as text" onClick={copyText}>

@@ -39,12 +39,9 @@ interface Props {
 export function Difference({ field, left, right, evidence }: Props) {
   const form = useDifference(field, left, right, true);
   const quotients = quotientWords(evidence.modEta, evidence.modH);
-  if (!form) return null;
   return (
     <Row side="left minus right" sideClass="to-lead" id="minus">
-      <p className="lead">
-        <Formula tex={form.tex} breaks />
-      </p>
+      <p className="lead">{form ? <Formula tex={form.tex} breaks /> : '\u00a0'}</p>
       {quotients !== '' && <p className="text quiet mt-2">{quotients}</p>}
     </Row>
   );

@@ -104,12 +104,12 @@ export function ExpressionEvidence({ answer, expression }: Props) {
       {answer.steps && (
         <Row side="why" sideClass="to-chain" id="why">
           <div ref={why}>
+            {open && <StepTable steps={answer.steps} />}
             <Button kind="plain" keyName="W" tip="Why" aria-expanded={open} onClick={toggle}>
               {open
                 ? 'Fold the derivation'
                 : `Derivation, ${answer.steps.length} ${answer.steps.length === 1 ? 'step' : 'steps'}`}
             </Button>
-            {open && <StepTable steps={answer.steps} />}
           </div>
         </Row>
       )}

@@ -64,15 +64,19 @@ function Repair({ bench, answer }: { readonly bench: BenchState; readonly answer
   });
   if (expression)
     return (
-      <Button wide keyName="=" tip="Put it on the left of an equation" unavailable={unavailable} onClick={compare}>
-        Compare it with another
-      </Button>
+      <p>
+        <Button wide keyName="=" tip="Put it on the left of an equation" unavailable={unavailable} onClick={compare}>
+          Compare it with another
+        </Button>
+      </p>
     );
   if (!different || !form?.repairs || answer.question.text.includes(';')) return null;
   return (
-    <Button wide keyName="A" tip="Put the missing term on the right side" unavailable={unavailable} onClick={add}>
-      Add <Formula tex={form.tex} /> on the right
-    </Button>
+    <p>
+      <Button wide keyName="A" tip="Put the missing term on the right side" unavailable={unavailable} onClick={add}>
+        Add <Formula tex={form.tex} /> on the right
+      </Button>
+    </p>
   );
 }
 

@@ -57,9 +57,11 @@ export function StatementEvidence({ answer }: { readonly answer: CompareAnswer }
           <p className="text quiet">Both sides are zero in every degree.</p>
         ) : (
           <EvidenceFloor parts={parts} onShow={showCell}>
-            <Button kind="plain" keyName="W" tip="Why" aria-expanded={shown} className="legend-act" onClick={toggle}>
-              Left and right apart
-            </Button>
+            {verdict === 'equal' && (
+              <Button kind="plain" keyName="W" tip="Why" aria-expanded={shown} className="legend-act" onClick={toggle}>
+                Left and right apart
+              </Button>
+            )}
           </EvidenceFloor>
         )}
         {chosen && (

@@ -27,10 +27,11 @@ export function StepTable({ steps }: { readonly steps: readonly DerivationStep[]
   const first = steps[0];
   if (!first) return <p className="text quiet">It is a canonical word as it stands: no relation is needed.</p>;
   const shown = all ? steps : steps.slice(0, shownAtFirst);
+  const long = steps.some((step) => Math.max(step.before.text.length, step.after.text.length) > 44);
   const more = steps.length - shown.length;
   return (
     <div>
-      <table className="chain chain-steps">
+      <table className={`chain chain-steps ${long ? 'long' : ''}`}>
         <caption className="sr">Derivation, one relation a line</caption>
         <tbody>
           <tr>

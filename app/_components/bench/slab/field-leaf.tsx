@@ -10,7 +10,7 @@ import { Leaf } from '../../leaf/leaf';
 import { Formula } from '../../math/formula';
 import { askField, Declined } from '../ask';
 import { fieldFace } from '../field-face';
-import { fieldMeaning, needsService } from '../field-meaning';
+import { fieldMeaning, fieldWords, needsService } from '../field-meaning';
 import { Said } from '../phrase';
 
 /** Fields that are asked for most, in the order of the help page. */
@@ -97,7 +97,7 @@ function Form({ field, onClose, onChoose }: Omit<Props, 'open'>) {
                 <span className="field-list-name">
                   {face.tex === undefined ? <i>{face.word}</i> : <Formula tex={face.tex} />}
                 </span>
-                <span className="quiet">{known && 'name' in known && <Said phrase={fieldMeaning(known.name)} />}</span>
+                <span className="quiet">{known && 'name' in known && <Said phrase={fieldWords(known.name)} />}</span>
               </button>
             </li>
           );

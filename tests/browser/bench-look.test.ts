@@ -1,0 +1,78 @@
+import { describe, expect, test } from 'vitest';
+import { findings, type Sight } from '../harness/browser';
+import { expectWord, openBench, scrollsSideways, written } from './bench-page';
+
+const equal = { field: 'Q', statement: '[5][6] + <2> + <3> = [-1][6] + <5> + <30>' };
+const different = { field: 'Q', statement: '[6] = [2] + [3]' };
+
+const sights: readonly (readonly [string, Sight])[] = [
+  ['at a desk', { width: 1440, height: 900 }],
+  ['at a desk in the dark', { width: 1440, height: 900, dark: true }],
+  ['on a phone', { width: 390, height: 844, touch: true }],
+  ['on a phone in the dark', { width: 390, height: 844, dark: true, touch: true }],
+  ['at twice the size', { width: 640, height: 430 }],
+];
+
+describe('the bench can be used by everyone', () => {
+  test.each(sights)('%s: no finding of axe, nothing sideways', async (_, sight) => {
+    const bench = await openBench(equal, sight);
+    await expectWord(bench, 'Equal');
+    expect(await findings(bench.page)).toEqual([]);
+    expect(await scrollsSideways(bench.page)).toBe(false);
+    await bench.line.fill(different.statement);
+    await expectWord(bench, 'Different');
+    await expect.poll(() => bench.page.locator('#minus').count()).toBe(1);
+    expect(await findings(bench.page)).toEqual([]);
+    expect(await scrollsSideways(bench.page)).toBe(false);
+    await bench.line.fill('[6] = <2');
+    await bench.page.locator('.fault').waitFor();
+    expect(await findings(bench.page)).toEqual([]);
+    await bench.line.fill('[5][2] + <2>[5][3]');
+    await bench.page.locator('#residues table').waitFor();
+    expect(await findings(bench.page)).toEqual([]);
+    expect(await scrollsSideways(bench.page)).toBe(false);
+    await bench.line.fill('');
+    await bench.page.locator('.empty').waitFor();
+    expect(await findings(bench.page)).toEqual([]);
+    await bench.picker.click();
+    await bench.page.getByRole('dialog').waitFor();
+    expect(await findings(bench.page)).toEqual([]);
+    expect(await scrollsSideways(bench.page)).toBe(false);
+  });
+
+  test('by the keyboard alone: choose a field, write, read the verdict, walk the tiles, open the evidence', async () => {
+    const { page, line, picker, ...bench } = await openBench();
+    await page.keyboard.press('f');
+    const name = page.getByRole('textbox', { name: 'Name of the field' });
+    await name.waitFor();
+    expect(await name.evaluate((input) => input === document.activeElement)).toBe(true);
+    await name.press('Control+a');
+    await page.keyboard.type('F_6');
+    await expect.poll(() => page.locator('.hint-wrong').count()).toBe(1);
+    await name.press('Control+a');
+    await page.keyboard.type('Q');
+    await page.keyboard.press('Enter');
+    await expect.poll(() => page.getByRole('dialog').count()).toBe(0);
+    await page.keyboard.press('i');
+    await page.keyboard.type('<2> + <3> = <5> + <30>');
+    await expectWord({ page, line, picker, ...bench }, 'Equal');
+    await page.keyboard.press('Escape');
+    const focused = () => page.evaluate(() => document.activeElement?.getAttribute('aria-label') ?? '');
+    for (let press = 0; press < 30 && !/degree 0/.test(await focused()); press += 1) await page.keyboard.press('Tab');
+    const first = await focused();
+    expect(first).toMatch(/degree 0/);
+    await page.keyboard.press('ArrowRight');
+    expect(await focused()).not.toBe(first);
+    await page.keyboard.press('Enter');
+    await expect.poll(() => page.locator('#apart').count()).toBe(1);
+    expect(await written({ page, line, picker, ...bench })).toBe('<2> + <3> = <5> + <30>');
+  });
+
+  test('a verdict is announced once it is steady', async () => {
+    const bench = await openBench(different);
+    await expectWord(bench, 'Different');
+    await expect
+      .poll(() => bench.page.locator('[aria-live=polite]').allInnerTexts())
+      .toContain('Different, in degree 1, at 3.');
+  });
+});

@@ -1,0 +1,41 @@
+import type { Locator, Page } from 'playwright-core';
+import { expect } from 'vitest';
+import { openPage, type Sight } from '../harness/browser';
+
+export interface BenchPage {
+  readonly page: Page;
+  readonly line: Locator;
+  readonly picker: Locator;
+  /** The word on the sheet: "Equal", or the canonical form of an expression. */
+  readonly word: Locator;
+  readonly status: Locator;
+}
+
+export const benchOf = (page: Page): BenchPage => ({
+  page,
+  line: page.getByRole('textbox', { name: 'Statement or expression' }),
+  picker: page.getByRole('button', { name: /^Over the field/ }),
+  word: page.locator('.verdict h2'),
+  status: page.locator('.reading-status'),
+});
+
+/** Opens the bench with a statement over a field, or bare, and waits until one can write. */
+export async function openBench(asked?: { field: string; statement: string }, sight?: Sight): Promise<BenchPage> {
+  const query = asked ? `?${new URLSearchParams(asked).toString()}` : '';
+  const bench = benchOf(await openPage(`/bench${query}`, sight));
+  await bench.line.waitFor();
+  return bench;
+}
+
+/** What stands in the line. */
+export const written = async (bench: BenchPage): Promise<string> => (await bench.line.innerText()).replace(/\n$/, '');
+
+/** Waits for a current answer with this word. */
+export async function expectWord(bench: BenchPage, word: string): Promise<void> {
+  await expect.poll(() => bench.word.innerText().catch(() => ''), { timeout: 15_000 }).toBe(word);
+  await expect.poll(() => bench.page.locator('.is-old').count(), { timeout: 15_000 }).toBe(0);
+}
+
+/** Whether anything on the page is wider than the window. */
+export const scrollsSideways = (page: Page): Promise<boolean> =>
+  page.evaluate(() => document.documentElement.scrollWidth > document.documentElement.clientWidth);
