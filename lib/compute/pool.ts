@@ -8,6 +8,7 @@ import type { Task } from './engine.worker';
 import { laneSizes, longestQueues, quickSeconds, wallMilliseconds } from './lanes';
 import { type AnswerOf, type BodyOf, type ComputeRequest, declined, type Kind, type Reply } from './request';
 import { Busy, Slots } from './slots';
+import { newStartFlag, wallAfter } from './wall';
 
 export interface Asking {
   /** Ends the computation when the client goes away or the whole call is over. */
@@ -90,18 +91,22 @@ export async function compute<K extends Kind>(
   }
 }
 
-const attempt = (task: Task, lane: Slots, { signal, urgent = true }: Asking): Promise<AnyReply> =>
+const attempt = (task: Omit<Task, 'started'>, lane: Slots, { signal, urgent = true }: Asking): Promise<AnyReply> =>
   lane.run(
     async () => {
-      const wall = AbortSignal.timeout(wallMilliseconds(task.seconds));
+      const started = newStartFlag();
+      const wall = wallAfter(wallMilliseconds(task.seconds), started);
+      const either = signal === undefined ? wall.signal : AbortSignal.any([wall.signal, signal]);
       try {
-        return await engine().threads.run(task, { signal: signal ? AbortSignal.any([wall, signal]) : wall });
+        return await engine().threads.run({ ...task, started }, { signal: either });
       } catch (error) {
         signal?.throwIfAborted();
-        if (wall.aborted)
+        if (wall.signal.aborted)
           return declined(problemOf('budget', `Stopped: the computation did not end in time. ${smaller}`));
         if (isOutOfMemory(error)) return declined(problemOf('size', `Stopped at the limit on memory. ${smaller}`));
         throw error;
+      } finally {
+        wall.clear();
       }
     },
     { urgent, signal },
