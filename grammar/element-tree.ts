@@ -79,7 +79,7 @@ function elementFactor(node: SyntaxNode): Element {
   if (!exponent) return base;
   if (exponents.length > 1) throw exponentTower(node.text, atom.at, exponents, largestEntryExponent);
   const limit = BigInt(largestEntryExponent);
-  if (exponent.value > limit || exponent.value < -limit) throw largeEntryExponent(node.text, exponent.at);
+  if (exponent.value > limit || exponent.value < -limit) throw largeEntryExponent(node.text, exponent.number);
   return powerElement(base, Number(exponent.value), spanFrom(atom.at, exponent.at));
 }
 

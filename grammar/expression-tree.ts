@@ -15,7 +15,7 @@ import {
 } from '../engine/expression/expression';
 import type { Element } from '../engine/expression/element';
 import { elementOf } from './element-tree';
-import { adjacentNumbers, exponentTower, largePower, negativePower } from './faults';
+import { adjacentNumbers, exponentTower, largePower, negativePower, numberAfterWord } from './faults';
 import { largestPower } from './limits';
 import type { SyntaxNode } from './syntax-node';
 import { digitsMeet, exponentsOf, innerSign, plainInteger, signed, spanFrom } from './tree-parts';
@@ -39,12 +39,18 @@ function productOf(node: SyntaxNode): Expression {
     const factor = signed(negate, innerSign(operator), factorOf(next));
     if (operator.rule === 'juxtaposed' && factor.kind !== 'epsilonInteger' && factor.at) {
       if (digitsMeet(node.text, before, factor.at)) throw adjacentNumbers(node.text, before, factor.at);
+      if (factor.kind === 'integer' && isWord(factors.at(-1)) && before.end === factor.at.start) {
+        throw numberAfterWord(node.text, before, factor.at);
+      }
     }
     factors.push(factor);
   });
   const [only] = factors;
   return only && factors.length === 1 ? only : product(factors, spanFrom(only?.at, factors.at(-1)?.at));
 }
+
+const isWord = (factor: Expression | undefined): boolean =>
+  factor?.kind === 'eta' || factor?.kind === 'epsilon' || factor?.kind === 'hyperbolic';
 
 function factorOf(node: SyntaxNode): Expression {
   const atom = node.child(0);
@@ -53,8 +59,8 @@ function factorOf(node: SyntaxNode): Expression {
   const [exponent] = exponents;
   if (!exponent) return base;
   if (exponents.length > 1) throw exponentTower(node.text, atom.at, exponents, largestPower);
-  if (exponent.value < 0n) throw negativePower(node.text, exponent.at, exponent.value);
-  if (exponent.value > BigInt(largestPower)) throw largePower(node.text, exponent.at);
+  if (exponent.value < 0n) throw negativePower(node.text, exponent.number, exponent.value);
+  if (exponent.value > BigInt(largestPower)) throw largePower(node.text, exponent.number);
   return power(base, Number(exponent.value), spanFrom(atom.at, exponent.at));
 }
 

@@ -91,3 +91,13 @@ export const largeOrder = (text: string, at: Span): ReadingError =>
   fault(text, at, `The degree of a finite field is at most 1 000 here, and ${quoted(text, at)} is more.`, [
     { text: 'a number from 1 to 1000' },
   ]);
+
+/** `eta2`: a power or a product. */
+export const numberAfterWord = (text: string, word: Span, number: Span): ReadingError => {
+  const w = quoted(text, word);
+  const n = quoted(text, number);
+  return fault(text, number, `${w}${n} can be read in two ways: write ${w}^${n} or ${n}${w}.`, [
+    { text: `\`${w}^${n}\`` },
+    { text: `\`${n}${w}\`` },
+  ]);
+};

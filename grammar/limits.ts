@@ -51,8 +51,8 @@ function checkSides(text: string): void {
   }
 }
 
-const openers = new Set(['(', '[', '{', '<', '⟨', '⟪', '〈', '〈', '《']);
-const closers = new Set([')', ']', '}', '>', '⟩', '⟫', '〉', '〉', '》']);
+const openers = new Set(['(', '[', '{', '<', '⟨', '⟪', '\u2329', '\u3008', '《']);
+const closers = new Set([')', ']', '}', '>', '⟩', '⟫', '\u232A', '\u3009', '》']);
 /** Signs after which a chain of divisions begins anew. */
 const chainBreaks = new Set(['+', '-', '−', ',', '=', ';']);
 

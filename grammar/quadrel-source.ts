@@ -28,7 +28,7 @@ Quadrel {
   hypotheses = ";" gap condition ("," gap condition)*
   equals     = "=" gap
   condition  = characteristic relation digits gap                                 -- characteristic
-             | element relation element                                            -- elements
+             | ~characteristic element relation element                            -- elements
   relation   = ("!=" | "≠" | "\\neq" ~latin | "\\ne" ~latin | struckEquals | "=") gap
   struckEquals = "\\not" gap "="
   characteristic = ("char" ~latin | uprightChar) gap
@@ -86,8 +86,8 @@ Quadrel {
 
   minus         = "-" | "−" | "‐".."―" | "﹣" | "－"
   otherTimes    = "·" | "⋅" | "×" | "∗" | "∙" | "\\cdot" ~latin | "\\times" ~latin | "\\ast" ~latin
-  angleOpen     = "⟨" | "〈" | "〈" | "\\langle" ~latin
-  angleClose    = "⟩" | "〉" | "〉" | "\\rangle" ~latin
+  angleOpen     = "⟨" | "\u{2329}" | "\u{3008}" | "\\langle" ~latin
+  angleClose    = "⟩" | "\u{232A}" | "\u{3009}" | "\\rangle" ~latin
   pfisterOpen   = "⟪" | "《" | twice<"⟨"> | twice<"\\langle"> ~latin | "\\llangle" ~latin
   pfisterClose  = "⟫" | "》" | twice<"⟩"> | twice<"\\rangle"> ~latin | "\\rrangle" ~latin
   superscript   = "⁻"? ("⁰" | "¹" | "²" | "³" | "⁴".."⁹")+
@@ -125,7 +125,8 @@ Quadrel {
   gap      = (" " | ~("'".."[" | "]".."}") (blank | texBlank))*
   blank    = "\u{9}".."\u{D}" | "~" | "&" | "\u{A0}" | "\u{2000}".."\u{200B}" | "\u{2028}".."\u{2029}" | "\u{202F}"
            | "\u{205F}".."\u{2064}" | "\u{3000}" | "\u{FEFF}"
-  texBlank = "\\" ("," | "!" | ";" | ":" | ">" | " " | "\n")                       -- sign
+  texBlank (white space)
+           = "\\" ("," | "!" | ";" | ":" | ">" | " " | "\n")                       -- sign
            | "\\" texBlankWord ~latin                                              -- word
            | "\\\\" rowSpace? &rowStart                                            -- row
   texBlankWord = "left" | "right" | "middle" | "biggl" | "biggr" | "bigg" | "bigl" | "bigr" | "big"

@@ -49,12 +49,18 @@ export const innerSign = (operator: SyntaxNode): SyntaxNode | undefined =>
 export const digitsMeet = (text: string, left: Span, right: Span): boolean =>
   /[0-9]/.test(text.charAt(left.end - 1)) && /[0-9]/.test(text.charAt(right.start));
 
-/** An exponent with its place, without the white space after it. */
+/** An exponent: the stretch from its hat on, that of the integer alone, and its value. */
 export interface Exponent {
   readonly at: Span;
+  readonly number: Span;
   readonly value: bigint;
 }
 
-/** The exponents after one base, in order. */
+/** The exponents after one base, in order, without the white space after each. */
 export const exponentsOf = (nodes: readonly SyntaxNode[]): readonly Exponent[] =>
-  nodes.map((node) => ({ at: node.child(0).at, value: BigInt(plainInteger(node.child(0).source)) }));
+  nodes.map((node) => {
+    const { at, source } = node.child(0);
+    const [written = ''] = /[^\s^{()}~](?:.*[^\s{()}~])?/su.exec(source) ?? [];
+    const start = at.start + source.indexOf(written);
+    return { at, number: { start, end: start + written.length }, value: BigInt(plainInteger(source)) };
+  });
