@@ -1,4 +1,7 @@
 import Link from 'next/link';
+import { compute } from '@/lib/compute/pool';
+import { isAnswer } from '@/lib/compute/request';
+import type { CompareAnswer } from '@/lib/contracts/compare';
 import { LiveAnswer, LiveBench, LiveSlab, LiveTry } from './_components/bench/live-line';
 import { VerdictMark } from './_components/marks/verdict-mark';
 import { Formula } from './_components/math/formula';
@@ -13,10 +16,21 @@ const examples = [
   { field: 'Q', statement: '<2> + <3> = <5> + <30>' },
 ];
 
+let answered: Promise<CompareAnswer | undefined> | undefined;
+
+/** The answer the page opens with, worked out once. Where it fails, the page asks for it like for any other. */
+async function firstAnswer(): Promise<CompareAnswer | undefined> {
+  const reply = await compute('compare', { ...first, forms: true }).catch(() => undefined);
+  if (reply !== undefined && isAnswer(reply)) return reply.answer;
+  answered = undefined;
+  return undefined;
+}
+
 /** The question, a line to try it on, and a real answer; then contents as in a book. */
-export default function Landing() {
+export default async function Landing() {
+  answered ??= firstAnswer();
   return (
-    <LiveBench {...first}>
+    <LiveBench {...first} answer={await answered}>
       <section className="slab" aria-label="Try a statement">
         <div className="row landing-head">
           <span />

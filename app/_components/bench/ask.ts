@@ -15,6 +15,9 @@ export type Answer =
   | { readonly kind: 'statement'; readonly question: Question; readonly body: CompareAnswer }
   | { readonly kind: 'expression'; readonly question: Question; readonly body: NormalizeAnswer };
 
+/** What the answer to a question is kept under. */
+export const answerKey = ({ kind, field, text }: Question) => ['answer', kind, field, text] as const;
+
 export const sameQuestion = (a: Question | undefined, b: Question | undefined): boolean =>
   a === b || (a !== undefined && b !== undefined && a.kind === b.kind && a.field === b.field && a.text === b.text);
 

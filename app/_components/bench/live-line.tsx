@@ -3,6 +3,7 @@
 import './bench.css';
 import Link from 'next/link';
 import { createContext, type ReactNode, useContext, useMemo } from 'react';
+import type { CompareAnswer } from '@/lib/contracts/compare';
 import { VerdictMark } from '../marks/verdict-mark';
 import { Formula } from '../math/formula';
 import { Row } from '../shell/row';
@@ -37,9 +38,13 @@ function Provide({ field, statement, children }: Draft & { readonly children: Re
 }
 
 /** A small bench within another page: the parts below stand anywhere inside it and share one line. */
-export function LiveBench(props: Draft & { readonly children: ReactNode }) {
+export function LiveBench({
+  answer,
+  ...props
+}: Draft & { readonly answer?: CompareAnswer; readonly children: ReactNode }) {
+  const question = { kind: 'statement', field: props.field, text: props.statement } as const;
   return (
-    <AskClient>
+    <AskClient known={answer && { kind: 'statement', question, body: answer }}>
       <Provide {...props} />
     </AskClient>
   );

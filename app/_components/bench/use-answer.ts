@@ -2,7 +2,7 @@
 
 import { useQuery, useQueryClient } from '@tanstack/react-query';
 import { useCallback, useEffect, useRef, useState } from 'react';
-import { type Answer, ask, Declined, type Question, sameQuestion } from './ask';
+import { type Answer, answerKey, ask, Declined, type Question, sameQuestion } from './ask';
 
 /** The hand must rest this long before a question is asked, in milliseconds. */
 const debounce = 250;
@@ -50,7 +50,7 @@ export function useAnswer(question: Question | undefined, lastKey: number): Aske
   const stopped = question !== undefined && sameQuestion(stoppedAt, question);
   const active = question && sameQuestion(rested, question) && !stopped ? question : undefined;
   const query = useQuery({
-    queryKey: active ? [...nothing, active.kind, active.field, active.text] : nothing,
+    queryKey: active ? answerKey(active) : nothing,
     queryFn: ({ signal }) => {
       if (!active) throw new Declined('Nothing is asked.');
       return ask(active, signal);
