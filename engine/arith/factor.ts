@@ -55,7 +55,7 @@ function split(n: bigint, multiplicity: number, found: Map<bigint, number>, budg
 }
 
 /** Up to this length rho alone is quickest; up to the second the quadratic sieve ends in a time worth waiting for. */
-const RHO_BITS = 56;
+const RHO_BITS = 52;
 const SIEVE_BITS = 320;
 
 /** Elliptic curves against factors of about 12, 15, 20, 25, … digits: how long n must be for them, the bound B₁, how many. */
@@ -70,7 +70,7 @@ const stages: readonly { readonly bits: number; readonly bound: number; readonly
 /** A divisor other than 1 and n of a composite n that is no perfect power and has no prime factor below 2^12. */
 function properDivisor(n: bigint, budget: Budget, doing: string): bigint {
   const bits = bitLength(n);
-  let divisor = rho(n, bits <= RHO_BITS ? Number.POSITIVE_INFINITY : 8192, budget, doing);
+  let divisor = rho(n, bits <= RHO_BITS ? Number.POSITIVE_INFINITY : bits < 100 ? 2048 : 8192, budget, doing);
   for (const stage of stages) {
     if (bits < stage.bits) break;
     divisor ??= ellipticCurves(n, stage.bound, stage.curves, budget, doing);

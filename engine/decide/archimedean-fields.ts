@@ -1,4 +1,5 @@
 import type { Budget } from '../arith/budget';
+import { isOddInt } from '../arith/int';
 import type { Expression } from '../expression/expression';
 import { symbol } from '../expression/expression';
 import type { Condition } from '../expression/statement';
@@ -42,11 +43,11 @@ export const realField: DecidableField = {
   normalForm(expression, conditions, budget) {
     const statement = read([expression], conditions, budget);
     const [terms = []] = statement.sides;
-    const rank = evaluate(terms, rankRing, budget).get(0) ?? 0n;
+    const rank = BigInt(evaluate(terms, rankRing, budget).get(0) ?? 0);
     const signatures = evaluate(terms, signatureRing<RationalEntry>((entry) => entry.negative), budget);
     const parts: [number, Expression][] = [...new Set([...signatures.keys(), 0])].map((degree) => [
       degree,
-      constantPart(degree, signatures.get(degree) ?? 0n, rank),
+      constantPart(degree, BigInt(signatures.get(degree) ?? 0), rank),
     ]);
     const size = positive(unit(statement, budget));
     return collect(size === undefined ? parts : [[1, size], ...parts]);
@@ -78,7 +79,7 @@ export const complexField: DecidableField = {
   normalForm(expression, conditions, budget) {
     const statement = read([expression], conditions, budget);
     const [terms = []] = statement.sides;
-    const rank = evaluate(terms, rankRing, budget).get(0) ?? 0n;
+    const rank = BigInt(evaluate(terms, rankRing, budget).get(0) ?? 0);
     const parts: [number, Expression][] = [...parities(terms, budget)]
       .filter(([degree, parity]) => degree < 0 && parity !== 0n)
       .map(([degree]) => [degree, multiple(1n, etaFactors(-degree))]);
@@ -106,7 +107,7 @@ function productFindings(statement: RationalStatement, target: string, budget: B
 /** The rank modulo 2 in every degree. */
 function parities(terms: Terms, budget: Budget): Graded<bigint> {
   const ranks = evaluate(terms, signatureRing<RationalEntry>(() => false), budget);
-  return new Map([...ranks].map(([degree, rank]) => [degree, BigInt.asUintN(1, rank)]));
+  return new Map([...ranks].map(([degree, rank]) => [degree, isOddInt(rank) ? 1n : 0n]));
 }
 
 function unit(statement: RationalStatement, budget: Budget): ReturnType<typeof productValue> {

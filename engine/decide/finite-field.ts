@@ -1,5 +1,5 @@
 import type { Budget } from '../arith/budget';
-import type { Element } from '../expression/element';
+import { addInt, moduloFour, negateInt, xorInt } from '../arith/int';
 import type { Expression } from '../expression/expression';
 import type { FiniteField } from '../field/field';
 import { degreesOf } from '../ring/degrees';
@@ -13,7 +13,7 @@ import { writeResidueClass } from '../ring/write-residue-class';
 import type { DecidableField } from './decidable-field';
 import type { Finding } from './finding';
 import { checkConcreteConditions } from './concrete-conditions';
-import { readUnit } from './read-unit';
+import { unitReader } from './read-unit';
 import { residueReason } from './residue-reason';
 
 const THEOREM =
@@ -27,8 +27,10 @@ const THEOREM =
 export function decidableFiniteField<E>(field: FiniteField<E>): DecidableField {
   const units = fieldUnits(field);
   const ring = residueClassRing(units);
-  const read = (expression: Expression, budget: Budget): readonly Term<ClassedUnit<E>>[] =>
-    lower(expression, (entry: Element) => classedUnit(field, readUnit(entry, field, budget)));
+  const read = (expression: Expression, budget: Budget): readonly Term<ClassedUnit<E>>[] => {
+    const unit = unitReader(field, budget);
+    return lower(expression, (entry) => classedUnit(field, unit(entry)));
+  };
 
   return {
     name: field.name,
@@ -66,7 +68,7 @@ function finding<E>(
     degree,
     same,
     zero: left === undefined && right === undefined,
-    sameModEta: same || degree < 0 || (degree === 0 && (left?.rank ?? 0n) === (right?.rank ?? 0n)),
+    sameModEta: same || degree < 0 || (degree === 0 && (left?.rank ?? 0) === (right?.rank ?? 0)),
     sameModH: same || sameWittClass(field, left, right),
     left: () => writeResidueClass(field, degree, left),
     right: () => writeResidueClass(field, degree, right),
@@ -86,7 +88,8 @@ function sameWittClass<E>(
   left: ResidueClass<E> | undefined,
   right: ResidueClass<E> | undefined,
 ): boolean {
-  const rank = (left?.rank ?? 0n) - (right?.rank ?? 0n);
-  const twist = (rank & 2n) === 2n ? fieldUnits(field).classOfMinusOne : 0n;
-  return (rank & 1n) === 0n && ((left?.squareClass ?? 0n) ^ (right?.squareClass ?? 0n) ^ twist) === 0n;
+  const rank = moduloFour(addInt(left?.rank ?? 0, negateInt(right?.rank ?? 0)));
+  const twist = rank === 2 ? fieldUnits(field).classOfMinusOne : 0;
+  const squareClass = xorInt(left?.squareClass ?? 0, right?.squareClass ?? 0);
+  return rank % 2 === 0 && xorInt(squareClass, twist) === 0;
 }

@@ -1,17 +1,16 @@
 import type { Budget } from '../arith/budget';
+import type { Int } from '../arith/int';
 import { integerElement, negateElement, type Element } from '../expression/element';
 import { angle, integer, product, symbol, type Expression } from '../expression/expression';
 import type { Condition } from '../expression/statement';
-import { primeField } from '../field/prime-field';
 import { rationals } from '../field/rational';
-import { localSquares } from '../place/local-squares';
+import { localSquares, orderAt } from '../place/local-squares';
 import type { RationalEntry } from '../place/rational-entry';
-import { quadraticClass, unitModulo } from '../place/rational-place';
-import { thetaRing, type LocalEntry } from '../place/theta-ring';
-import { valuation } from '../arith/valuation';
+import { primeResidueField } from '../place/prime-residue-field';
+import { primePlace } from '../place/rational-place';
+import { thetaRing } from '../place/theta-ring';
 import { degreesOf } from '../ring/degrees';
 import { evaluate } from '../ring/evaluate';
-import { fieldUnits } from '../ring/field-units';
 import { localInvariants, localWittRing, type LocalInvariants, type WittVector } from '../ring/local-witt-ring';
 import type { ResidueClass } from '../ring/residue-class-ring';
 import { rankRing } from '../ring/signature-ring';
@@ -43,14 +42,15 @@ const integerOf = (n: bigint): Element => (n < 0n ? negateElement(integerElement
 export function padicField(p: bigint): DecidableField {
   const squares = localSquares(p);
   const ring = localWittRing<RationalEntry>(squares, (entry) => squares.classOf(entry.value));
-  const tame = thetaRing<RationalEntry, bigint>(fieldUnits(primeField(p)), (entry) => localEntry(entry, p));
+  const place = primePlace(p);
+  const tame = thetaRing<RationalEntry, Int>(place.units, (entry) => place.local(entry, orderAt(entry.value, p)));
   const nonResidue = squares.representatives[1] ?? 1n;
   const rho = p === 2n ? [minusOneElement, minusOneElement] : [integerElement(p), integerElement(nonResidue)];
   const tex = `\\mathbb{Q}_{${p}}`;
 
   const invariants = (vector: WittVector | undefined): LocalInvariants =>
     localInvariants(squares, vector ?? new Array<number>(squares.size).fill(0));
-  const tameSymbols = (terms: Terms, budget: Budget): ResidueClass<bigint> | undefined =>
+  const tameSymbols = (terms: Terms, budget: Budget): ResidueClass<Int> | undefined =>
     p === 2n ? undefined : evaluate(terms, tame, budget).get(2)?.d;
   const square = (c: number): Element => integerOf(squares.representatives[c] ?? 1n);
 
@@ -77,7 +77,7 @@ export function padicField(p: bigint): DecidableField {
       const statement = read([expression], conditions, budget);
       const [terms = []] = statement.sides;
       const witt = evaluate(terms, ring, budget);
-      const rank = evaluate(terms, rankRing, budget).get(0) ?? 0n;
+      const rank = BigInt(evaluate(terms, rankRing, budget).get(0) ?? 0);
       return degreesOf(terms)
         .map((degree): NormalizedDegree => {
           const value = witt.get(degree) ?? [];
@@ -117,15 +117,15 @@ export function padicField(p: bigint): DecidableField {
     return findings.map((found) => ({ ...found, place: p.toString() }));
   }
 
-  function tameFinding(left: ResidueClass<bigint> | undefined, right: ResidueClass<bigint> | undefined): Finding {
-    const write = (x: ResidueClass<bigint> | undefined): Expression => writeResidueClass(primeField(p), 1, x);
+  function tameFinding(left: ResidueClass<Int> | undefined, right: ResidueClass<Int> | undefined): Finding {
+    const write = (x: ResidueClass<Int> | undefined): Expression => writeResidueClass(primeResidueField(p), 1, x);
     const same = left?.unit === right?.unit;
-    const sameModH = same || (left?.squareClass ?? 0n) === (right?.squareClass ?? 0n);
+    const sameModH = same || (left?.squareClass ?? 0) === (right?.squareClass ?? 0);
     return { ...pairFinding('residue', 2, write(left), write(right), `\\mathbb{F}_{${p}}^{\\times}`, same, sameModH), place: p.toString() };
   }
 
-  function degreeTwo(tameSymbol: ResidueClass<bigint> | undefined, value: WittVector): Expression {
-    if (p !== 2n) return writeResidueClass(primeField(p), 1, tameSymbol, [symbol([integerElement(p)])]);
+  function degreeTwo(tameSymbol: ResidueClass<Int> | undefined, value: WittVector): Expression {
+    if (p !== 2n) return writeResidueClass(primeResidueField(p), 1, tameSymbol, [symbol([integerElement(p)])]);
     return invariants(value.length === 0 ? undefined : value).hasse === 1 ? product(rho.map((a) => symbol([a]))) : total([]);
   }
 
@@ -168,12 +168,6 @@ const THEOREM =
 function read(expressions: readonly Expression[], conditions: readonly Condition[], budget: Budget): RationalStatement {
   checkConcreteConditions(rationals, conditions, budget);
   return rationalStatement(expressions, budget);
-}
-
-function localEntry({ value }: RationalEntry, p: bigint): LocalEntry<bigint> {
-  const order = BigInt(valuation(value.num, p).exponent - valuation(value.den, p).exponent);
-  const unit = unitModulo(value, p, order);
-  return { valuation: order, unit, squareClass: quadraticClass(unit, p) };
 }
 
 function pairFinding(

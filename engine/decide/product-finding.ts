@@ -1,5 +1,6 @@
 import type { Budget } from '../arith/budget';
 import { bitLength } from '../arith/bits';
+import { negateInt } from '../arith/int';
 import { integerElement } from '../expression/element';
 import { symbol, type Expression } from '../expression/expression';
 import { Refusal } from '../expression/refusal';
@@ -51,8 +52,8 @@ export function productFinding(statement: RationalStatement, target: string, bud
 function writeProduct(base: readonly BaseElement[], value: ProductClass | undefined): Expression {
   if (value === undefined || value.kind === 'integer') return total([]);
   if (sizeOf(base, value) <= WRITTEN_BITS) return symbol([rationals.write(productValue(base, value))]);
-  const words = [...value.exponents].map(([i, e]) => multiple(e, [symbol([integerElement(base[i]?.value ?? 1n)])]));
-  return total(value.sign === 0n ? words : [...symbolFactors(minusOneElement, 1), ...words]);
+  const words = [...value.exponents].map(([i, e]) => multiple(BigInt(e), [symbol([integerElement(base[i]?.value ?? 1n)])]));
+  return total(value.sign === 0 ? words : [...symbolFactors(minusOneElement, 1), ...words]);
 }
 
 /** The rational number a class of K^M_1 stands for; refused when it is too long to write. */
@@ -60,11 +61,11 @@ export function productValue(base: readonly BaseElement[], value: ProductClass |
   if (value === undefined || value.kind === 'integer') return rationals.one;
   if (sizeOf(base, value) > LARGEST_BITS)
     throw new Refusal('size', 'The product of the entries has more than 100 000 digits. Use smaller coefficients.');
-  let [num, den] = [value.sign === 0n ? 1n : -1n, 1n];
+  let [num, den] = [value.sign === 0 ? 1n : -1n, 1n];
   for (const [i, e] of value.exponents) {
     const b = base[i]?.value ?? 1n;
-    if (e > 0n) num *= b ** e;
-    else den *= b ** -e;
+    if (e > 0) num *= b ** BigInt(e);
+    else den *= b ** BigInt(negateInt(e));
   }
   return { num, den };
 }
@@ -72,6 +73,6 @@ export function productValue(base: readonly BaseElement[], value: ProductClass |
 /** An upper bound for the binary digits of the product, to compare with the limits above. */
 function sizeOf(base: readonly BaseElement[], value: ProductClass & { kind: 'unit' }): bigint {
   let bits = 0n;
-  for (const [i, e] of value.exponents) bits += (e < 0n ? -e : e) * BigInt(bitLength(base[i]?.value ?? 1n));
+  for (const [i, e] of value.exponents) bits += BigInt(e < 0 ? negateInt(e) : e) * BigInt(bitLength(base[i]?.value ?? 1n));
   return bits;
 }

@@ -1,7 +1,8 @@
 import type { Budget } from '../arith/budget';
 import { integerElement } from '../expression/element';
+import { moduloFour, xorInt, type Int } from '../arith/int';
 import { eta, power, type Expression } from '../expression/expression';
-import { primeField } from '../field/prime-field';
+import { primeResidueField } from '../place/prime-residue-field';
 import { rationalPlace, unsplitZeroTest, type ZeroTest } from '../place/rational-place';
 import type { RationalEntry } from '../place/rational-entry';
 import type { Splitting } from '../place/sight';
@@ -59,7 +60,7 @@ const isUnknownModH = (finding: Finding): boolean => 'outcomeModH' in finding &&
 function residueFindings({ base, terms }: Incidence, budget: Budget): readonly ResidueFinding[] {
   return base.flatMap(({ value: b, prime }, index) => {
     const { units, local } = rationalPlace(base, index);
-    const ring: GradedRing<RationalEntry, Theta<bigint>> = thetaRing(units, local);
+    const ring: GradedRing<RationalEntry, Theta<Int>> = thetaRing(units, local);
     const kappa = residueClassRing(units);
     const sides = terms[index] ?? [];
     const [left, right] = both(sides, ring, budget);
@@ -102,27 +103,27 @@ function residueFindings({ base, terms }: Incidence, budget: Budget): readonly R
 }
 
 /** Whether a class of K^MW_m of a residue field is zero in Milnor K-theory. */
-const zeroModEta = (degree: number, x: ResidueClass<bigint> | undefined): boolean =>
-  x === undefined || (x.unit === undefined && (degree < 0 || x.rank === 0n));
+const zeroModEta = (degree: number, x: ResidueClass<Int> | undefined): boolean =>
+  x === undefined || (x.unit === undefined && (degree < 0 || x.rank === 0));
 
 /** Whether a class of K^MW_m of a residue field is zero in the Witt ring: even rank and trivial signed discriminant. */
-function zeroModH(x: ResidueClass<bigint> | undefined, classOfMinusOne: bigint): 'zero' | 'nonzero' {
+function zeroModH(x: ResidueClass<Int> | undefined, classOfMinusOne: Int): 'zero' | 'nonzero' {
   if (x === undefined) return 'zero';
-  const signed = x.squareClass ^ ((x.rank & 2n) === 2n ? classOfMinusOne : 0n);
-  return (x.rank & 1n) === 0n && signed === 0n ? 'zero' : 'nonzero';
+  const rank = moduloFour(x.rank);
+  return rank % 2 === 0 && xorInt(x.squareClass, rank === 2 ? classOfMinusOne : 0) === 0 ? 'zero' : 'nonzero';
 }
 
 const writeAtPrime =
   (p: bigint) =>
-  (degree: number, x: ResidueClass<bigint> | undefined): Expression =>
-    writeResidueClass(primeField(p), degree, x);
+  (degree: number, x: ResidueClass<Int> | undefined): Expression =>
+    writeResidueClass(primeResidueField(p), degree, x);
 
 /** A residue at an unsplit composite: rank and a discriminant that is only known as a product. */
-function writeUnsplit(degree: number, x: ResidueClass<bigint> | undefined): Expression {
+function writeUnsplit(degree: number, x: ResidueClass<Int> | undefined): Expression {
   if (x === undefined) return zeroExpression;
-  if (x.unit !== undefined) return multiple(1n, [{ kind: 'symbol', entries: [integerElement(x.unit)] }]);
+  if (x.unit !== undefined) return multiple(1n, [{ kind: 'symbol', entries: [integerElement(BigInt(x.unit))] }]);
   const etas = degree === 0 ? [] : [degree === -1 ? eta() : power(eta(), -degree)];
-  return x.rank === 0n ? zeroExpression : multiple(x.rank, etas);
+  return x.rank === 0 ? zeroExpression : multiple(BigInt(x.rank), etas);
 }
 
 function residueGroup(degree: number, b: bigint, prime: boolean): string {

@@ -1,8 +1,9 @@
 import type { Budget } from '../arith/budget';
 import { factor } from '../arith/factor';
+import { toInt } from '../arith/int';
 import { integerElement } from '../expression/element';
 import { symbol, type Expression } from '../expression/expression';
-import { primeField } from '../field/prime-field';
+import { primeResidueField } from '../place/prime-residue-field';
 import type { RationalEntry } from '../place/rational-entry';
 import { rationalPlace } from '../place/rational-place';
 import type { BaseElement } from '../place/sight';
@@ -35,9 +36,9 @@ export function rationalNormalForm(statement: RationalStatement, budget: Budget)
   };
   for (const [degree, word] of tower(statement, budget)) put(degree, word);
   const [terms = []] = statement.sides;
-  const rank = evaluate(terms, rankRing, budget).get(0) ?? 0n;
+  const rank = BigInt(evaluate(terms, rankRing, budget).get(0) ?? 0);
   const signatures = evaluate(terms, signatureRing<RationalEntry>((entry) => entry.negative), budget);
-  for (const degree of new Set([...signatures.keys(), 0])) put(degree, constantPart(degree, signatures.get(degree) ?? 0n, rank));
+  for (const degree of new Set([...signatures.keys(), 0])) put(degree, constantPart(degree, BigInt(signatures.get(degree) ?? 0), rank));
   return [...parts]
     .sort(([a], [b]) => b - a)
     .map(([degree, words]) => ({ degree, normalForm: total(words.reverse()), canonical: true }));
@@ -78,7 +79,7 @@ function* tower(statement: RationalStatement, budget: Budget): Generator<readonl
   const entryOf = (n: bigint): RationalEntry => {
     const known = entries.get(n);
     if (known !== undefined) return known;
-    const exponents = new Map(factor(n, budget).map(({ prime, exponent }) => [indexOfPrime(prime), BigInt(exponent)]));
+    const exponents = new Map(factor(n, budget).map(({ prime, exponent }) => [indexOfPrime(prime), exponent]));
     const entry: RationalEntry = { value: { num: n, den: 1n }, negative: false, at: undefined, exponents };
     entries.set(n, entry);
     return entry;
@@ -87,7 +88,7 @@ function* tower(statement: RationalStatement, budget: Budget): Generator<readonl
   for (let p = queue.pop(); p !== undefined; p = queue.pop()) {
     budget.spend('building the tower of residues');
     const index = indexOfPrime(p);
-    const field = primeField(p);
+    const field = primeResidueField(p);
     const { units, local } = rationalPlace(base, index);
     const residues = evaluate(pending[index] ?? [], thetaRing(units, local), budget);
     for (const [degree, { d }] of residues) {
@@ -97,9 +98,9 @@ function* tower(statement: RationalStatement, budget: Budget): Generator<readonl
       for (const word of residueWords(degree - 1, d, { nonSquare: field.nonSquare, orderModFour: orderModFour(field) })) {
         const lift = word.symbol ?? word.angle;
         if (lift === undefined) continue; // [p]ηᵏ ramifies at p only
-        const entry = entryOf(lift);
+        const entry = entryOf(BigInt(lift));
         const term: Term<RationalEntry> = {
-          coefficient: -word.coefficient,
+          coefficient: toInt(-word.coefficient),
           eta: word.eta,
           angles: word.angle === undefined ? [] : [entry],
           factors: [

@@ -1,11 +1,12 @@
 import type { Budget } from '../arith/budget';
+import { toInt, type Int } from '../arith/int';
 import { isPrime } from '../arith/prime';
 import { integerElement, type Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import { Refusal } from '../expression/refusal';
 import { elementText } from '../expression/to-text';
-import { primeField } from '../field/prime-field';
 import { rationals, type Rational } from '../field/rational';
+import { primeResidueField } from '../place/prime-residue-field';
 import type { RationalEntry } from '../place/rational-entry';
 import { quadraticClass, rationalPlace, unitModulo } from '../place/rational-place';
 import { thetaRing, type LocalEntry, type Theta } from '../place/theta-ring';
@@ -18,7 +19,7 @@ import { writeResidueClass } from '../ring/write-residue-class';
 import { total } from '../ring/write-word';
 import type { Residue, ResiduesOutcome } from './outcome';
 import { incidence, rationalStatement } from './rational-statement';
-import { readUnit } from './read-unit';
+import { unitReader } from './read-unit';
 
 /**
  * Residue and specialisation of a class of K^MW_*(ℚ) at primes: at those asked for, or at every prime where it ramifies.
@@ -56,8 +57,8 @@ export function rationalResidues(
   return { residues, unramifiedElsewhere: true };
 }
 
-function describe(p: bigint, value: Graded<Theta<bigint>>, uniformizer: Element, topDegree: number): Residue {
-  const field = primeField(p);
+function describe(p: bigint, value: Graded<Theta<Int>>, uniformizer: Element, topDegree: number): Residue {
+  const field = primeResidueField(p);
   const degrees = [...value.keys()].sort((a, b) => b - a);
   const ramified = degrees.filter((degree) => value.get(degree)?.d !== undefined);
   return {
@@ -75,12 +76,12 @@ function describe(p: bigint, value: Graded<Theta<bigint>>, uniformizer: Element,
 function against(
   parameter: Rational,
   p: bigint,
-  local: (entry: RationalEntry) => LocalEntry<bigint>,
-): (entry: RationalEntry) => LocalEntry<bigint> {
-  const w = unitModulo(parameter, p, 1n);
+  local: (entry: RationalEntry) => LocalEntry<Int>,
+): (entry: RationalEntry) => LocalEntry<Int> {
+  const w = BigInt(unitModulo(parameter, p, 1));
   return (entry) => {
     const { valuation: n, unit } = local(entry);
-    const changed = n === 0n ? unit : (unit * powerModulo(w, -n, p)) % p;
+    const changed = n === 0 ? unit : toInt((BigInt(unit) * powerModulo(w, -BigInt(n), p)) % p);
     return { valuation: n, unit: changed, squareClass: quadraticClass(changed, p) };
   };
 }
@@ -100,7 +101,7 @@ function readUniformizer(element: Element, asked: readonly bigint[] | undefined,
   const [p] = asked ?? [];
   if (p === undefined || new Set(asked).size !== 1)
     throw new Refusal('uniformizer', 'A uniformizer goes with exactly one place. Name that place in places.', element.at);
-  const value = readUnit(element, rationals, budget);
+  const value = unitReader(rationals, budget)(element);
   const order = valuation(value.num, p).exponent - valuation(value.den, p).exponent;
   if (order !== 1)
     throw new Refusal(

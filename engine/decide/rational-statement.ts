@@ -4,8 +4,8 @@ import { rationals } from '../field/rational';
 import { rationalEntries, type RationalEntry } from '../place/rational-entry';
 import { see, type BaseElement, type Splitting } from '../place/sight';
 import { lower } from '../ring/lower';
-import { entriesOf, type Term } from '../ring/term';
-import { readUnit } from './read-unit';
+import { forEachEntry, type Term } from '../ring/term';
+import { unitReader } from './read-unit';
 
 /** Words with rational entries in kernel form, and all entries that occur in them. */
 export interface RationalStatement {
@@ -16,9 +16,8 @@ export interface RationalStatement {
 /** Reads the entries of expressions as non-zero rationals. */
 export function rationalStatement(expressions: readonly Expression[], budget: Budget): RationalStatement {
   const entries = rationalEntries();
-  const sides = expressions.map((side) =>
-    lower(side, (entry) => entries.intern(readUnit(entry, rationals, budget), entry.at)),
-  );
+  const read = unitReader(rationals, budget);
+  const sides = expressions.map((side) => lower(side, (entry) => entries.intern(read(entry), entry.at)));
   return { sides, entries: entries.all() };
 }
 
@@ -35,9 +34,12 @@ export function incidence({ sides, entries }: RationalStatement, split: Splittin
   const terms: Term<RationalEntry>[][][] = base.map(() => sides.map(() => []));
   sides.forEach((side, s) => {
     for (const term of side) {
-      const seen = new Set<number>();
-      for (const entry of entriesOf(term)) for (const index of entry.exponents.keys()) seen.add(index);
-      for (const index of seen) terms[index]?.[s]?.push(term);
+      forEachEntry(term, (entry) => {
+        for (const index of entry.exponents.keys()) {
+          const here = terms[index]?.[s];
+          if (here !== undefined && here[here.length - 1] !== term) here.push(term);
+        }
+      });
     }
   });
   return { base, terms };

@@ -3,13 +3,16 @@ import type { Element } from '../expression/element';
 import { Refusal } from '../expression/refusal';
 import { elementText } from '../expression/to-text';
 import type { Field } from '../field/field';
-import { readElement } from '../field/read-element';
+import { elementReader } from '../field/read-element';
 
-/** The value of an entry in a field; an entry that is zero there is refused. */
-export function readUnit<E>(entry: Element, field: Field<E>, budget: Budget): E {
-  const value = readElement(entry, field, budget);
-  if (field.isZero(value)) throw notAUnit(entry, field.name);
-  return value;
+/** Reads entries in a field; an entry that is zero there is refused. */
+export function unitReader<E>(field: Field<E>, budget: Budget): (entry: Element) => E {
+  const read = elementReader(field, budget);
+  return (entry) => {
+    const value = read(entry);
+    if (field.isZero(value)) throw notAUnit(entry, field.name);
+    return value;
+  };
 }
 
 /** The refusal of an entry that is zero. */

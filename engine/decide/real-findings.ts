@@ -16,7 +16,7 @@ export function realFindings<A extends { readonly negative: boolean }>(
   const ring = signatureRing<A>((entry) => entry.negative);
   const [l, r] = [evaluate(left, ring, budget), evaluate(right, ring, budget)];
   return degreesOf([...left, ...right]).flatMap((degree): readonly Finding[] => {
-    const values = [l.get(degree) ?? 0n, r.get(degree) ?? 0n] as const;
+    const values = [BigInt(l.get(degree) ?? 0), BigInt(r.get(degree) ?? 0)] as const;
     // in degree n ≥ 1 the signature is a multiple of 2ⁿ, and Milnor K-theory sees that multiple modulo 2
     const sameModEta = degree < 1 || (values[0] - values[1]) % 2n ** BigInt(degree + 1) === 0n;
     const signature = integerFinding('signature', degree, values, sameModEta, values[0] === values[1]);
@@ -26,7 +26,7 @@ export function realFindings<A extends { readonly negative: boolean }>(
 
 /** The ranks of the parts of degree 0. */
 export function rankFinding<A>(left: readonly Term<A>[], right: readonly Term<A>[], budget: Budget): Finding {
-  const rank = (terms: readonly Term<A>[]): bigint => evaluate(terms, rankRing, budget).get(0) ?? 0n;
+  const rank = (terms: readonly Term<A>[]): bigint => BigInt(evaluate(terms, rankRing, budget).get(0) ?? 0);
   const values = [rank(left), rank(right)] as const;
   return integerFinding('rank', 0, values, values[0] === values[1], (values[0] - values[1]) % 2n === 0n);
 }

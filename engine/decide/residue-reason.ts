@@ -7,7 +7,7 @@ export function residueReason(
   right: ResidueClass<unknown> | undefined,
   where: string,
 ): string {
-  const [l, r] = [left?.rank ?? 0n, right?.rank ?? 0n];
+  const [l, r] = [left?.rank ?? 0, right?.rank ?? 0];
   if (degree === 1) return `The two units differ ${where}.`;
   if (degree === 0 && l !== r) return `The ranks are ${l} and ${r}.`;
   if (degree === 0) return `Both have rank ${l}, but their discriminants differ by a non-square ${where}.`;

@@ -16,6 +16,11 @@ const SIZE_LIMIT = 332193;
  * a negative exponent) and `size` (more than 10^5 digits; a power is measured before it is computed).
  */
 export function readElement<E>(element: Element, field: Field<E>, budget: Budget = unlimited): E {
+  return elementReader(field, budget)(element);
+}
+
+/** `readElement` for many elements of one field. */
+export function elementReader<E>(field: Field<E>, budget: Budget): (element: Element) => E {
   const guarded = (value: E, at: Span | undefined): E => {
     if (field.size !== undefined && field.size(value) > SIZE_LIMIT) throw tooLarge(at);
     return value;
@@ -64,7 +69,7 @@ export function readElement<E>(element: Element, field: Field<E>, budget: Budget
       }
     }
   };
-  return value(element);
+  return value;
 }
 
 const tooLarge = (at: Span | undefined): Refusal =>

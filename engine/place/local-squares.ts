@@ -2,7 +2,7 @@ import { jacobi } from '../arith/jacobi';
 import { valuation } from '../arith/valuation';
 import type { Rational } from '../field/rational';
 import type { SquareClasses } from '../ring/local-witt-ring';
-import { unitModulo } from './rational-place';
+import { quadraticClass, unitModulo } from './rational-place';
 
 /** The square classes of ℚ_p with their representatives, and the class of a rational number. */
 export interface LocalSquares extends SquareClasses {
@@ -24,7 +24,8 @@ export function localSquares(p: bigint): LocalSquares {
 
 const bit = (mask: number, i: number): number => (mask >> i) & 1;
 
-const orderAt = (a: Rational, p: bigint): number => valuation(a.num, p).exponent - valuation(a.den, p).exponent;
+/** The valuation of a ≠ 0 at p. */
+export const orderAt = (a: Rational, p: bigint): number => valuation(a.num, p).exponent - valuation(a.den, p).exponent;
 
 function oddSquares(p: bigint): LocalSquares {
   let s = 2n;
@@ -36,7 +37,7 @@ function oddSquares(p: bigint): LocalSquares {
     representatives: [1n, s, p, s * p],
     classOf(a) {
       const order = orderAt(a, p);
-      return (jacobi(unitModulo(a, p, BigInt(order)), p) === 1 ? 0 : 1) | ((order & 1) << 1);
+      return (quadraticClass(unitModulo(a, p, order), p)) | ((order & 1) << 1);
     },
     hilbert: (a, b) =>
       ((bit(a, 1) & bit(b, 1) & minusOne) ^ (bit(a, 0) & bit(b, 1)) ^ (bit(b, 0) & bit(a, 1))) === 1 ? 1 : 0,

@@ -1,3 +1,4 @@
+import type { Int } from '../arith/int';
 import type { Span } from '../expression/span';
 import type { Rational } from '../field/rational';
 
@@ -10,22 +11,25 @@ export interface RationalEntry {
   readonly negative: boolean;
   /** Where the entry stands first. */
   readonly at: Span | undefined;
-  exponents: ReadonlyMap<number, bigint>;
+  exponents: ReadonlyMap<number, Int>;
 }
 
 /** Makes entries from rationals, one object for each value. */
 export function rationalEntries(): { intern(value: Rational, at?: Span): RationalEntry; all(): readonly RationalEntry[] } {
-  const entries = new Map<string, RationalEntry>();
+  const all: RationalEntry[] = [];
+  const byDenominator = new Map<bigint, Map<bigint, RationalEntry>>();
   return {
     intern(value, at) {
-      const key = value.den === 1n ? value.num.toString(36) : `${value.num.toString(36)}/${value.den.toString(36)}`;
-      let entry = entries.get(key);
+      let byNumerator = byDenominator.get(value.den);
+      if (byNumerator === undefined) byDenominator.set(value.den, (byNumerator = new Map()));
+      let entry = byNumerator.get(value.num);
       if (entry === undefined) {
         entry = { value, negative: value.num < 0n, at, exponents: new Map() };
-        entries.set(key, entry);
+        byNumerator.set(value.num, entry);
+        all.push(entry);
       }
       return entry;
     },
-    all: () => [...entries.values()],
+    all: () => all,
   };
 }

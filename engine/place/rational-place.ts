@@ -1,7 +1,8 @@
+import { EXACT, bitLength } from '../arith/bits';
 import { gcd } from '../arith/gcd';
-import { bitLength } from '../arith/bits';
-import { jacobi } from '../arith/jacobi';
-import { inverseModulo, modulo, powerModulo } from '../arith/modular';
+import { isOddInt, moduloFour, toInt, type Int } from '../arith/int';
+import { jacobi, smallJacobi } from '../arith/jacobi';
+import { inverseModulo, modulo, powerModulo, smallInverse, smallPower } from '../arith/modular';
 import { TRIAL_BOUND } from '../arith/small-primes';
 import { primeField } from '../field/prime-field';
 import type { Rational } from '../field/rational';
@@ -13,58 +14,111 @@ import type { LocalEntry } from './theta-ring';
 
 /** How entries look at one element of the base: the units of the residue ring, and every entry as πⁿu. */
 export interface RationalPlace {
-  readonly units: UnitGroup<bigint>;
-  local(entry: RationalEntry): LocalEntry<bigint>;
+  readonly units: UnitGroup<Int>;
+  local(entry: RationalEntry): LocalEntry<Int>;
 }
+
+/** Below this a product of two residues is exact as a number. */
+const SMALL_PRIME = 1n << 26n;
 
 /** The place of the base element with this index: a prime of ℚ, or all primes that divide an unsplit composite. */
 export function rationalPlace(base: readonly BaseElement[], index: number): RationalPlace {
   const element = base[index];
   if (element === undefined) throw new RangeError('no such element of the base');
-  const b = element.value;
-  const units = element.prime ? fieldUnits(primeField(b)) : unsplitUnits(b);
+  const at = element.prime ? primePlace(element.value) : unsplitPlace(element.value, index);
+  return { units: at.units, local: (entry) => at.local(entry, entry.exponents.get(index) ?? 0) };
+}
+
+interface Place {
+  readonly units: UnitGroup<Int>;
+  local(entry: RationalEntry, valuation: Int): LocalEntry<Int>;
+}
+
+/** The place at a prime p; units are numbers if p < 2^26. */
+export function primePlace(p: bigint): Place {
+  const units = p < SMALL_PRIME ? smallUnits(Number(p)) : largeUnits(p);
   return {
     units,
-    local(entry) {
-      const valuation = entry.exponents.get(index) ?? 0n;
-      const unit = unitModulo(entry.value, b, valuation);
-      const squareClass = element.prime ? quadraticClass(unit, b) : formalClass(entry, index);
-      return { valuation, unit, squareClass };
+    local({ value }, valuation) {
+      const unit = unitModulo(value, p, valuation);
+      return { valuation, unit, squareClass: quadraticClass(unit, p) };
     },
   };
 }
 
-/** 0 for a square modulo the prime p, 1 for a non-square; every unit is a square modulo 2. */
-export const quadraticClass = (unit: bigint, p: bigint): bigint => (p === 2n || jacobi(unit, p) === 1 ? 0n : 1n);
-
-/** The residue modulo b of a / b^valuation, for b prime to what is left. */
-export function unitModulo({ num, den }: Rational, b: bigint, valuation: bigint): bigint {
-  const top = valuation > 0n ? num / b ** valuation : num;
-  const bottom = valuation < 0n ? den / b ** -valuation : den;
-  const residue = modulo(top, b);
-  return bottom === 1n ? residue : (residue * inverseModulo(bottom, b)) % b;
-}
-
-/**
- * The units modulo a composite b whose primes are not known. Square classes are formal: bit 0 stands for −1 and bit i + 1 for
- * the i-th element of the base, so that a mask of 0 is a square modulo every prime, whichever they are.
- */
-function unsplitUnits(b: bigint): UnitGroup<bigint> {
+function smallUnits(p: number): UnitGroup<Int> {
+  const number = (a: Int): number => Number(a);
+  const minusOne = p - 1;
   return {
-    one: 1n,
-    multiply: (x, y) => (x * y) % b,
-    power: (x, n) => powerModulo(x, n, b),
-    equal: (x, y) => x === y,
-    minusOne: b - 1n,
-    classOfMinusOne: 1n,
-    orderModFour: undefined,
+    one: 1,
+    multiply: (a, b) => (number(a) * number(b)) % p,
+    power: (a, n) =>
+      n === 1
+        ? a
+        : n === -1
+          ? smallInverse(number(a), p)
+          : smallPower(n < 0 ? smallInverse(number(a), p) : number(a), n < 0 ? -BigInt(n) : BigInt(n), p),
+    equal: (a, b) => a === b,
+    minusOne,
+    classOfMinusOne: p % 4 === 3 ? 1 : 0,
+    orderModFour: p === 2 ? 2 : p % 4 === 1 ? 1 : 3,
   };
 }
 
-function formalClass(entry: RationalEntry, index: number): bigint {
-  let mask = entry.negative ? 1n : 0n;
-  for (const [i, e] of entry.exponents) if (i !== index && (e & 1n) === 1n) mask |= 1n << BigInt(i + 1);
-  return mask;
+function largeUnits(p: bigint): UnitGroup<Int> {
+  const units = fieldUnits(primeField(p));
+  return {
+    ...units,
+    one: 1,
+    multiply: (a, b) => toInt(units.multiply(BigInt(a), BigInt(b))),
+    power: (a, n) => toInt(units.power(BigInt(a), n)),
+    equal: (a, b) => a === b,
+    minusOne: toInt(units.minusOne),
+  };
+}
+
+/** 0 for a square modulo the prime p, 1 for a non-square; every unit is a square modulo 2. */
+export function quadraticClass(unit: Int, p: bigint): 0 | 1 {
+  if (p === 2n) return 0;
+  const symbol = typeof unit === 'number' && p < EXACT ? smallJacobi(unit, Number(p)) : jacobi(BigInt(unit), p);
+  return symbol === 1 ? 0 : 1;
+}
+
+/** The residue modulo b of a / b^valuation, for b prime to what is left. */
+export function unitModulo({ num, den }: Rational, b: bigint, valuation: Int): Int {
+  const top = valuation > 0 ? num / b ** BigInt(valuation) : num;
+  const bottom = valuation < 0 ? den / b ** -BigInt(valuation) : den;
+  if (b < SMALL_PRIME) {
+    const p = Number(b);
+    const remainder = Number(top % b);
+    const residue = remainder < 0 ? remainder + p : remainder;
+    return bottom === 1n ? residue : (residue * smallInverse(Number(bottom % b), p)) % p;
+  }
+  const residue = modulo(top, b);
+  return toInt(bottom === 1n ? residue : (residue * inverseModulo(bottom, b)) % b);
+}
+
+/**
+ * The place at all primes that divide a composite b, none of which is known. Square classes are formal: bit 0 stands for −1 and
+ * bit i + 1 for the i-th element of the base, so that a mask of 0 is a square modulo every prime, whichever they are.
+ */
+function unsplitPlace(b: bigint, index: number): Place {
+  return {
+    units: {
+      one: 1,
+      multiply: (x, y) => toInt((BigInt(x) * BigInt(y)) % b),
+      power: (x, n) => toInt(powerModulo(BigInt(x), BigInt(n), b)),
+      equal: (x, y) => x === y,
+      minusOne: toInt(b - 1n),
+      classOfMinusOne: 1,
+      orderModFour: undefined,
+    },
+    local(entry, valuation) {
+      let mask = entry.negative ? 1n : 0n;
+      for (const [i, e] of entry.exponents) if (i !== index && isOddInt(e)) mask |= 1n << BigInt(i + 1);
+      return { valuation, unit: unitModulo(entry.value, b, valuation), squareClass: toInt(mask) };
+    },
+  };
 }
 
 export type ZeroTest = 'zero' | 'nonzero' | 'unknown';
@@ -83,20 +137,20 @@ export function unsplitZeroTest(
   base: readonly BaseElement[],
   b: bigint,
   degree: number,
-  x: ResidueClass<bigint> | undefined,
+  x: ResidueClass<Int> | undefined,
 ): ZeroTest {
   if (x === undefined) return 'zero';
   if (x.unit !== undefined) {
     const trialBits = bitLength(BigInt(TRIAL_BOUND)) - 1;
     let power = 1n;
     for (let bits = bitLength(b); bits > 0; bits -= trialBits) {
-      power = (power * x.unit) % b;
+      power = (power * BigInt(x.unit)) % b;
       if (gcd(power - 1n, b) !== 1n) return 'unknown';
     }
     return 'nonzero';
   }
-  if (degree === 0 ? x.rank !== 0n : (x.rank & 1n) === 1n) return 'nonzero';
-  const mask = degree < 0 && (x.rank & 2n) === 2n ? x.squareClass ^ 1n : x.squareClass;
+  if (degree === 0 ? x.rank !== 0 : isOddInt(x.rank)) return 'nonzero';
+  const mask = BigInt(x.squareClass) ^ (degree < 0 && moduloFour(x.rank) === 2 ? 1n : 0n);
   if (mask === 0n) return 'zero';
   let unit = (mask & 1n) === 1n ? b - 1n : 1n;
   base.forEach(({ value }, i) => {

@@ -1,9 +1,11 @@
+import { EXACT } from '../arith/bits';
 import type { Budget } from '../arith/budget';
 import { coprimeBase } from '../arith/coprime-base';
 import { factor } from '../arith/factor';
+import { toInt, type Int } from '../arith/int';
 import { perfectPower } from '../arith/perfect-power';
 import { isPrime } from '../arith/prime';
-import { smallPrimeDivisors, TRIAL_BOUND } from '../arith/small-primes';
+import { smallPrimeDivisors, smallPrimes, TRIAL_BOUND } from '../arith/small-primes';
 import { valuation } from '../arith/valuation';
 import { Refusal } from '../expression/refusal';
 import type { RationalEntry } from './rational-entry';
@@ -20,6 +22,12 @@ const SPLIT_AT_ONCE = 1n << 60n;
 /** Which of the large composites to split into primes. */
 export type Splitting = 'none' | 'all' | ReadonlySet<bigint>;
 
+/** A positive integer as far as it is taken apart at little cost: primes with exponents, and a composite without small factors. */
+interface Stripped {
+  readonly factors: readonly (readonly [prime: Int, exponent: number])[];
+  readonly rest: bigint;
+}
+
 /**
  * The primes in sight: a coprime base of the numerators and denominators of all entries, ascending, in which every element
  * below 2^60 is prime and no element is a perfect power. Larger composites are split only if `split` says so, for equality
@@ -28,70 +36,88 @@ export type Splitting = 'none' | 'all' | ReadonlySet<bigint>;
  * Throws a Refusal `budget` that points to the entry when a factorisation does not end in time.
  */
 export function see(entries: readonly RationalEntry[], split: Splitting, budget: Budget): readonly BaseElement[] {
-  const composites = new Set<bigint>();
-  const primes = new Set<bigint>();
+  const stripped = new Map<bigint, Stripped>();
+  const primes = new Set<Int>();
   const hard = new Set<bigint>();
-  const stripped: { entry: RationalEntry; parts: readonly { sign: bigint; primes: Map<bigint, bigint>; rest: bigint }[] }[] = [];
-
-  for (const entry of entries) {
+  const strip = (n: bigint, entry: RationalEntry): Stripped => {
+    const known = stripped.get(n);
+    if (known !== undefined) return known;
     budget.spend('looking for the primes of the entries');
-    const part = (n: bigint, sign: bigint) => {
-      const found = new Map<bigint, bigint>();
-      const rest = strip(n, found, entry, budget);
-      for (const p of found.keys()) primes.add(p);
-      if (rest > 1n) hard.add(rest);
-      return { sign, primes: found, rest };
-    };
-    const size = entry.value.num < 0n ? -entry.value.num : entry.value.num;
-    stripped.push({ entry, parts: [part(size, 1n), part(entry.value.den, -1n)].filter((p) => p.primes.size > 0 || p.rest > 1n) });
-  }
-  for (const { value, prime } of hardBase(hard, primes, split, entries, budget)) {
-    if (prime) primes.add(value);
-    else composites.add(value);
-  }
-  const base: BaseElement[] = [...primes].map((value) => ({ value, prime: true }));
-  for (const value of composites) base.push({ value, prime: false });
-  base.sort((a, b) => (a.value < b.value ? -1 : 1));
-  const index = new Map(base.map(({ value }, i) => [value, i]));
-  // what a composite is made of: none of its factors is found by trial division
-  const large = hard.size === 0 ? [] : base.filter(({ value }) => value >= BigInt(TRIAL_BOUND));
+    const made = n < EXACT ? stripSmall(Number(n), entry, budget) : stripLarge(n, entry, budget);
+    for (const [p] of made.factors) primes.add(p);
+    if (made.rest > 1n) hard.add(made.rest);
+    stripped.set(n, made);
+    return made;
+  };
+  const parts = entries.map((entry) => ({
+    entry,
+    above: strip(entry.negative ? -entry.value.num : entry.value.num, entry),
+    below: entry.value.den === 1n ? undefined : strip(entry.value.den, entry),
+  }));
 
-  for (const { entry, parts } of stripped) {
-    const exponents = new Map<number, bigint>();
-    const add = (value: bigint, e: bigint): void => {
-      const i = index.get(value);
-      if (i !== undefined && e !== 0n) exponents.set(i, (exponents.get(i) ?? 0n) + e);
-    };
-    for (const { sign, primes: found, rest } of parts) {
-      for (const [p, e] of found) add(p, sign * e);
-      if (rest > 1n) for (const { value } of large) add(value, sign * BigInt(valuation(rest, value).exponent));
+  const base: BaseElement[] = hardBase(hard, primes, split, entries, budget).filter(({ value }) => !primes.has(toInt(value)));
+  for (const p of primes) base.push({ value: BigInt(p), prime: true });
+  base.sort((a, b) => (a.value < b.value ? -1 : 1));
+  const index = new Map<Int, number>(base.map(({ value }, i) => [toInt(value), i]));
+  // what a composite is made of: none of its factors is found by trial division
+  const large = hard.size === 0 ? [] : base.flatMap(({ value }, i) => (value >= BigInt(TRIAL_BOUND) ? [{ value, i }] : []));
+
+  for (const { entry, above, below } of parts) {
+    const exponents = new Map<number, Int>();
+    for (const [part, sign] of [[above, 1] as const, [below, -1] as const]) {
+      if (part === undefined) continue;
+      for (const [p, e] of part.factors) exponents.set(index.get(p) ?? -1, sign * e);
+      if (part.rest === 1n) continue;
+      for (const { value, i } of large) {
+        const e = valuation(part.rest, value).exponent;
+        if (e !== 0) exponents.set(i, sign * e + Number(exponents.get(i) ?? 0));
+      }
     }
     entry.exponents = exponents;
   }
   return base;
 }
 
-/** Puts the prime powers of n that are found at little cost into `found` and returns what is left. */
-function strip(n: bigint, found: Map<bigint, bigint>, entry: RationalEntry, budget: Budget): bigint {
+/** Strips 1 ≤ n < 2^53. */
+function stripSmall(n: number, entry: RationalEntry, budget: Budget): Stripped {
+  const factors: [Int, number][] = [];
   let rest = n;
-  if (rest === 1n) return rest;
-  for (const p of smallPrimeDivisors(rest)) {
+  for (const p of smallPrimes) {
+    if (p * p > rest) break;
+    if (rest % p !== 0) continue;
+    let exponent = 0;
+    do {
+      rest /= p;
+      exponent += 1;
+    } while (rest % p === 0);
+    factors.push([p, exponent]);
+  }
+  if (rest === 1) return { factors, rest: 1n };
+  if (rest < TRIAL_BOUND * TRIAL_BOUND) factors.push([rest, 1]);
+  else for (const { prime, exponent } of factorEntry(BigInt(rest), entry, budget)) factors.push([toInt(prime), exponent]);
+  return { factors, rest: 1n };
+}
+
+/** Strips n ≥ 2^53: primes below the trial bound, then what is prime or below 2^60. */
+function stripLarge(n: bigint, entry: RationalEntry, budget: Budget): Stripped {
+  const factors: [Int, number][] = [];
+  let rest = n;
+  for (const p of smallPrimeDivisors(n)) {
     const { exponent, unit } = valuation(rest, BigInt(p));
-    if (exponent === 0) continue;
-    found.set(BigInt(p), BigInt(exponent));
+    factors.push([p, exponent]);
     rest = unit;
   }
-  if (rest === 1n) return rest;
-  if (rest >= SPLIT_AT_ONCE && !isPrime(rest)) return rest;
-  for (const { prime, exponent } of rest >= SPLIT_AT_ONCE ? [{ prime: rest, exponent: 1 }] : factorEntry(rest, entry, budget))
-    found.set(prime, BigInt(exponent));
-  return 1n;
+  if (rest === 1n) return { factors, rest };
+  if (rest >= SPLIT_AT_ONCE && !isPrime(rest)) return { factors, rest };
+  const split = rest >= SPLIT_AT_ONCE ? [{ prime: rest, exponent: 1 }] : factorEntry(rest, entry, budget);
+  for (const { prime, exponent } of split) factors.push([toInt(prime), exponent]);
+  return { factors, rest: 1n };
 }
 
 /** A coprime base of the composites that resisted, refined against the known primes and split as far as asked. */
 function hardBase(
   hard: ReadonlySet<bigint>,
-  primes: ReadonlySet<bigint>,
+  primes: ReadonlySet<Int>,
   split: Splitting,
   entries: readonly RationalEntry[],
   budget: Budget,
@@ -100,7 +126,7 @@ function hardBase(
   const rests = new Set<bigint>();
   for (const n of hard) {
     let rest = n;
-    for (const p of primes) if (rest % p === 0n) rest = valuation(rest, p).unit;
+    for (const p of primes) if (rest % BigInt(p) === 0n) rest = valuation(rest, BigInt(p)).unit;
     if (rest > 1n) rests.add(rest);
   }
   const elements: BaseElement[] = [];

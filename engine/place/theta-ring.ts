@@ -1,10 +1,11 @@
+import { isOddInt, moduloFour, xorInt, type Int } from '../arith/int';
 import type { GradedRing } from '../ring/graded-ring';
 import type { ClassedUnit, ResidueClass, UnitGroup } from '../ring/residue-class-ring';
 import { residueClassRing } from '../ring/residue-class-ring';
 
 /** An entry as a place sees it: a = πⁿu, with the reduction of the unit u. */
 export interface LocalEntry<E> extends ClassedUnit<E> {
-  readonly valuation: bigint;
+  readonly valuation: Int;
 }
 
 /** Specialisation s (degree n) and residue ∂ (degree n − 1) of a class of degree n; at least one is not zero. */
@@ -26,7 +27,7 @@ export function thetaRing<A extends object, E>(
   const kappa = residueClassRing(units);
   type Part = ResidueClass<E> | undefined;
   const minusOne = kappa.symbol({ unit: units.minusOne, squareClass: units.classOfMinusOne });
-  const epsilon: Part = { rank: -1n, squareClass: units.classOfMinusOne, unit: undefined };
+  const epsilon: Part = { rank: -1, squareClass: units.classOfMinusOne, unit: undefined };
 
   const add = (degree: number, x: Part, y: Part): Part =>
     x === undefined ? y : y === undefined ? x : kappa.add(degree, x, y);
@@ -36,13 +37,12 @@ export function thetaRing<A extends object, E>(
   const same = (degree: number, x: Part, y: Part): boolean =>
     x === undefined || y === undefined ? x === y : kappa.equal(degree, x, y);
 
-  /** The rank and the square class of n_ε⟨ū⟩: n_ε is ⟨1⟩ + ⟨−1⟩ + … with |n| summands, times −⟨−1⟩ for n < 0. */
-  function epsilonMultiple({ valuation: n, squareClass }: LocalEntry<E>): { rank: bigint; squareClass: bigint } {
-    const minusSigns = n < 0n ? -n / 2n - n : n / 2n;
-    return {
-      rank: n,
-      squareClass: ((minusSigns & 1n) === 1n ? units.classOfMinusOne : 0n) ^ ((n & 1n) === 1n ? squareClass : 0n),
-    };
+  /** n_ε⟨ū⟩: n_ε is ⟨1⟩ + ⟨−1⟩ + … with |n| summands, times −⟨−1⟩ for n < 0; so a product of n, or of |n|/2 rounded, signs. */
+  function epsilonMultiple({ valuation: n, squareClass }: LocalEntry<E>): ResidueClass<E> {
+    const remainder = moduloFour(n);
+    const oddSigns = remainder > 1;
+    const sign = oddSigns ? units.classOfMinusOne : 0;
+    return { rank: n, squareClass: isOddInt(n) ? xorInt(sign, squareClass) : sign, unit: undefined };
   }
 
   const symbols = new Map<A, Theta<E> | undefined>();
@@ -61,13 +61,13 @@ export function thetaRing<A extends object, E>(
     symbol: (entry) =>
       cached(symbols, entry, () => {
         const at = local(entry);
-        return pair(kappa.symbol(at), at.valuation === 0n ? undefined : { ...epsilonMultiple(at), unit: undefined });
+        return pair(kappa.symbol(at), at.valuation === 0 ? undefined : epsilonMultiple(at));
       }),
     angle: (entry) =>
       cached(angles, entry, () => {
         // ⟨πⁿu⟩ = 1 + η[πⁿu]: s is ⟨ū⟩, and η·n_ε⟨ū⟩ is η⟨ū⟩ for n odd, 0 for n even
         const at = local(entry);
-        const odd = (at.valuation & 1n) === 1n;
+        const odd = isOddInt(at.valuation);
         const eta = kappa.eta(1);
         return pair(kappa.angle(at), odd && eta ? times(-1, eta, 0, kappa.angle(at)) : undefined);
       }),

@@ -7,17 +7,17 @@ export function fieldUnits<E>(field: FiniteField<E>): UnitGroup<E> {
   return {
     one: field.one,
     multiply: field.multiply,
-    power: (a, n) => field.power(a, n),
+    power: (a, n) => field.power(a, BigInt(n)),
     equal: field.equal,
     minusOne,
-    classOfMinusOne: field.isSquare(minusOne) ? 0n : 1n,
+    classOfMinusOne: field.isSquare(minusOne) ? 0 : 1,
     orderModFour: orderModFour(field),
   };
 }
 
 /** A unit of a finite field with its square class. */
 export function classedUnit<E>(field: FiniteField<E>, unit: E): ClassedUnit<E> {
-  return { unit, squareClass: field.isSquare(unit) ? 0n : 1n };
+  return { unit, squareClass: field.isSquare(unit) ? 0 : 1 };
 }
 
 /** q mod 4 for odd q, 2 in characteristic 2. */

@@ -1,4 +1,4 @@
-import type { Expression } from '../expression/expression';
+import type { Int } from '../arith/int';
 
 /**
  * A graded ring in which words are evaluated, given by its homogeneous parts: [a] has degree 1, η degree −1.
@@ -8,7 +8,7 @@ import type { Expression } from '../expression/expression';
  * every word has one.
  */
 export interface GradedRing<A, H> {
-  integer(n: bigint): H | undefined;
+  integer(n: Int): H | undefined;
   symbol(a: A): H | undefined;
   angle(a: A): H | undefined;
   eta(power: number): H | undefined;
@@ -20,8 +20,3 @@ export interface GradedRing<A, H> {
 
 /** An element as its non-zero homogeneous parts by degree. */
 export type Graded<H> = Map<number, H>;
-
-/** How values of a ring are written for people; the text reads back to the same class. */
-export interface Writer<H> {
-  write(degree: number, x: H): Expression;
-}

@@ -29,7 +29,7 @@ export function localWittRing<A>(classes: SquareClasses, classOf: (entry: A) => 
   const negate = (x: WittVector): number[] => x.map((m) => -m & 7);
 
   return {
-    integer: (n) => nonZero(single(0, Number(BigInt.asUintN(3, n)))),
+    integer: (n) => nonZero(single(0, Number(BigInt.asUintN(3, BigInt(n))))),
     symbol: (entry) => nonZero(add(single(classOf(entry), 1), single(0, -1))),
     angle: (entry) => nonZero(single(classOf(entry), 1)),
     eta: () => single(0, 1),

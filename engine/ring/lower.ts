@@ -1,3 +1,4 @@
+import { negateInt, toInt, type Int } from '../arith/int';
 import { integerElement, negateElement, type Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import { boundedCoefficient, checkDegree } from './limits';
@@ -22,23 +23,23 @@ export function lower<A>(expression: Expression, read: (entry: Element) => A): r
 function lowerNode<A>(node: Expression, read: (entry: Element) => A): readonly Term<A>[] {
   switch (node.kind) {
     case 'integer':
-      return node.value === 0n ? [] : [constantTerm(boundedCoefficient(node.value))];
+      return node.value === 0n ? [] : [constantTerm(boundedCoefficient(toInt(node.value)))];
     case 'symbol':
-      return [{ ...constantTerm<A>(1n), factors: node.entries.map((entry) => ({ kind: 'symbol', entry: read(entry) })) }];
+      return [{ ...constantTerm<A>(1), factors: node.entries.map((entry) => ({ kind: 'symbol', entry: read(entry) })) }];
     case 'angle':
-      return node.entries.map((entry) => angleTerm(1n, read(entry)));
+      return node.entries.map((entry) => angleTerm(1, read(entry)));
     case 'pfister':
-      return multiply(node.entries.map((entry) => [constantTerm<A>(1n), angleTerm(-1n, read(entry))]));
+      return multiply(node.entries.map((entry) => [constantTerm<A>(1), angleTerm(-1, read(entry))]));
     case 'eta':
-      return [{ ...constantTerm<A>(1n), eta: 1 }];
+      return [{ ...constantTerm<A>(1), eta: 1 }];
     case 'hyperbolic':
-      return [constantTerm<A>(1n), angleTerm(1n, read(minusOne))];
+      return [constantTerm<A>(1), angleTerm(1, read(minusOne))];
     case 'epsilon':
-      return [angleTerm(-1n, read(minusOne))];
+      return [angleTerm(-1, read(minusOne))];
     case 'epsilonInteger':
       return lowerEpsilonInteger(boundedCoefficient(node.count), read);
     case 'negate':
-      return lowerNode(node.of, read).map((term) => ({ ...term, coefficient: -term.coefficient }));
+      return lowerNode(node.of, read).map((term) => ({ ...term, coefficient: negateInt(term.coefficient) }));
     case 'sum':
       return node.terms.flatMap((term) => lowerNode(term, read));
     case 'product':
@@ -48,20 +49,20 @@ function lowerNode<A>(node: Expression, read: (entry: Element) => A): readonly T
   }
 }
 
-const angleTerm = <A>(coefficient: bigint, entry: A): Term<A> => ({ coefficient, eta: 0, angles: [entry], factors: [] });
+const angleTerm = <A>(coefficient: Int, entry: A): Term<A> => ({ coefficient, eta: 0, angles: [entry], factors: [] });
 
 /** n_ε = x + y⟨−1⟩: ⌈n/2⌉ + ⌊n/2⌋⟨−1⟩ for n ≥ 0, and −⟨−1⟩ times that of −n for n < 0. */
 function lowerEpsilonInteger<A>(n: bigint, read: (entry: Element) => A): readonly Term<A>[] {
   const size = n < 0n ? -n : n;
   const [more, fewer] = [(size + 1n) / 2n, size / 2n];
   const [x, y] = n < 0n ? [-fewer, -more] : [more, fewer];
-  return [constantTerm<A>(x), angleTerm(y, read(minusOne))].filter((term) => term.coefficient !== 0n);
+  return [constantTerm<A>(toInt(x)), angleTerm(toInt(y), read(minusOne))].filter((term) => term.coefficient !== 0);
 }
 
 function multiply<A>(factors: readonly (readonly Term<A>[])[]): readonly Term<A>[] {
   if (factors.some((terms) => terms.length === 0)) return [];
   const sums = factors.filter((terms) => terms.length > 1).length;
-  let product: readonly Term<A>[] = [constantTerm<A>(1n)];
+  let product: readonly Term<A>[] = [constantTerm<A>(1)];
   for (const terms of factors) {
     const kept = terms.length > 1 && sums > 1 ? [powerTerm(terms, 1)] : terms;
     product = product.flatMap((x) => kept.map((y) => multiplyTerms(x, y)));
@@ -71,12 +72,12 @@ function multiply<A>(factors: readonly (readonly Term<A>[])[]): readonly Term<A>
 }
 
 function lowerPower<A>(base: readonly Term<A>[], exponent: number): readonly Term<A>[] {
-  if (exponent === 0) return [constantTerm<A>(1n)];
+  if (exponent === 0) return [constantTerm<A>(1)];
   if (base.length === 0 || exponent === 1) return base;
   return [powerTerm(base, exponent)];
 }
 
 function powerTerm<A>(of: readonly Term<A>[], exponent: number): Term<A> {
   const factor: Factor<A> = { kind: 'power', of, exponent };
-  return { ...constantTerm<A>(1n), factors: [factor] };
+  return { ...constantTerm<A>(1), factors: [factor] };
 }

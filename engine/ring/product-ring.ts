@@ -1,3 +1,4 @@
+import { addInt, isOddInt, multiplyInt, type Int } from '../arith/int';
 import type { GradedRing } from './graded-ring';
 import { boundedCoefficient } from './limits';
 
@@ -6,13 +7,13 @@ import { boundedCoefficient } from './limits';
  * index, with the sign in {0, 1}. Exponents that are 0 are left out.
  */
 export type ProductClass =
-  | { readonly kind: 'integer'; readonly value: bigint }
-  | { readonly kind: 'unit'; readonly sign: 0n | 1n; readonly exponents: ReadonlyMap<number, bigint> };
+  | { readonly kind: 'integer'; readonly value: Int }
+  | { readonly kind: 'unit'; readonly sign: 0 | 1; readonly exponents: ReadonlyMap<number, Int> };
 
 /** The exponents of an entry: what the class in K_1 of a rational number is made of. */
 export interface FactoredEntry {
   readonly negative: boolean;
-  readonly exponents: ReadonlyMap<number, bigint>;
+  readonly exponents: ReadonlyMap<number, Int>;
 }
 
 /**
@@ -20,39 +21,39 @@ export interface FactoredEntry {
  * coefficients cost nothing.
  */
 export function productRing<A>(factored: (entry: A) => FactoredEntry): GradedRing<A, ProductClass> {
-  const integer = (value: bigint): ProductClass | undefined =>
-    value === 0n ? undefined : { kind: 'integer', value: boundedCoefficient(value) };
-  const unit = (sign: bigint, exponents: ReadonlyMap<number, bigint>): ProductClass | undefined =>
-    (sign & 1n) === 0n && exponents.size === 0
+  const integer = (value: Int): ProductClass | undefined =>
+    value === 0 ? undefined : { kind: 'integer', value: boundedCoefficient(value) };
+  const unit = (odd: boolean, exponents: ReadonlyMap<number, Int>): ProductClass | undefined =>
+    !odd && exponents.size === 0
       ? undefined
-      : { kind: 'unit', sign: (sign & 1n) === 0n ? 0n : 1n, exponents };
-  const scale = (n: bigint, x: ProductClass): ProductClass | undefined =>
+      : { kind: 'unit', sign: odd ? 1 : 0, exponents };
+  const scale = (n: Int, x: ProductClass): ProductClass | undefined =>
     x.kind === 'integer'
-      ? integer(n * x.value)
-      : n === 0n
+      ? integer(multiplyInt(n, x.value))
+      : n === 0
         ? undefined
-        : unit(n * x.sign, new Map([...x.exponents].map(([i, e]) => [i, boundedCoefficient(n * e)])));
+        : unit(isOddInt(n) && x.sign === 1, new Map([...x.exponents].map(([i, e]) => [i, boundedCoefficient(multiplyInt(n, e))])));
 
   return {
     integer,
     symbol: (entry) => {
       const { negative, exponents } = factored(entry);
-      return unit(negative ? 1n : 0n, exponents);
+      return unit(negative, exponents);
     },
-    angle: () => integer(1n),
+    angle: () => integer(1),
     eta: () => undefined,
     add: (_degree, x, y) => {
-      if (x.kind === 'integer' && y.kind === 'integer') return integer(x.value + y.value);
+      if (x.kind === 'integer' && y.kind === 'integer') return integer(addInt(x.value, y.value));
       if (x.kind !== 'unit' || y.kind !== 'unit') return undefined;
       const exponents = new Map(x.exponents);
       for (const [i, e] of y.exponents) {
-        const next = (exponents.get(i) ?? 0n) + e;
-        if (next === 0n) exponents.delete(i);
+        const next = addInt(exponents.get(i) ?? 0, e);
+        if (next === 0) exponents.delete(i);
         else exponents.set(i, next);
       }
-      return unit(x.sign + y.sign, exponents);
+      return unit(x.sign !== y.sign, exponents);
     },
-    negate: (_degree, x) => scale(-1n, x),
+    negate: (_degree, x) => scale(-1, x),
     multiply: (_m, x, _n, y) =>
       x.kind === 'integer' ? scale(x.value, y) : y.kind === 'integer' ? scale(y.value, x) : undefined,
     equal: (_degree, x, y) =>

@@ -1,3 +1,4 @@
+import { addInt, isOddInt, moduloFour, multiplyInt, negateInt, xorInt, type Int } from '../arith/int';
 import { boundedCoefficient } from './limits';
 import type { GradedRing } from './graded-ring';
 
@@ -10,10 +11,10 @@ export interface UnitGroup<E> {
   readonly one: E;
   multiply(a: E, b: E): E;
   /** a^n for any integer n. */
-  power(a: E, n: bigint): E;
+  power(a: E, n: Int): E;
   equal(a: E, b: E): boolean;
   readonly minusOne: E;
-  readonly classOfMinusOne: bigint;
+  readonly classOfMinusOne: Int;
   /** q mod 4 for odd q; 2 for a field of characteristic 2; `undefined` when it is not known. */
   readonly orderModFour: 1 | 2 | 3 | undefined;
 }
@@ -21,7 +22,7 @@ export interface UnitGroup<E> {
 /** A unit together with its square class. */
 export interface ClassedUnit<E> {
   readonly unit: E;
-  readonly squareClass: bigint;
+  readonly squareClass: Int;
 }
 
 /**
@@ -29,8 +30,8 @@ export interface ClassedUnit<E> {
  * form, in degree < 0 reduced modulo the hyperbolic plane.
  */
 export interface ResidueClass<E> {
-  readonly rank: bigint;
-  readonly squareClass: bigint;
+  readonly rank: Int;
+  readonly squareClass: Int;
   readonly unit: E | undefined;
 }
 
@@ -45,46 +46,46 @@ export interface ResidueClass<E> {
  * (W(𝔽_q) = ℤ/4 by multiples of ⟨1⟩); if the order is not known modulo 4, the rank is kept as it is.
  */
 export function residueClassRing<E>(units: UnitGroup<E>): GradedRing<ClassedUnit<E>, ResidueClass<E>> {
-  const make = (degree: number, rank: bigint, squareClass: bigint): ResidueClass<E> | undefined => {
-    boundedCoefficient(rank);
+  const make = (degree: number, rank: Int, squareClass: Int): ResidueClass<E> | undefined => {
     if (degree < 0) {
       if (units.orderModFour === 3) {
-        rank = (((rank + (squareClass === 0n ? 0n : 2n)) % 4n) + 4n) % 4n;
-        squareClass = 0n;
-      } else if (units.orderModFour !== undefined) rank &= 1n;
+        rank = moduloFour(squareClass === 0 ? rank : addInt(rank, 2));
+        squareClass = 0;
+      } else if (units.orderModFour !== undefined) rank = isOddInt(rank) ? 1 : 0;
     }
-    return rank === 0n && squareClass === 0n ? undefined : { rank, squareClass, unit: undefined };
+    return rank === 0 && squareClass === 0 ? undefined : { rank, squareClass, unit: undefined };
   };
-  const makeUnit = (unit: E, squareClass: bigint): ResidueClass<E> | undefined =>
-    units.equal(unit, units.one) ? undefined : { rank: 0n, squareClass, unit };
+  const makeUnit = (unit: E, squareClass: Int): ResidueClass<E> | undefined =>
+    units.equal(unit, units.one) ? undefined : { rank: 0, squareClass, unit };
+
+  /** A form of degree ≤ 0 times [u]: u^rank in degree 1; in degree ≤ 0, where [u] counts as ⟨u⟩ − 1, its rank times that class. */
+  const act = (degree: number, form: ResidueClass<E>, unit: E, squareClass: Int): ResidueClass<E> | undefined => {
+    const parity = odd(form.rank, squareClass);
+    return degree === 0 ? makeUnit(units.power(unit, form.rank), parity) : make(degree + 1, 0, parity);
+  };
 
   return {
-    integer: (n) => make(0, n, 0n),
+    integer: (n) => make(0, n, 0),
     symbol: (a) => makeUnit(a.unit, a.squareClass),
-    angle: (a) => make(0, 1n, a.squareClass),
-    eta: (power) => make(-power, 1n, 0n),
+    angle: (a) => make(0, 1, a.squareClass),
+    eta: (power) => make(-power, 1, 0),
     add: (degree, x, y) =>
       x.unit !== undefined && y.unit !== undefined
-        ? makeUnit(units.multiply(x.unit, y.unit), x.squareClass ^ y.squareClass)
-        : make(degree, x.rank + y.rank, x.squareClass ^ y.squareClass),
+        ? makeUnit(units.multiply(x.unit, y.unit), xorInt(x.squareClass, y.squareClass))
+        : make(degree, addInt(x.rank, y.rank), xorInt(x.squareClass, y.squareClass)),
     negate: (degree, x) =>
-      x.unit !== undefined ? makeUnit(units.power(x.unit, -1n), x.squareClass) : make(degree, -x.rank, x.squareClass),
+      x.unit !== undefined ? makeUnit(units.power(x.unit, -1), x.squareClass) : make(degree, negateInt(x.rank), x.squareClass),
     multiply: (degreeX, x, degreeY, y) => {
-      if (x.unit !== undefined) return y.unit !== undefined ? undefined : act(degreeY, y, x);
-      if (y.unit !== undefined) return act(degreeX, x, y);
-      return make(degreeX + degreeY, x.rank * y.rank, odd(x.rank, y.squareClass) ^ odd(y.rank, x.squareClass));
+      if (x.unit !== undefined) return y.unit !== undefined ? undefined : act(degreeY, y, x.unit, x.squareClass);
+      if (y.unit !== undefined) return act(degreeX, x, y.unit, y.squareClass);
+      const squareClass = xorInt(odd(x.rank, y.squareClass), odd(y.rank, x.squareClass));
+      return make(degreeX + degreeY, boundedCoefficient(multiplyInt(x.rank, y.rank)), squareClass);
     },
     equal: (_degree, x, y) =>
       x.unit !== undefined
         ? y.unit !== undefined && units.equal(x.unit, y.unit)
         : y.unit === undefined && x.rank === y.rank && x.squareClass === y.squareClass,
   };
-
-  /** A form of degree ≤ 0 times [u]: u^rank in degree 1; in degree ≤ 0, where [u] counts as ⟨u⟩ − 1, its rank times that class. */
-  function act(degree: number, form: ResidueClass<E>, u: ResidueClass<E>): ResidueClass<E> | undefined {
-    if (degree === 0) return makeUnit(units.power(u.unit ?? units.one, form.rank), odd(form.rank, u.squareClass));
-    return make(degree + 1, 0n, odd(form.rank, u.squareClass));
-  }
 }
 
-const odd = (rank: bigint, squareClass: bigint): bigint => ((rank & 1n) === 1n ? squareClass : 0n);
+const odd = (rank: Int, squareClass: Int): Int => (isOddInt(rank) ? squareClass : 0);

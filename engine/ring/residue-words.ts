@@ -20,9 +20,9 @@ export function residueWords<E>(
   if (value === undefined) return [];
   if (value.unit !== undefined) return [{ coefficient: 1n, eta: 0, symbol: value.unit }];
   const eta = degree < 0 ? -degree : 0;
-  if (value.squareClass === 0n || nonSquare === undefined) return [{ coefficient: value.rank, eta }];
+  if (value.squareClass === 0 || nonSquare === undefined) return [{ coefficient: BigInt(value.rank), eta }];
   // in W(𝔽_q) with q ≡ 1 mod 4 the class of rank 0 is ⟨1⟩ + ⟨s⟩, for 2 = 0 there
-  const plain = degree < 0 && orderModFour === 1 && value.rank === 0n ? 1n : value.rank - 1n;
+  const plain = degree < 0 && orderModFour === 1 && value.rank === 0 ? 1n : BigInt(value.rank) - 1n;
   const twisted: ResidueWord<E> = { coefficient: 1n, eta, angle: nonSquare };
   return plain === 0n ? [twisted] : [{ coefficient: plain, eta }, twisted];
 }

@@ -1,3 +1,5 @@
+import { multiplyInt, type Int } from '../arith/int';
+
 /**
  * The kernel form of an expression, in which rings are evaluated: a sum of terms
  *
@@ -7,7 +9,7 @@
  * Lemma 3.5, number from memory).
  */
 export interface Term<A> {
-  readonly coefficient: bigint;
+  readonly coefficient: Int;
   readonly eta: number;
   readonly angles: readonly A[];
   readonly factors: readonly Factor<A>[];
@@ -17,24 +19,24 @@ export type Factor<A> =
   | { readonly kind: 'symbol'; readonly entry: A }
   | { readonly kind: 'power'; readonly of: readonly Term<A>[]; readonly exponent: number };
 
-export const constantTerm = <A>(coefficient: bigint): Term<A> => ({ coefficient, eta: 0, angles: [], factors: [] });
+export const constantTerm = <A>(coefficient: Int): Term<A> => ({ coefficient, eta: 0, angles: [], factors: [] });
 
 /** The product of two terms. */
 export function multiplyTerms<A>(x: Term<A>, y: Term<A>): Term<A> {
   return {
-    coefficient: x.coefficient * y.coefficient,
+    coefficient: multiplyInt(x.coefficient, y.coefficient),
     eta: x.eta + y.eta,
     angles: y.angles.length === 0 ? x.angles : x.angles.length === 0 ? y.angles : [...x.angles, ...y.angles],
     factors: y.factors.length === 0 ? x.factors : x.factors.length === 0 ? y.factors : [...x.factors, ...y.factors],
   };
 }
 
-/** The entries that occur in a term, with repetitions. */
-export function* entriesOf<A>(term: Term<A>): Generator<A> {
-  yield* term.angles;
+/** Calls `visit` for the entries that occur in a term, with repetitions. */
+export function forEachEntry<A>(term: Term<A>, visit: (entry: A) => void): void {
+  for (const entry of term.angles) visit(entry);
   for (const factor of term.factors) {
-    if (factor.kind === 'symbol') yield factor.entry;
-    else for (const inner of factor.of) yield* entriesOf(inner);
+    if (factor.kind === 'symbol') visit(factor.entry);
+    else for (const inner of factor.of) forEachEntry(inner, visit);
   }
 }
 

@@ -87,7 +87,7 @@ export function wordRing(char: CharacteristicClass, budget: Budget): GradedRing<
   };
 
   return {
-    integer: (n) => nonZero(reduced(0, new Map([[0n, { x: n, y: 0n }]]))),
+    integer: (n) => nonZero(reduced(0, new Map([[0n, { x: BigInt(n), y: 0n }]]))),
     symbol,
     angle: (a) => {
       const word = symbol(a);

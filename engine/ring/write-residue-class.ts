@@ -6,9 +6,12 @@ import type { ResidueClass } from './residue-class-ring';
 import { residueWords } from './residue-words';
 import { etaFactors, multiple, total } from './write-word';
 
+/** What writing needs to know of a finite field. */
+export type WrittenField<E> = Pick<FiniteField<E>, 'name' | 'order' | 'characteristic' | 'write' | 'nonSquare'>;
+
 /** The canonical form of a class of K^MW_m(𝔽_q), with `prefix` in front of every word. */
 export function writeResidueClass<E>(
-  field: FiniteField<E>,
+  field: WrittenField<E>,
   degree: number,
   value: ResidueClass<E> | undefined,
   prefix: readonly Expression[] = [],

@@ -18,28 +18,32 @@ export interface FactorBase {
  * memory). Logarithms are counted in sixteenths of a binary digit; the choice bears on the time alone.
  */
 export function multiplier(n: bigint): number {
+  const residues = scored.map(({ p }) => smallJacobi(Number(n % BigInt(p)), p));
+  const atTwo = Number(n % 8n);
   let best = 1;
   let bestScore = Number.NEGATIVE_INFINITY;
-  for (let k = 1; k <= 73; k++) {
-    if (smallPrimes.slice(0, 4).some((p) => k % (p * p) === 0)) continue;
-    const score = schroeppel(n, k);
+  for (const { k, log, symbols } of candidates) {
+    let score = scoreAtTwo[(k * atTwo) % 8]! - log / 2;
+    for (let i = 0; i < scored.length; i++) {
+      if (symbols[i] === 0) score += scored[i]!.log / scored[i]!.p;
+      else if (symbols[i] === residues[i]) score += scored[i]!.twice;
+    }
     if (score > bestScore) [best, bestScore] = [k, score];
   }
   return best;
 }
 
-function schroeppel(n: bigint, k: number): number {
-  const atTwo = [0, 32, 0, 8, 0, 16, 0, 8][Number((BigInt(k) * n) % 8n)]!;
-  let score = atTwo - logarithm(k) / 2;
-  for (const p of smallPrimes.subarray(1, 100)) {
-    if (k % p === 0) score += logarithm(p) / p;
-    else if (smallJacobi((k * Number(n % BigInt(p))) % p, p) === 1) score += (2 * logarithm(p)) / (p - 1);
-  }
-  return score;
-}
-
 /** log₂ n in sixteenths, from the length of n^16. */
 const logarithm = (n: number): number => bitLength(BigInt(n) ** 16n) - 1;
+
+const scoreAtTwo = [0, 32, 0, 8, 0, 16, 0, 8] as const;
+const scored = [...smallPrimes.subarray(1, 60)].map((p) => {
+  const log = logarithm(p);
+  return { p, log, twice: (2 * log) / (p - 1) };
+});
+const candidates = Array.from({ length: 73 }, (_, i) => i + 1)
+  .filter((k) => [4, 9, 25, 49].every((square) => k % square !== 0))
+  .map((k) => ({ k, log: logarithm(k), symbols: Int8Array.from(scored, ({ p }) => smallJacobi(k, p)) }));
 
 /** The factor base of kN with `size` primes. */
 export function factorBase(kn: bigint, size: number): FactorBase {
