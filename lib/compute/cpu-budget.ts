@@ -1,22 +1,6 @@
-import { readFileSync } from 'node:fs';
 import type { Budget } from '@/engine/arith/budget';
 import { Refusal } from '@/engine/expression/refusal';
-
-/** Milliseconds of processor time that the calling thread has had. */
-export type ThreadClock = () => number;
-
-/**
- * The processor time of this thread by Linux's account of it; where the system keeps none, the time of day, which can only
- * be stricter.
- */
-export function threadClock(): ThreadClock {
-  const read = (): number => Number(readFileSync('/proc/thread-self/schedstat', 'ascii').split(' ')[0]) / 1e6;
-  try {
-    return Number.isFinite(read()) ? read : () => performance.now();
-  } catch {
-    return () => performance.now();
-  }
-}
+import { type ThreadClock, threadClock } from './thread-clock';
 
 /** After the time of day says that the budget may be spent, the thread's own clock is asked this often (milliseconds). */
 const patience = 20;

@@ -18,9 +18,3 @@ export const laneSizes = (threads: number): LaneSizes => ({ quick: threads, slow
 
 /** Questions that wait before a lane, at most: about twenty seconds of work in either. */
 export const longestQueues = ({ quick, slow }: LaneSizes): LaneSizes => ({ quick: 128 * quick, slow: 10 * slow });
-
-/**
- * Milliseconds after which a thread that does not stop by itself is ended. It stands past the budget of processor time, because
- * a thread of many on few processors gets its time late.
- */
-export const wallMilliseconds = (seconds: number): number => seconds * 2000 + 1000;

@@ -5,10 +5,10 @@ import Piscina from 'piscina';
 import { config } from '@/lib/config/config';
 import { problemOf } from '@/lib/contracts/problem';
 import type { Task } from './engine.worker';
-import { laneSizes, longestQueues, quickSeconds, wallMilliseconds } from './lanes';
+import { laneSizes, longestQueues, quickSeconds } from './lanes';
 import { type AnswerOf, type BodyOf, type ComputeRequest, declined, type Kind, type Reply } from './request';
 import { Busy, Slots } from './slots';
-import { newStartFlag, wallAfter } from './wall';
+import { newStartMark, wallAround } from './wall';
 
 export interface Asking {
   /** Ends the computation when the client goes away or the whole call is over. */
@@ -94,8 +94,8 @@ export async function compute<K extends Kind>(
 const attempt = (task: Omit<Task, 'started'>, lane: Slots, { signal, urgent = true }: Asking): Promise<AnyReply> =>
   lane.run(
     async () => {
-      const started = newStartFlag();
-      const wall = wallAfter(wallMilliseconds(task.seconds), started);
+      const started = newStartMark();
+      const wall = wallAround(task.seconds, started);
       const either = signal === undefined ? wall.signal : AbortSignal.any([wall.signal, signal]);
       try {
         return await engine().threads.run({ ...task, started }, { signal: either });

@@ -1,15 +1,25 @@
-/** Shared memory in which a thread marks that it has begun a task; it crosses with the task. */
-export type StartFlag = Int32Array<SharedArrayBuffer>;
+import { processorTime, threadNumber } from './thread-clock';
 
-export const newStartFlag = (): StartFlag => new Int32Array(new SharedArrayBuffer(4));
+/** Shared memory in which a thread marks that it has begun a task, and which one it is; it crosses with the task. */
+export type StartMark = Float64Array<SharedArrayBuffer>;
+
+export const newStartMark = (): StartMark => new Float64Array(new SharedArrayBuffer(24));
 
 /** Called by the thread when it begins. */
-export const markStarted = (flag: StartFlag): void => void Atomics.store(flag, 0, 1);
+export function markStart(mark: StartMark): void {
+  const thread = threadNumber();
+  mark[1] = thread;
+  mark[2] = processorTime(thread) ?? 0;
+  mark[0] = 1;
+}
 
-/** Milliseconds a task may wait for a thread that is still starting. */
-const longestStart = 30_000;
-/** The clock is read this many times before the wall is reached. */
-const readings = 10;
+/** Milliseconds of processor time past its budget that a thread has to stop by itself. */
+const margin = 500;
+/** The time of day at which a task ends in any case: this many times its budget, and a while for a thread that starts. */
+const wallFactor = 10;
+const longestStart = 20_000;
+/** Milliseconds between two looks at a running thread; most tasks are over before the first. */
+const interval = 100;
 
 export interface Wall {
   readonly signal: AbortSignal;
@@ -18,18 +28,17 @@ export interface Wall {
 }
 
 /**
- * A signal that is aborted when a task has run for `milliseconds`, to a tenth more. Time in which its thread was still starting
- * does not count: on a busy machine a new thread takes longer than most tasks.
+ * A signal that is aborted when a thread does not stop by itself: when it has had more processor time than its budget and a
+ * margin, or, where that cannot be told, when its time of day is over. A busy machine does not shorten a budget.
  */
-export function wallAfter(milliseconds: number, flag: StartFlag): Wall {
+export function wallAround(seconds: number, mark: StartMark): Wall {
   const controller = new AbortController();
-  const period = milliseconds / readings;
-  let [running, starting] = [0, 0];
+  const askedAt = performance.now();
   const timer = setInterval(() => {
-    if (Atomics.load(flag, 0) === 1) running += 1;
-    else starting += 1;
-    if (running > readings || starting * period > longestStart) controller.abort();
-  }, period);
+    const spent = mark[0] === 1 && mark[1] ? processorTime(mark[1]) : undefined;
+    const overBudget = spent !== undefined && spent - (mark[2] ?? 0) > seconds * 1000 + margin;
+    if (overBudget || performance.now() - askedAt > seconds * 1000 * wallFactor + longestStart) controller.abort();
+  }, interval);
   timer.unref();
   return { signal: controller.signal, clear: () => clearInterval(timer) };
 }

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { compareAnswer } from './compare';
 import type { Contract } from './contract';
+import { compareManyExamples } from './examples/compare-many';
 import { problem } from './problem';
 
 export const mostCompares = 500;
@@ -39,5 +40,5 @@ export const compareManyContract: Contract<typeof compareManyRequest, typeof com
   request: compareManyRequest,
   answer: compareManyAnswer,
   problems: ['invalid', 'busy'],
-  examples: [],
+  examples: compareManyExamples,
 };

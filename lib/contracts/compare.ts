@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { type Contract, readingProblems } from './contract';
+import { compareExamples } from './examples/compare';
 import { common, expressionText, fieldName, group, hypotheses, sideConditions, typeset } from './typeset';
 
 export const compareRequest = z
@@ -130,5 +131,5 @@ export const compareContract: Contract<typeof compareRequest, typeof compareAnsw
   request: compareRequest,
   answer: compareAnswer,
   problems: [...readingProblems, 'hypothesis'],
-  examples: [],
+  examples: compareExamples,
 };

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { type Contract, readingProblems } from './contract';
+import { normalizeExamples } from './examples/normalize';
 import { common, expressionText, fieldName, group, hypotheses, sideConditions, typeset } from './typeset';
 
 export const normalizeRequest = z.strictObject({
@@ -48,5 +49,5 @@ export const normalizeContract: Contract<typeof normalizeRequest, typeof normali
   request: normalizeRequest,
   answer: normalizeAnswer,
   problems: [...readingProblems, 'hypothesis'],
-  examples: [],
+  examples: normalizeExamples,
 };

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { type Contract, readingProblems } from './contract';
+import { residuesExamples } from './examples/residues';
 import { common, expressionText, fieldName, typeset } from './typeset';
 
 export const residuesRequest = z
@@ -53,5 +54,5 @@ export const residuesContract: Contract<typeof residuesRequest, typeof residuesA
   request: residuesRequest,
   answer: residuesAnswer,
   problems: [...readingProblems, 'place', 'uniformizer'],
-  examples: [],
+  examples: residuesExamples,
 };

@@ -25,7 +25,7 @@ test('equal sides, with what was compared and why it suffices', async () => {
   expect(evidence).toMatchObject({ kind: 'invariants', modEta: true, modH: true });
   expect(evidence.theorem).not.toBe('');
   expect(evidence.separating).toBeUndefined();
-  expect(statement.text).toBe('[6] = [2]+[3]+eta[2][3]');
+  expect(statement.text).toBe('[6] = [2] + [3] + eta[2][3]');
   expect(sides).toHaveLength(2);
 });
 

@@ -11,7 +11,7 @@ test('a number that is no prime is no place', async () => {
 
 test('a uniformizer has valuation 1 and goes with one place', async () => {
   await expectProblem(path, await ask({ places: ['7'], uniformizer: '49' }), 422, 'uniformizer');
-  await expectProblem(path, await ask({ places: ['7'], uniformizer: '0' }), 422, 'uniformizer');
+  await expectProblem(path, await ask({ places: ['7'], uniformizer: '0' }), 422, 'not-a-unit');
   await expectProblem(path, await ask({ places: ['7', '5'], uniformizer: '7' }), 422, 'invalid', {
     part: 'uniformizer',
   });
@@ -23,5 +23,5 @@ test('a uniformizer that cannot be read', async () => {
 });
 
 test('fields without residues say so', async () => {
-  await expectProblem(path, await ask({ field: 'F_7', expression: '[5]' }), 422, 'not-yet');
+  await expectProblem(path, await ask({ field: 'F_7', expression: '[5]' }), 422, 'place');
 });
