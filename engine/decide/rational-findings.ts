@@ -5,21 +5,18 @@ import { eta, power, type Expression } from '../expression/expression';
 import { primeResidueField } from '../place/prime-residue-field';
 import { rationalPlace, unsplitZeroTest, type ZeroTest } from '../place/rational-place';
 import type { RationalEntry } from '../place/rational-entry';
-import type { Splitting } from '../place/sight';
+import type { BaseElement } from '../place/sight';
 import { thetaRing, type Theta } from '../place/theta-ring';
 import { degreesOf } from '../ring/degrees';
 import { evaluate } from '../ring/evaluate';
-import type { Graded, GradedRing } from '../ring/graded-ring';
+import type { GradedRing } from '../ring/graded-ring';
 import { residueClassRing, type ResidueClass } from '../ring/residue-class-ring';
-import type { Term } from '../ring/term';
 import { writeResidueClass } from '../ring/write-residue-class';
 import { multiple, zeroExpression } from '../ring/write-word';
 import type { Finding } from './finding';
 import { incidence, type Incidence, type RationalStatement } from './rational-statement';
 import { realFindings } from './real-findings';
 import { residueReason } from './residue-reason';
-
-type Terms = readonly Term<RationalEntry>[];
 
 /**
  * What decides equality in K^MW_n(ℚ): the rank (n = 0), the signature, and the residue at every prime at which a term ramifies.
@@ -45,61 +42,88 @@ export function rationalFindings(statement: RationalStatement, budget: Budget): 
   }
 }
 
-function both<H>(sides: readonly Terms[], ring: GradedRing<RationalEntry, H>, budget: Budget): [Graded<H>, Graded<H>] {
-  return [evaluate(sides[0] ?? [], ring, budget), evaluate(sides[1] ?? [], ring, budget)];
-}
-
-interface ResidueFinding extends Finding {
-  readonly base: bigint;
-  readonly outcome: ZeroTest;
-  readonly outcomeModH: ZeroTest;
-}
-
-const isUnknownModH = (finding: Finding): boolean => 'outcomeModH' in finding && finding.outcomeModH === 'unknown';
+const isUnknownModH = (finding: Finding): boolean =>
+  finding instanceof ResidueFinding && finding.outcomeModH === 'unknown';
 
 function residueFindings({ base, terms }: Incidence, budget: Budget): readonly ResidueFinding[] {
-  return base.flatMap(({ value: b, prime }, index) => {
+  return base.flatMap((element, index) => {
     const { units, local } = rationalPlace(base, index);
     const ring: GradedRing<RationalEntry, Theta<Int>> = thetaRing(units, local);
     const kappa = residueClassRing(units);
-    const sides = terms[index] ?? [];
-    const [left, right] = both(sides, ring, budget);
-    return degreesOf(sides.flat()).map((degree): ResidueFinding => {
-      const l = left.get(degree)?.d;
-      const r = right.get(degree)?.d;
-      const minus = r === undefined ? undefined : kappa.negate(degree - 1, r);
-      const difference = l === undefined ? minus : minus === undefined ? l : kappa.add(degree - 1, l, minus);
-      const outcome: ZeroTest = prime
-        ? difference === undefined
-          ? 'zero'
-          : 'nonzero'
-        : unsplitZeroTest(base, b, degree - 1, difference);
-      const asForm = difference && { ...difference, unit: undefined };
-      const outcomeModH: ZeroTest =
-        outcome === 'zero'
-          ? 'zero'
-          : prime
-            ? zeroModH(difference, units.classOfMinusOne)
-            : unsplitZeroTest(base, b, -1, asForm);
-      const write = prime ? writeAtPrime(b) : writeUnsplit;
-      return {
-        map: 'residue',
-        place: b.toString(),
-        degree,
-        base: b,
-        outcome,
-        outcomeModH,
-        same: outcome === 'zero',
-        zero: l === undefined && r === undefined,
-        sameModEta: outcome === 'zero' || zeroModEta(degree - 1, difference),
-        sameModH: outcomeModH === 'zero',
-        left: () => write(degree - 1, l),
-        right: () => write(degree - 1, r),
-        target: () => residueGroup(degree - 1, b, prime),
-        reason: () => residueReason(degree - 1, l, r, prime ? `modulo ${b}` : `at a prime that divides ${b}`),
-      };
+    const [left = [], right = []] = terms[index] ?? [];
+    const [l, r] = [evaluate(left, ring, budget), evaluate(right, ring, budget)];
+    return degreesOf(left.length === 0 ? right : right.length === 0 ? left : [...left, ...right]).map((degree) => {
+      const [x, y] = [l.get(degree)?.d, r.get(degree)?.d];
+      const minus = y && kappa.negate(degree - 1, y);
+      const difference = x === undefined ? minus : minus === undefined ? x : kappa.add(degree - 1, x, minus);
+      return new ResidueFinding(base, element, degree, x, y, difference, units.classOfMinusOne);
     });
   });
+}
+
+/** The residues of both sides at one element of the base; a class, so that what is only shown is worked out on demand. */
+class ResidueFinding implements Finding {
+  readonly map = 'residue';
+  readonly outcome: ZeroTest;
+
+  constructor(
+    private readonly sight: readonly BaseElement[],
+    private readonly element: BaseElement,
+    readonly degree: number,
+    private readonly x: ResidueClass<Int> | undefined,
+    private readonly y: ResidueClass<Int> | undefined,
+    private readonly difference: ResidueClass<Int> | undefined,
+    private readonly classOfMinusOne: Int,
+  ) {
+    this.outcome = element.prime
+      ? difference === undefined
+        ? 'zero'
+        : 'nonzero'
+      : unsplitZeroTest(sight, element.value, degree - 1, difference);
+  }
+
+  get base(): bigint {
+    return this.element.value;
+  }
+  get place(): string {
+    return this.base.toString();
+  }
+  get same(): boolean {
+    return this.outcome === 'zero';
+  }
+  get zero(): boolean {
+    return this.x === undefined && this.y === undefined;
+  }
+  get sameModEta(): boolean {
+    return this.same || zeroModEta(this.degree - 1, this.difference);
+  }
+  get sameModH(): boolean {
+    return this.outcomeModH === 'zero';
+  }
+  get outcomeModH(): ZeroTest {
+    if (this.same) return 'zero';
+    if (this.element.prime) return zeroModH(this.difference, this.classOfMinusOne);
+    const asForm = this.difference && { ...this.difference, unit: undefined };
+    return unsplitZeroTest(this.sight, this.base, -1, asForm);
+  }
+  left(): Expression {
+    return this.write(this.x);
+  }
+  right(): Expression {
+    return this.write(this.y);
+  }
+  target(): string {
+    return residueGroup(this.degree - 1, this.base, this.element.prime);
+  }
+  reason(): string {
+    const where = this.element.prime ? `modulo ${this.base}` : `at a prime that divides ${this.base}`;
+    return residueReason(this.degree - 1, this.x, this.y, where);
+  }
+  private write(value: ResidueClass<Int> | undefined): Expression {
+    return this.element.prime
+      ? writeResidueClass(primeResidueField(this.base), this.degree - 1, value)
+      : writeUnsplit(this.degree - 1, value);
+  }
 }
 
 /** Whether a class of K^MW_m of a residue field is zero in Milnor K-theory. */
@@ -112,11 +136,6 @@ function zeroModH(x: ResidueClass<Int> | undefined, classOfMinusOne: Int): 'zero
   const rank = moduloFour(x.rank);
   return rank % 2 === 0 && xorInt(x.squareClass, rank === 2 ? classOfMinusOne : 0) === 0 ? 'zero' : 'nonzero';
 }
-
-const writeAtPrime =
-  (p: bigint) =>
-  (degree: number, x: ResidueClass<Int> | undefined): Expression =>
-    writeResidueClass(primeResidueField(p), degree, x);
 
 /** A residue at an unsplit composite: rank and a discriminant that is only known as a product. */
 function writeUnsplit(degree: number, x: ResidueClass<Int> | undefined): Expression {

@@ -1,7 +1,6 @@
 import { isOddInt, moduloFour, xorInt, type Int } from '../arith/int';
 import type { GradedRing } from '../ring/graded-ring';
-import type { ClassedUnit, ResidueClass, UnitGroup } from '../ring/residue-class-ring';
-import { residueClassRing } from '../ring/residue-class-ring';
+import { residueClassRing, type ClassedUnit, type ResidueClass, type UnitGroup } from '../ring/residue-class-ring';
 
 /** An entry as a place sees it: a = πⁿu, with the reduction of the unit u. */
 export interface LocalEntry<E> extends ClassedUnit<E> {
@@ -14,76 +13,114 @@ export interface Theta<E> {
   readonly d: ResidueClass<E> | undefined;
 }
 
+type Part<E> = ResidueClass<E> | undefined;
+
 /**
  * The Θ-ring K^MW_*(κ)[ξ] at a discrete valuation with uniformizer π: ξ of degree 1, ξ² = ξ[−1], xξ = εⁿξx for x of degree n.
  * The ring map Θ_π([πⁿu]) = [ū] + ξ·n_ε⟨ū⟩, Θ(η) = η gives Θ_π(α) = s_v^π(α) + ξ·∂_v^π(α)
  * (F. Morel, LNM 2052, Theorem 3.15 and Lemma 3.16, numbers from memory).
- * `local` describes an entry at the place and is asked once for each entry.
+ * `local` describes an entry at the place and is asked once for each entry and kind of use.
  */
 export function thetaRing<A extends object, E>(
   units: UnitGroup<E>,
   local: (entry: A) => LocalEntry<E>,
 ): GradedRing<A, Theta<E>> {
-  const kappa = residueClassRing(units);
-  type Part = ResidueClass<E> | undefined;
-  const minusOne = kappa.symbol({ unit: units.minusOne, squareClass: units.classOfMinusOne });
-  const epsilon: Part = { rank: -1, squareClass: units.classOfMinusOne, unit: undefined };
+  return new ThetaRing(units, local);
+}
 
-  const add = (degree: number, x: Part, y: Part): Part =>
-    x === undefined ? y : y === undefined ? x : kappa.add(degree, x, y);
-  const times = (degreeX: number, x: Part, degreeY: number, y: Part): Part =>
-    x === undefined || y === undefined ? undefined : kappa.multiply(degreeX, x, degreeY, y);
-  const pair = (s: Part, d: Part): Theta<E> | undefined => (s === undefined && d === undefined ? undefined : { s, d });
-  const same = (degree: number, x: Part, y: Part): boolean =>
-    x === undefined || y === undefined ? x === y : kappa.equal(degree, x, y);
+/** A class rather than closures: one is made for every place in sight. */
+class ThetaRing<A extends object, E> implements GradedRing<A, Theta<E>> {
+  private readonly kappa: GradedRing<ClassedUnit<E>, ResidueClass<E>>;
+  private readonly symbols = new Map<A, Theta<E> | null>();
+  private readonly angles = new Map<A, Theta<E> | null>();
 
-  /** n_ε⟨ū⟩: n_ε is ⟨1⟩ + ⟨−1⟩ + … with |n| summands, times −⟨−1⟩ for n < 0; so a product of n, or of |n|/2 rounded, signs. */
-  function epsilonMultiple({ valuation: n, squareClass }: LocalEntry<E>): ResidueClass<E> {
-    const remainder = moduloFour(n);
-    const oddSigns = remainder > 1;
-    const sign = oddSigns ? units.classOfMinusOne : 0;
-    return { rank: n, squareClass: isOddInt(n) ? xorInt(sign, squareClass) : sign, unit: undefined };
+  constructor(
+    private readonly units: UnitGroup<E>,
+    private readonly local: (entry: A) => LocalEntry<E>,
+  ) {
+    this.kappa = residueClassRing(units);
   }
 
-  const symbols = new Map<A, Theta<E> | undefined>();
-  const angles = new Map<A, Theta<E> | undefined>();
-  const cached = (cache: Map<A, Theta<E> | undefined>, entry: A, compute: () => Theta<E> | undefined) => {
-    const known = cache.get(entry);
-    if (known !== undefined || cache.has(entry)) return known;
-    const value = compute();
-    cache.set(entry, value);
-    return value;
-  };
+  integer(n: Int): Theta<E> | undefined {
+    return pair(this.kappa.integer(n), undefined);
+  }
 
-  return {
-    integer: (n) => pair(kappa.integer(n), undefined),
-    eta: (power) => pair(kappa.eta(power), undefined),
-    symbol: (entry) =>
-      cached(symbols, entry, () => {
-        const at = local(entry);
-        return pair(kappa.symbol(at), at.valuation === 0 ? undefined : epsilonMultiple(at));
-      }),
-    angle: (entry) =>
-      cached(angles, entry, () => {
-        // ⟨πⁿu⟩ = 1 + η[πⁿu]: s is ⟨ū⟩, and η·n_ε⟨ū⟩ is η⟨ū⟩ for n odd, 0 for n even
-        const at = local(entry);
-        const odd = isOddInt(at.valuation);
-        const eta = kappa.eta(1);
-        return pair(kappa.angle(at), odd && eta ? times(-1, eta, 0, kappa.angle(at)) : undefined);
-      }),
-    add: (degree, x, y) => pair(add(degree, x.s, y.s), add(degree - 1, x.d, y.d)),
-    negate: (degree, x) => pair(x.s && kappa.negate(degree, x.s), x.d && kappa.negate(degree - 1, x.d)),
-    multiply: (m, x, n, y) => {
-      // (s + ξd)(s′ + ξd′) = ss′ + ξ(ds′ + εᵐsd′ + [−1]dd′), m the degree of the left factor
-      const s = times(m, x.s, n, y.s);
-      if (x.d === undefined && y.d === undefined) return pair(s, undefined);
-      const degree = m + n - 1;
-      const left = times(m - 1, x.d, n, y.s);
-      const straight = times(m, x.s, n - 1, y.d);
-      const right = m % 2 === 0 ? straight : times(0, epsilon, degree, straight);
-      const both = times(1, minusOne, degree - 1, times(m - 1, x.d, n - 1, y.d));
-      return pair(s, add(degree, add(degree, left, right), both));
-    },
-    equal: (degree, x, y) => same(degree, x.s, y.s) && same(degree - 1, x.d, y.d),
-  };
+  eta(power: number): Theta<E> | undefined {
+    return pair(this.kappa.eta(power), undefined);
+  }
+
+  symbol(entry: A): Theta<E> | undefined {
+    let known = this.symbols.get(entry);
+    if (known === undefined) {
+      const at = this.local(entry);
+      known = pair(this.kappa.symbol(at), at.valuation === 0 ? undefined : this.epsilonMultiple(at)) ?? null;
+      this.symbols.set(entry, known);
+    }
+    return known ?? undefined;
+  }
+
+  angle(entry: A): Theta<E> | undefined {
+    let known = this.angles.get(entry);
+    if (known === undefined) {
+      // ⟨πⁿu⟩ = 1 + η[πⁿu]: s is ⟨ū⟩, and η·n_ε⟨ū⟩ is η⟨ū⟩ for n odd, 0 for n even
+      const at = this.local(entry);
+      const form = this.kappa.angle(at);
+      known = pair(form, isOddInt(at.valuation) ? this.times(-1, this.kappa.eta(1), 0, form) : undefined) ?? null;
+      this.angles.set(entry, known);
+    }
+    return known ?? undefined;
+  }
+
+  add(degree: number, x: Theta<E>, y: Theta<E>): Theta<E> | undefined {
+    return pair(this.plus(degree, x.s, y.s), this.plus(degree - 1, x.d, y.d));
+  }
+
+  negate(degree: number, x: Theta<E>): Theta<E> | undefined {
+    return pair(x.s && this.kappa.negate(degree, x.s), x.d && this.kappa.negate(degree - 1, x.d));
+  }
+
+  /** (s + ξd)(s′ + ξd′) = ss′ + ξ(ds′ + εᵐsd′ + [−1]dd′), m the degree of the left factor. */
+  multiply(m: number, x: Theta<E>, n: number, y: Theta<E>): Theta<E> | undefined {
+    const s = this.times(m, x.s, n, y.s);
+    const left = this.times(m - 1, x.d, n, y.s);
+    if (y.d === undefined) return pair(s, left);
+    const degree = m + n - 1;
+    const straight = this.times(m, x.s, n - 1, y.d);
+    const right = m % 2 === 0 ? straight : this.times(0, this.epsilon(), degree, straight);
+    const both = x.d && this.times(1, this.minusOne(), degree - 1, this.times(m - 1, x.d, n - 1, y.d));
+    return pair(s, this.plus(degree, this.plus(degree, left, right), both));
+  }
+
+  equal(degree: number, x: Theta<E>, y: Theta<E>): boolean {
+    return this.same(degree, x.s, y.s) && this.same(degree - 1, x.d, y.d);
+  }
+
+  private plus(degree: number, x: Part<E>, y: Part<E>): Part<E> {
+    return x === undefined ? y : y === undefined ? x : this.kappa.add(degree, x, y);
+  }
+
+  private times(m: number, x: Part<E>, n: number, y: Part<E>): Part<E> {
+    return x === undefined || y === undefined ? undefined : this.kappa.multiply(m, x, n, y);
+  }
+
+  private same(degree: number, x: Part<E>, y: Part<E>): boolean {
+    return x === undefined || y === undefined ? x === y : this.kappa.equal(degree, x, y);
+  }
+
+  private minusOne(): Part<E> {
+    return this.kappa.symbol({ unit: this.units.minusOne, squareClass: this.units.classOfMinusOne });
+  }
+
+  private epsilon(): Part<E> {
+    return { rank: -1, squareClass: this.units.classOfMinusOne, unit: undefined };
+  }
+
+  /** n_ε⟨ū⟩: n_ε is ⟨1⟩ + ⟨−1⟩ + … with |n| summands, times −⟨−1⟩ for n < 0; the number of signs is odd iff n is 2 or 3 modulo 4. */
+  private epsilonMultiple({ valuation: n, squareClass }: LocalEntry<E>): ResidueClass<E> {
+    const sign = moduloFour(n) > 1 ? this.units.classOfMinusOne : 0;
+    return { rank: n, squareClass: isOddInt(n) ? xorInt(sign, squareClass) : sign, unit: undefined };
+  }
 }
+
+const pair = <E>(s: Part<E>, d: Part<E>): Theta<E> | undefined =>
+  s === undefined && d === undefined ? undefined : { s, d };

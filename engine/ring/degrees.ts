@@ -9,11 +9,15 @@ interface DegreeSet {
 
 /** The degrees of the words a sum of terms multiplies out to, highest first. */
 export function degreesOf<A>(terms: readonly Term<A>[]): readonly number[] {
-  const set = degreeSet(terms);
-  if (set === undefined) return [];
-  return bitsOf(set.bits)
-    .map((i) => set.low + i)
-    .reverse();
+  const degrees = new Set<number>();
+  const sums: Term<A>[] = [];
+  for (const term of terms) {
+    if (term.factors.every((factor) => factor.kind === 'symbol')) degrees.add(term.factors.length - term.eta);
+    else sums.push(term);
+  }
+  const set = degreeSet(sums);
+  if (set !== undefined) for (const i of bitsOf(set.bits)) degrees.add(set.low + i);
+  return [...degrees].sort((a, b) => b - a);
 }
 
 function degreeSet<A>(terms: readonly Term<A>[]): DegreeSet | undefined {

@@ -7,7 +7,7 @@ export function evaluate<A, H>(terms: readonly Term<A>[], ring: GradedRing<A, H>
   const total: Graded<H> = new Map();
   for (const term of terms) {
     budget.spend('evaluating the words');
-    for (const [degree, value] of evaluateTerm(term, ring, budget)) accumulate(total, degree, value, ring);
+    addTerm(total, term, ring, budget);
   }
   return total;
 }
@@ -20,31 +20,33 @@ export function accumulate<A, H>(total: Graded<H>, degree: number, value: H, rin
   else total.set(degree, next);
 }
 
-function evaluateTerm<A, H>(term: Term<A>, ring: GradedRing<A, H>, budget: Budget): Iterable<readonly [number, H]> {
-  let degree = 0;
+/** Adds the value of a term: of one degree as long as its factors are symbols, graded from the first sum among them on. */
+function addTerm<A, H>(total: Graded<H>, term: Term<A>, ring: GradedRing<A, H>, budget: Budget): void {
+  let degree = -term.eta;
   let word = ring.integer(term.coefficient);
-  const times = (degreeY: number, y: H | undefined): void => {
-    word = word === undefined || y === undefined ? undefined : ring.multiply(degree, word, degreeY, y);
-    degree += degreeY;
-  };
-  if (term.eta > 0) times(-term.eta, ring.eta(term.eta));
-  for (const entry of term.angles) times(0, ring.angle(entry));
+  if (term.eta > 0) word = times(0, word, degree, ring.eta(term.eta), ring);
+  for (const entry of term.angles) word = times(degree, word, 0, ring.angle(entry), ring);
   let compound: Graded<H> | undefined;
   for (const factor of term.factors) {
-    if (word === undefined) return [];
+    if (word === undefined) return;
     if (factor.kind === 'power') {
       const value = power(evaluate(factor.of, ring, budget), factor.exponent, ring, budget);
       compound = multiply(compound ?? new Map([[degree, word]]), value, ring, budget);
     } else if (compound === undefined) {
-      times(1, ring.symbol(factor.entry));
+      word = times(degree, word, 1, ring.symbol(factor.entry), ring);
+      degree += 1;
     } else {
       const symbol = ring.symbol(factor.entry);
       compound = symbol === undefined ? new Map() : multiply(compound, new Map([[1, symbol]]), ring, budget);
     }
-    if (compound?.size === 0) return [];
+    if (compound?.size === 0) return;
   }
-  return compound ?? (word === undefined ? [] : [[degree, word]]);
+  if (compound !== undefined) for (const [d, value] of compound) accumulate(total, d, value, ring);
+  else if (word !== undefined) accumulate(total, degree, word, ring);
 }
+
+const times = <A, H>(m: number, x: H | undefined, n: number, y: H | undefined, ring: GradedRing<A, H>): H | undefined =>
+  x === undefined || y === undefined ? undefined : ring.multiply(m, x, n, y);
 
 function multiply<A, H>(x: Graded<H>, y: Graded<H>, ring: GradedRing<A, H>, budget: Budget): Graded<H> {
   const product: Graded<H> = new Map();

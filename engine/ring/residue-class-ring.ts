@@ -46,46 +46,76 @@ export interface ResidueClass<E> {
  * (W(𝔽_q) = ℤ/4 by multiples of ⟨1⟩); if the order is not known modulo 4, the rank is kept as it is.
  */
 export function residueClassRing<E>(units: UnitGroup<E>): GradedRing<ClassedUnit<E>, ResidueClass<E>> {
-  const make = (degree: number, rank: Int, squareClass: Int): ResidueClass<E> | undefined => {
-    if (degree < 0) {
-      if (units.orderModFour === 3) {
-        rank = moduloFour(squareClass === 0 ? rank : addInt(rank, 2));
-        squareClass = 0;
-      } else if (units.orderModFour !== undefined) rank = isOddInt(rank) ? 1 : 0;
-    }
-    return rank === 0 && squareClass === 0 ? undefined : { rank, squareClass, unit: undefined };
-  };
-  const makeUnit = (unit: E, squareClass: Int): ResidueClass<E> | undefined =>
-    units.equal(unit, units.one) ? undefined : { rank: 0, squareClass, unit };
-
-  /** A form of degree ≤ 0 times [u]: u^rank in degree 1; in degree ≤ 0, where [u] counts as ⟨u⟩ − 1, its rank times that class. */
-  const act = (degree: number, form: ResidueClass<E>, unit: E, squareClass: Int): ResidueClass<E> | undefined => {
-    const parity = odd(form.rank, squareClass);
-    return degree === 0 ? makeUnit(units.power(unit, form.rank), parity) : make(degree + 1, 0, parity);
-  };
-
-  return {
-    integer: (n) => make(0, n, 0),
-    symbol: (a) => makeUnit(a.unit, a.squareClass),
-    angle: (a) => make(0, 1, a.squareClass),
-    eta: (power) => make(-power, 1, 0),
-    add: (degree, x, y) =>
-      x.unit !== undefined && y.unit !== undefined
-        ? makeUnit(units.multiply(x.unit, y.unit), xorInt(x.squareClass, y.squareClass))
-        : make(degree, addInt(x.rank, y.rank), xorInt(x.squareClass, y.squareClass)),
-    negate: (degree, x) =>
-      x.unit !== undefined ? makeUnit(units.power(x.unit, -1), x.squareClass) : make(degree, negateInt(x.rank), x.squareClass),
-    multiply: (degreeX, x, degreeY, y) => {
-      if (x.unit !== undefined) return y.unit !== undefined ? undefined : act(degreeY, y, x.unit, x.squareClass);
-      if (y.unit !== undefined) return act(degreeX, x, y.unit, y.squareClass);
-      const squareClass = xorInt(odd(x.rank, y.squareClass), odd(y.rank, x.squareClass));
-      return make(degreeX + degreeY, boundedCoefficient(multiplyInt(x.rank, y.rank)), squareClass);
-    },
-    equal: (_degree, x, y) =>
-      x.unit !== undefined
-        ? y.unit !== undefined && units.equal(x.unit, y.unit)
-        : y.unit === undefined && x.rank === y.rank && x.squareClass === y.squareClass,
-  };
+  return new ResidueClassRing(units);
 }
 
-const odd = (rank: Int, squareClass: Int): Int => (isOddInt(rank) ? squareClass : 0);
+/** A class rather than closures: one is made for every place in sight. */
+class ResidueClassRing<E> implements GradedRing<ClassedUnit<E>, ResidueClass<E>> {
+  constructor(private readonly units: UnitGroup<E>) {}
+
+  integer(n: Int): ResidueClass<E> | undefined {
+    return this.form(0, n, 0);
+  }
+
+  symbol(a: ClassedUnit<E>): ResidueClass<E> | undefined {
+    return this.symbolOf(a.unit, a.squareClass);
+  }
+
+  angle(a: ClassedUnit<E>): ResidueClass<E> | undefined {
+    return this.form(0, 1, a.squareClass);
+  }
+
+  eta(power: number): ResidueClass<E> | undefined {
+    return this.form(-power, 1, 0);
+  }
+
+  add(degree: number, x: ResidueClass<E>, y: ResidueClass<E>): ResidueClass<E> | undefined {
+    const squareClass = xorInt(x.squareClass, y.squareClass);
+    return x.unit !== undefined && y.unit !== undefined
+      ? this.symbolOf(this.units.multiply(x.unit, y.unit), squareClass)
+      : this.form(degree, addInt(x.rank, y.rank), squareClass);
+  }
+
+  negate(degree: number, x: ResidueClass<E>): ResidueClass<E> | undefined {
+    return x.unit !== undefined
+      ? this.symbolOf(this.units.power(x.unit, -1), x.squareClass)
+      : this.form(degree, negateInt(x.rank), x.squareClass);
+  }
+
+  multiply(m: number, x: ResidueClass<E>, n: number, y: ResidueClass<E>): ResidueClass<E> | undefined {
+    if (x.unit !== undefined) return y.unit !== undefined ? undefined : this.act(n, y, x.unit, x.squareClass);
+    if (y.unit !== undefined) return this.act(m, x, y.unit, y.squareClass);
+    const squareClass = xorInt(ifOdd(x.rank, y.squareClass), ifOdd(y.rank, x.squareClass));
+    return this.form(m + n, boundedCoefficient(multiplyInt(x.rank, y.rank)), squareClass);
+  }
+
+  equal(_degree: number, x: ResidueClass<E>, y: ResidueClass<E>): boolean {
+    if (x.unit !== undefined) return y.unit !== undefined && this.units.equal(x.unit, y.unit);
+    return y.unit === undefined && x.rank === y.rank && x.squareClass === y.squareClass;
+  }
+
+  /** A class of degree ≤ 0 in canonical form. */
+  private form(degree: number, rank: Int, squareClass: Int): ResidueClass<E> | undefined {
+    if (degree < 0) {
+      const { orderModFour } = this.units;
+      if (orderModFour === 3) {
+        rank = moduloFour(squareClass === 0 ? rank : addInt(rank, 2));
+        squareClass = 0;
+      } else if (orderModFour !== undefined) rank = isOddInt(rank) ? 1 : 0;
+    }
+    return rank === 0 && squareClass === 0 ? undefined : { rank, squareClass, unit: undefined };
+  }
+
+  /** [u] in degree 1. */
+  private symbolOf(unit: E, squareClass: Int): ResidueClass<E> | undefined {
+    return this.units.equal(unit, this.units.one) ? undefined : { rank: 0, squareClass, unit };
+  }
+
+  /** A form of degree ≤ 0 times [u]: u^rank in degree 1; in degree ≤ 0, where [u] counts as ⟨u⟩ − 1, its rank times that class. */
+  private act(degree: number, form: ResidueClass<E>, unit: E, squareClass: Int): ResidueClass<E> | undefined {
+    const parity = ifOdd(form.rank, squareClass);
+    return degree === 0 ? this.symbolOf(this.units.power(unit, form.rank), parity) : this.form(degree + 1, 0, parity);
+  }
+}
+
+const ifOdd = (rank: Int, squareClass: Int): Int => (isOddInt(rank) ? squareClass : 0);
