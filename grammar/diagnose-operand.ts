@@ -75,9 +75,6 @@ function missingExponent(situation: Situation): Finding {
 }
 
 function missingIndex(situation: Situation): Finding {
-  const owner = situation.before.find(
-    (token) => token.kind !== 'underline' && !(token.kind === 'open' && token.bracket === 'brace'),
-  );
   if (situation.inEntry) {
     return {
       detail: `The index of a letter is a number, as in x_1, and it is missing ${situation.where}.`,
@@ -85,7 +82,7 @@ function missingIndex(situation: Situation): Finding {
     };
   }
   return {
-    detail: `After ${spell(situation, owner)}_ stands eps only.`,
+    detail: 'After the index sign of a number stands eps only, as in 3_eps.',
     expected: [{ text: '`eps`', insert: 'eps' }],
   };
 }

@@ -27,6 +27,13 @@ function decimal({ text, here, before }: Situation): Finding | undefined {
   }
   const exact = denominator === 1n ? String(numerator) : `${numerator}/${denominator}`;
   const place = { offset: here.start - whole.length, offending: written };
+  if (before[whole === '' ? 0 : 1]?.kind === 'hat') {
+    return {
+      ...place,
+      detail: `${written} is a decimal, and an exponent is an integer.`,
+      expected: [{ text: 'an integer' }],
+    };
+  }
   if (!here.inEntry) {
     return {
       ...place,

@@ -84,3 +84,12 @@ function checkNesting(text: string): void {
     }
   }
 }
+
+/** For a host whose call stack is too small for what the limits allow. */
+export const tooDeepHere = (text: string): ReadingError =>
+  new ReadingError(text, {
+    detail: 'The brackets nest too deeply to be read here.',
+    offset: 0,
+    offending: '',
+    expected: [{ text: 'a flatter expression' }],
+  });

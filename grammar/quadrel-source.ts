@@ -88,8 +88,10 @@ Quadrel {
   otherTimes    = "·" | "⋅" | "×" | "∗" | "∙" | "\\cdot" ~latin | "\\times" ~latin | "\\ast" ~latin
   angleOpen     = "⟨" | "\u{2329}" | "\u{3008}" | "\\langle" ~latin
   angleClose    = "⟩" | "\u{232A}" | "\u{3009}" | "\\rangle" ~latin
-  pfisterOpen   = "⟪" | "《" | twice<"⟨"> | twice<"\\langle"> ~latin | "\\llangle" ~latin
-  pfisterClose  = "⟫" | "》" | twice<"⟩"> | twice<"\\rangle"> ~latin | "\\rrangle" ~latin
+  pfisterOpen (a bracket)
+                = "⟪" | "《" | twice<"⟨"> | twice<"\\langle"> ~latin | "\\llangle" ~latin
+  pfisterClose (a closing bracket)
+                = "⟫" | "》" | twice<"⟩"> | twice<"\\rangle"> ~latin | "\\rrangle" ~latin
   superscript   = "⁻"? ("⁰" | "¹" | "²" | "³" | "⁴".."⁹")+
   subscriptDigits = ("₀".."₉")+
 
@@ -102,8 +104,8 @@ Quadrel {
             | realsSign                                                            -- reals
             | complexesSign                                                        -- complexes
             | ("any" ~latin | boldface<"any">)                                     -- any
-  fieldStep = "(" gap fieldLetter gap ")" gap                                           -- functions
-            | "[" gap fieldLetter gap "]" gap ("/" | "∕" | "⁄") gap "(" gap element ")" gap              -- extension
+  fieldStep = "(" gap fieldLetter gap ")" gap                                      -- functions
+            | "[" gap fieldLetter gap "]" gap ("/" | "∕" | "⁄") gap "(" gap element ")" gap -- extension
   rationalsSign = "Q" | "ℚ" | "𝐐" | boldface<"Q"> | "\\QQ" ~latin | "\\Q" ~latin
   realsSign     = "R" | "ℝ" | "𝐑" | boldface<"R"> | "\\RR" ~latin | "\\R" ~latin
   complexesSign = "C" | "ℂ" | "𝐂" | boldface<"C"> | "\\CC" ~latin | "\\C" ~latin

@@ -7,7 +7,7 @@ import { diagnose, type Reading } from './diagnose';
 import { elementOf } from './element-tree';
 import { expressionOf } from './expression-tree';
 import { fieldNameOf } from './field-tree';
-import { checkSize } from './limits';
+import { checkSize, tooDeepHere } from './limits';
 import { quadrelSource } from './quadrel-source';
 import { conditionOf, statementOf } from './statement-tree';
 import { SyntaxNode } from './syntax-node';
@@ -26,12 +26,18 @@ const startRules: Record<Reading, string> = {
   field: 'wholeFieldName',
 };
 
-/** The syntax tree of a text without the marks around the whole, or a ReadingError. */
-function parse(text: string, reading: Reading): SyntaxNode {
+/** Builds a tree from the syntax tree of a text without the marks around the whole, or throws a ReadingError. */
+function parse<T>(text: string, reading: Reading, build: (node: SyntaxNode) => T): T {
   checkSize(text, reading === 'statement' ? 'statement' : 'expression');
-  const result = quadrel().match(text, startRules[reading]);
-  if (result.failed()) throw diagnose(text, result.getRightmostFailurePosition(), reading);
-  return undressed(SyntaxNode.root(text, result));
+  try {
+    const result = quadrel().match(text, startRules[reading]);
+    if (result.failed()) throw diagnose(text, result.getRightmostFailurePosition(), reading);
+    return build(undressed(SyntaxNode.root(text, result)));
+  } catch (error) {
+    // The deepest nesting allowed fits the usual call stack; a host with a smaller one gets a refusal, not a crash.
+    if (error instanceof RangeError) throw tooDeepHere(text);
+    throw error;
+  }
 }
 
 /**
@@ -40,16 +46,16 @@ function parse(text: string, reading: Reading): SyntaxNode {
  * Every node carries the stretch of `text` it was read from. Throws a ReadingError for anything else, and for a text past
  * the limits of limits.ts. That entries are units of a field is not looked at here.
  */
-export const readExpression = (text: string): Expression => expressionOf(parse(text, 'expression'));
+export const readExpression = (text: string): Expression => parse(text, 'expression', expressionOf);
 
 /** Reads an expression, an equality or a chain of equalities, with its hypotheses after a semicolon. */
-export const readStatement = (text: string): Statement => statementOf(parse(text, 'statement'));
+export const readStatement = (text: string): Statement => parse(text, 'statement', statementOf);
 
 /** Reads a field element, as it stands inside a bracket. */
-export const readElement = (text: string): Element => elementOf(parse(text, 'element'));
+export const readElement = (text: string): Element => parse(text, 'element', elementOf);
 
 /** Reads one hypothesis: a ≠ b, a = b, char ≠ p, char = p. Whether p is a prime is not looked at here. */
-export const readCondition = (text: string): Condition => conditionOf(parse(text, 'condition'));
+export const readCondition = (text: string): Condition => parse(text, 'condition', conditionOf);
 
 /** Reads the name of a field. Its arithmetic (is the order a prime power, the modulus irreducible) is not looked at here. */
-export const readFieldName = (text: string): FieldName => fieldNameOf(parse(text, 'field'));
+export const readFieldName = (text: string): FieldName => parse(text, 'field', fieldNameOf);
