@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { Bench } from '../_components/bench/bench';
+import { Colophon } from '../_components/shell/colophon';
 
 export const metadata: Metadata = { title: 'Bench' };
 
@@ -15,5 +16,10 @@ export default async function BenchPage({ searchParams }: Props) {
   const asked = one(statement);
   const over = one(field);
   const opened = asked === undefined && over === undefined ? undefined : { field: over ?? 'Q', statement: asked ?? '' };
-  return <Bench key={`${over ?? ''} ${asked ?? ''}`} opened={opened} />;
+  return (
+    <>
+      <Bench key={`${over ?? ''} ${asked ?? ''}`} opened={opened} />
+      <Colophon />
+    </>
+  );
 }

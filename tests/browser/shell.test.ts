@@ -5,7 +5,8 @@ import { send } from '../harness/http';
 
 const pages = ['/', '/help'] as const;
 
-const overflow = (page: Page) => page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
+const overflow = (page: Page) =>
+  page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
 const background = (page: Page) => page.evaluate(() => getComputedStyle(document.body).backgroundColor);
 const stone = { light: 'rgb(201, 204, 197)', dark: 'rgb(18, 21, 23)' };
 
@@ -42,7 +43,7 @@ test('follows the system, and a chosen theme is kept and there before the first 
   await page.reload();
   expect(await page.evaluate(() => document.documentElement.dataset.themeAtInteractive)).toBe('light');
   expect(await background(page)).toBe(stone.light);
-  await page.getByRole('contentinfo').getByRole('radio', { name: 'as the system' }).click();
+  await page.getByRole('contentinfo').getByRole('radio', { name: 'system' }).click();
   await expect.poll(() => background(page)).toBe(stone.dark);
 });
 
@@ -56,7 +57,7 @@ test('the first tab stop skips to the sheet', async () => {
 
 test('H lists the keys, O the rooms, and letters can be turned off', async () => {
   const page = await openPage('/help');
-  await page.getByRole('button', { name: 'all keys' }).waitFor();
+  await page.getByRole('button', { name: 'All keys (H)' }).waitFor();
   await expect
     .poll(async () => {
       await page.keyboard.press('h');
@@ -80,7 +81,7 @@ test('H lists the keys, O the rooms, and letters can be turned off', async () =>
   await page.reload();
   await page.keyboard.press('o');
   expect(await page.getByRole('dialog').count()).toBe(0);
-  await page.getByRole('button', { name: 'all keys' }).click();
+  await page.getByRole('button', { name: 'All keys (H)' }).click();
   await page.getByRole('checkbox', { name: 'Single letters act' }).check();
 });
 
@@ -128,5 +129,7 @@ test('print shows the sheet only', async () => {
 
 test('who asks for less motion gets none', async () => {
   const page = await openPage('/help', { still: true });
-  expect(await page.evaluate(() => getComputedStyle(document.documentElement).getPropertyValue('--lay').trim())).toBe('0ms');
+  expect(await page.evaluate(() => getComputedStyle(document.documentElement).getPropertyValue('--lay').trim())).toBe(
+    '0ms',
+  );
 });

@@ -3,7 +3,6 @@
 import './bench.css';
 import { useMemo } from 'react';
 import { Button } from '../button/button';
-import { Colophon } from '../shell/colophon';
 import { Slip } from '../slip/slip';
 import { Announcer } from './announcer';
 import { AskClient } from './ask-client';
@@ -46,7 +45,6 @@ function OpenBench({ opened }: Props) {
       </section>
       <Sheet bench={bench} />
       <Announcer asked={bench.asked} />
-      <Colophon />
     </>
   );
 }

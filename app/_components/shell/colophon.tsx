@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { engineVersion } from '@/engine/version';
 import { Formula } from '../math/formula';
 import { ThemeChoice } from '../theme/theme-choice';
 import { KeysLink } from './keys-link';
@@ -21,10 +22,9 @@ export function Colophon({ children }: { children?: ReactNode }) {
               </span>
             </>
           )}
+          <span>Engine {engineVersion}</span>
           <KeysLink />
-          <span className="theme">
-            <ThemeChoice small />
-          </span>
+          <ThemeChoice small />
         </div>
       </div>
     </footer>

@@ -7,9 +7,15 @@ export function KeysLink() {
   const openLeaf = useOpenLeaf();
   return (
     <span>
-      Every action has a key: press <kbd>H</kbd>, or see{' '}
-      <button type="button" className="underline" aria-haspopup="dialog" onClick={() => openLeaf('keys')}>
-        all keys
+      Every action has a key: press{' '}
+      <button
+        type="button"
+        className="key-button"
+        aria-haspopup="dialog"
+        aria-label="All keys (H)"
+        onClick={() => openLeaf('keys')}
+      >
+        <kbd>H</kbd>
       </button>
     </span>
   );

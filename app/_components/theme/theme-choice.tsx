@@ -7,7 +7,7 @@ import { stored, useStored } from './stored';
 const theme = stored('quadrel.theme', ['system', 'light', 'dark'], 'system');
 
 const options = [
-  { value: 'system', label: 'as the system' },
+  { value: 'system', label: 'system' },
   { value: 'light', label: 'light' },
   { value: 'dark', label: 'dark' },
 ] as const;

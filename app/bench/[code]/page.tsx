@@ -2,6 +2,7 @@ import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { openLink } from '@/lib/links/links';
 import { Bench } from '../../_components/bench/bench';
+import { Colophon } from '../../_components/shell/colophon';
 
 export const metadata: Metadata = { title: 'Bench' };
 
@@ -14,5 +15,10 @@ export default async function LinkedBenchPage({ params }: Props) {
   const { code } = await params;
   const opened = await openLink(code);
   if (!opened) notFound();
-  return <Bench key={code} opened={opened} />;
+  return (
+    <>
+      <Bench key={code} opened={opened} />
+      <Colophon />
+    </>
+  );
 }
