@@ -183,6 +183,20 @@ describe('the methods one by one', () => {
     }
   });
 
+  it('the quadratic sieve ends on short numbers too, where polynomials are few', () => {
+    for (const digits of [7, 8, 9, 10, 12]) {
+      fc.assert(
+        fc.property(prime(digits), prime(digits), (p, q) => {
+          fc.pre(p !== q);
+          const divisor = quadraticSieve(p * q, unlimited, '');
+          return divisor === undefined || divides(divisor, p * q);
+        }),
+        { numRuns: 30 },
+      );
+    }
+    expect(divides(quadraticSieve(494918322905185120337659n, unlimited, ''), 494918322905185120337659n)).toBe(true);
+  });
+
   it('trial division lists the small primes that divide', () => {
     fc.assert(
       fc.property(fc.oneof(fc.bigInt({ min: 1n, max: 1n << 50n }), fc.bigInt({ min: 1n, max: 1n << 900n })), (n) => {

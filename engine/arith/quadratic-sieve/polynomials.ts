@@ -83,38 +83,43 @@ function move(first: Int32Array, second: Int32Array, step: Int32Array, primes: I
   }
 }
 
-/** Sets of places in the base whose primes multiply to about `target`, never the same twice, without end. */
+/**
+ * Sets of places in the base whose primes multiply to about `target`, never the same twice: all but the last are drawn from
+ * around the place where equal primes would do, and the last makes up for them. The more often a set has come before, the wider the
+ * draw; it ends when even the whole base gives nothing new.
+ */
 function* leadingCoefficients(target: bigint, base: FactorBase, stream: () => number): Generator<number[]> {
   const { primes } = base;
-  const seen = new Set<string>();
-  const from = primes.findIndex((p) => p > (primes.length < 150 ? 20 : 100));
   const last = primes.length - 1;
-  // As few primes as can reach the target from around two thirds of the way up the base, but at least two.
-  const typical = BigInt(primes[from + ((last - from) * 2 - (((last - from) * 2) % 3)) / 3]!);
+  const from = primes.findIndex((p) => p > (primes.length < 150 ? 20 : 100));
+  const draw = (low: number, high: number): number => {
+    const [bottom, top] = [low > from ? low : from, high < last ? high : last];
+    return bottom >= top ? top : bottom + ((stream() * 4294967296) % (top - bottom + 1));
+  };
+  // So many primes that each is nearest to one two thirds of the way up the base, in proportion.
+  const typical = BigInt(primes[last - (last - (last % 3)) / 3]!);
   let count = 2;
-  for (let product = typical ** 2n; product * typical <= target * 2n; product *= typical) count++;
+  while (typical ** BigInt(2 * count + 1) < target ** 2n || BigInt(primes[last]!) ** BigInt(count) < target) count++;
   const centre = primes.findIndex((p) => BigInt(p) ** BigInt(count) >= target);
-  const around = centre === -1 ? last : centre;
-  for (let misses = 0, spread = 15; ; misses++) {
-    if (misses > 50) [misses, spread] = [0, spread + 10];
-    const low = around - spread > from ? around - spread : from;
-    const high = around + spread < last ? around + spread : last;
+  const seen = new Set<string>();
+  for (let spread = 15, misses = 0; spread - 15 <= primes.length;) {
     const chosen = new Set<number>();
     let product = 1n;
-    while (chosen.size < count - 1) {
-      const place = low + ((stream() * 4294967296) % (high - low + 1));
+    for (let tries = 0; chosen.size < count - 1 && tries < 1000; tries++) {
+      const place = draw(centre - spread, centre + spread);
       if (!chosen.has(place)) product *= BigInt(primes[place]!);
       chosen.add(place);
     }
-    const wanted = Number(target / product);
-    let nearest = primes.findIndex((p) => p >= wanted);
-    if (nearest === -1) nearest = last;
-    while (nearest > from && chosen.has(nearest)) nearest--;
-    if (nearest < from || chosen.has(nearest)) continue;
-    const places = [...chosen, nearest].sort((x, y) => x - y);
-    const key = places.join();
-    if (seen.has(key)) continue;
-    seen.add(key);
+    const wanted = target / product;
+    const nearest = primes.findIndex((p) => BigInt(p) >= wanted);
+    const slack = (spread - 15) / 5;
+    chosen.add(draw((nearest === -1 ? last : nearest) - slack, (nearest === -1 ? last : nearest) + slack));
+    const places = [...chosen].sort((x, y) => x - y);
+    if (chosen.size < count || seen.has(places.join())) {
+      if (++misses > 50) [misses, spread] = [0, spread + 5];
+      continue;
+    }
+    seen.add(places.join());
     misses = 0;
     yield places;
   }

@@ -15,10 +15,10 @@ const LEAST_SIEVED = 24;
 
 /**
  * A proper divisor of an odd composite n that is no perfect power and has no small prime factor, by the self-initialising
- * quadratic sieve with one large prime. C. Pomerance, The quadratic sieve factoring algorithm, EUROCRYPT 84; R. Crandall,
+ * quadratic sieve with one large prime; `undefined` when a short n has too few polynomials. C. Pomerance, The quadratic sieve factoring algorithm, EUROCRYPT 84; R. Crandall,
  * C. Pomerance, Prime Numbers, section 6.1. The sieve only proposes values: every relation is divided out exactly.
  */
-export function quadraticSieve(n: bigint, budget: Budget, doing: string): bigint {
+export function quadraticSieve(n: bigint, budget: Budget, doing: string): bigint | undefined {
   const spend = (): void => budget.spend(doing);
   const kn = n * BigInt(multiplier(n));
   const { size, half, largePrime } = parameters(bitLength(kn));
@@ -40,7 +40,7 @@ export function quadraticSieve(n: bigint, budget: Budget, doing: string): bigint
     if (divisor !== undefined) return divisor;
     wanted = relations.full.length + SURPLUS;
   }
-  throw new Error('the polynomials of the sieve have no end');
+  return undefined;
 }
 
 /**
