@@ -1,27 +1,30 @@
 import { z } from 'zod';
 
-const seconds = z.coerce.number().positive().max(3600);
+const number = () => z.coerce.number({ error: 'must be a number' });
+const whole = (least: number, most = Number.MAX_SAFE_INTEGER) =>
+  number().int('must be a whole number').min(least, `must be at least ${least}`).max(most, `must be at most ${most}`);
+const seconds = () => number().positive('must be positive').max(3600, 'must be at most 3600');
 
 /** Everything the server reads from its environment. There is no default for anything secret. */
 const settings = z.object({
   /** Where the PostgreSQL database is; the launcher sets it when it runs a cluster of its own. */
   DATABASE_URL: z.string().regex(/^postgres(ql)?:\/\//, 'must begin with postgres:// or postgresql://'),
   /** The port the server listens on. */
-  PORT: z.coerce.number().int().min(1).max(65535).default(3000),
+  PORT: whole(1, 65535).default(3000),
   /** Computations one address may ask for in a minute; 0 sets no limit. */
-  COMPUTE_QUOTA_PER_MINUTE: z.coerce.number().int().min(0).default(3000),
+  COMPUTE_QUOTA_PER_MINUTE: whole(0).default(3000),
   /** Seconds of CPU one interactive computation may take. */
-  COMPUTE_SECONDS_INTERACTIVE: seconds.default(2),
+  COMPUTE_SECONDS_INTERACTIVE: seconds().default(2),
   /** Seconds of CPU one computation of a batch may take. */
-  COMPUTE_SECONDS_BATCH: seconds.default(60),
+  COMPUTE_SECONDS_BATCH: seconds().default(60),
   /** Worker threads for computations; 0 takes one for each processor, at least two. */
-  COMPUTE_THREADS: z.coerce.number().int().min(0).max(64).default(0),
+  COMPUTE_THREADS: whole(0, 64).default(0),
   /** Largest heap of one worker thread, in MiB. */
-  COMPUTE_MEMORY_MIB: z.coerce.number().int().min(64).max(16384).default(512),
+  COMPUTE_MEMORY_MIB: whole(64, 16384).default(512),
   /** Connections the server keeps to the database, at most. */
-  DATABASE_CONNECTIONS: z.coerce.number().int().min(1).max(200).default(10),
+  DATABASE_CONNECTIONS: whole(1, 200).default(10),
   /** Whether X-Forwarded-For names the caller; only behind a proxy of one's own that sets it. */
-  TRUST_PROXY: z.enum(['0', '1']).default('0'),
+  TRUST_PROXY: z.enum(['0', '1'], { error: 'must be 0 or 1' }).default('0'),
 });
 
 export type Config = z.infer<typeof settings>;

@@ -24,8 +24,16 @@ describe('configuration', () => {
   });
 
   test('every wrong setting is named at once', () => {
-    const wrong = { DATABASE_URL: 'mysql://x', PORT: '70000', COMPUTE_SECONDS_INTERACTIVE: 'soon' };
-    expect(() => readConfig(wrong)).toThrow(/DATABASE_URL.*PORT.*COMPUTE_SECONDS_INTERACTIVE/);
+    const wrong = {
+      DATABASE_URL: 'mysql://x',
+      PORT: '70000',
+      COMPUTE_THREADS: '1.5',
+      COMPUTE_SECONDS_INTERACTIVE: 'soon',
+    };
+    expect(() => readConfig(wrong)).toThrow(
+      'The configuration cannot be used. DATABASE_URL: must begin with postgres:// or postgresql://; PORT: must be at most 65535; ' +
+        'COMPUTE_SECONDS_INTERACTIVE: must be a number; COMPUTE_THREADS: must be a whole number. README.md lists the settings.',
+    );
   });
 
   test('no secret has a default', () => {
