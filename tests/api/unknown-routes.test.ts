@@ -2,6 +2,7 @@ import { expect, test } from 'vitest';
 import { get, send } from '../harness/http';
 
 test.each([
+  '/api/v1',
   '/api/v1/nothing',
   '/api/v1/normalize/more',
   '/api/v1/forms',
