@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { openContext, openPage, watch } from '../harness/browser';
-import { benchOf, expectWord, openBench, written } from './bench-page';
+import { benchOf, eventually, expectWord, openBench, written } from './bench-page';
 
 describe('nothing typed is lost', () => {
   test('a link reopens the same statement over the same field', async () => {
@@ -8,7 +8,7 @@ describe('nothing typed is lost', () => {
     await expectWord(bench, 'Equal');
     await bench.page.keyboard.press('l');
     const told = bench.page.locator('.told');
-    await expect.poll(() => told.innerText()).toMatch(/^Copied the link \/bench\/[0-9a-z]{10}\.$/);
+    await eventually(() => told.innerText()).toMatch(/^Copied the link \/bench\/[0-9a-z]{10}\.$/);
     const link = await bench.page.evaluate(() => navigator.clipboard.readText());
     const again = benchOf(await openPage(new URL(link).pathname));
     await expectWord(again, 'Equal');
@@ -25,7 +25,7 @@ describe('nothing typed is lost', () => {
     const bench = await openBench();
     await bench.line.pressSequentially('[2] + <3');
     await bench.page.reload();
-    await expect.poll(() => written(bench)).toBe('[2] + <3');
+    await eventually(() => written(bench)).toBe('[2] + <3');
   });
 
   test('a kept text is offered where the address opens another one, and not overwritten', async () => {
@@ -38,9 +38,9 @@ describe('nothing typed is lost', () => {
     await page.goto('/bench?field=R&statement=%3C2%3E%20%3D%201');
     await expectWord(bench, 'Equal');
     expect(await written(bench)).toBe('<2> = 1');
-    await expect.poll(() => page.getByText('Your text was kept on this device.').count()).toBe(1);
+    await eventually(() => page.getByText('Your text was kept on this device.').count()).toBe(1);
     await page.getByRole('button', { name: 'Go on with it' }).click();
-    await expect.poll(() => written(bench)).toBe('[7] = [7]');
+    await eventually(() => written(bench)).toBe('[7] = [7]');
   });
 
   test('the last field is remembered', async () => {
@@ -48,9 +48,9 @@ describe('nothing typed is lost', () => {
     await bench.picker.click();
     await bench.page.getByRole('textbox', { name: 'Name of the field' }).fill('F_7');
     await bench.page.keyboard.press('Enter');
-    await expect.poll(() => bench.picker.innerText()).toMatch(/7/);
+    await eventually(() => bench.picker.innerText()).toMatch(/7/);
     await bench.page.reload();
-    await expect.poll(() => bench.picker.innerText()).toMatch(/7/);
+    await eventually(() => bench.picker.innerText()).toMatch(/7/);
   });
 
   test('a statement is copied as text and as TeX', async () => {
@@ -58,8 +58,8 @@ describe('nothing typed is lost', () => {
     await expectWord(bench, 'Equal');
     const clipboard = () => bench.page.evaluate(() => navigator.clipboard.readText());
     await bench.page.keyboard.press('c');
-    await expect.poll(clipboard).toMatch(/^<2>.*= <5>/);
+    await eventually(clipboard).toMatch(/^<2>.*= <5>/);
     await bench.page.keyboard.press('t');
-    await expect.poll(clipboard).toMatch(/\\langle 2\s*\\rangle/);
+    await eventually(clipboard).toMatch(/\\langle 2\s*\\rangle/);
   });
 });

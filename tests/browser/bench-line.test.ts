@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { expectWord, openBench, written } from './bench-page';
+import { eventually, expectWord, openBench, written } from './bench-page';
 
 describe('the written line', () => {
   test('an error is shown at its column, in the line and under it, and the last answer is marked old', async () => {
@@ -7,7 +7,7 @@ describe('the written line', () => {
     await expectWord(bench, 'Equal');
     await bench.line.fill('[5][6] + <2> + <3 = [-1][6] + <5> + <30>');
     const note = bench.page.locator('.fault');
-    await expect.poll(() => note.innerText()).toMatch(/^Column 19\./);
+    await eventually(() => note.innerText()).toMatch(/^Column 19\./);
     expect(await bench.page.locator('.line-bad').innerText()).toBe('=');
     expect(await bench.page.locator('.line-open').first().innerText()).toContain('<3');
     expect(await bench.status.innerText()).toBe('Not read past column 18.');
@@ -21,13 +21,13 @@ describe('the written line', () => {
   test('an entry that is zero in the field is refused at its column', async () => {
     const bench = await openBench({ field: 'Q', statement: '[2][1-1]' });
     const note = bench.page.locator('.fault');
-    await expect.poll(() => note.innerText()).toMatch(/^Column 5\. .*unit/);
+    await eventually(() => note.innerText()).toMatch(/^Column 5\. .*unit/);
     expect(await bench.page.locator('.line-bad').count()).toBe(1);
   });
 
   test('a field that is none is refused beside the field, in plain words', async () => {
     const bench = await openBench({ field: 'F_6', statement: '[5]' });
-    await expect.poll(() => bench.page.locator('.hint-field').innerText()).toMatch(/6/);
+    await eventually(() => bench.page.locator('.hint-field').innerText()).toMatch(/6/);
   });
 
   test('insertion keys put the caret inside, and Alt with a bracket encloses what is chosen', async () => {
@@ -52,7 +52,7 @@ describe('the written line', () => {
   test('the partner of the bracket at the caret is underlined', async () => {
     const bench = await openBench();
     await bench.line.pressSequentially('[2]<3>');
-    await expect.poll(() => bench.page.locator('.line-partner').allInnerTexts()).toEqual(['<']);
+    await eventually(() => bench.page.locator('.line-partner').allInnerTexts()).toEqual(['<']);
   });
 
   test('Ctrl+Enter asks at once, Esc leaves the line', async () => {
@@ -73,7 +73,7 @@ describe('the written line', () => {
     await bench.line.fill(long);
     await bench.line.press('End');
     await bench.page.keyboard.type(' + <7>');
-    await expect.poll(() => written(bench)).toMatch(/\+ <7>$/);
+    await eventually(() => written(bench)).toMatch(/\+ <7>$/);
   });
 
   test('long work can be stopped', async () => {
@@ -84,7 +84,7 @@ describe('the written line', () => {
     await stop.waitFor();
     await bench.line.press('Escape');
     await bench.page.keyboard.press('s');
-    await expect.poll(() => bench.status.innerText()).toMatch(/Stopped before an answer came\./);
+    await eventually(() => bench.status.innerText()).toMatch(/Stopped before an answer came\./);
   });
 
   test('a refusal for too many questions says when to ask again', async () => {
@@ -104,8 +104,8 @@ describe('the written line', () => {
       }),
     );
     await bench.line.fill('[2] = [3]');
-    await expect
-      .poll(() => bench.status.innerText())
-      .toMatch(/^Too many questions from this address\. Ask again in 40 seconds\./);
+    await eventually(() => bench.status.innerText()).toMatch(
+      /^Too many questions from this address\. Ask again in 40 seconds\./,
+    );
   });
 });

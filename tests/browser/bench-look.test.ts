@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { findings, type Sight } from '../harness/browser';
-import { expectWord, openBench, scrollsSideways, written } from './bench-page';
+import { eventually, expectWord, openBench, scrollsSideways, written } from './bench-page';
 
 const equal = { field: 'Q', statement: '[5][6] + <2> + <3> = [-1][6] + <5> + <30>' };
 const different = { field: 'Q', statement: '[6] = [2] + [3]' };
@@ -21,7 +21,7 @@ describe('the bench can be used by everyone', () => {
     expect(await scrollsSideways(bench.page)).toBe(false);
     await bench.line.fill(different.statement);
     await expectWord(bench, 'Different');
-    await expect.poll(() => bench.page.locator('#minus').count()).toBe(1);
+    await eventually(() => bench.page.locator('#minus').count()).toBe(1);
     expect(await findings(bench.page)).toEqual([]);
     expect(await scrollsSideways(bench.page)).toBe(false);
     await bench.line.fill('[6] = <2');
@@ -48,11 +48,11 @@ describe('the bench can be used by everyone', () => {
     expect(await name.evaluate((input) => input === document.activeElement)).toBe(true);
     await name.press('Control+a');
     await page.keyboard.type('F_6');
-    await expect.poll(() => page.locator('.hint-wrong').count()).toBe(1);
+    await eventually(() => page.locator('.hint-wrong').count()).toBe(1);
     await name.press('Control+a');
     await page.keyboard.type('Q');
     await page.keyboard.press('Enter');
-    await expect.poll(() => page.getByRole('dialog').count()).toBe(0);
+    await eventually(() => page.getByRole('dialog').count()).toBe(0);
     await page.keyboard.press('i');
     await page.keyboard.type('<2> + <3> = <5> + <30>');
     await expectWord({ page, line, picker, ...bench }, 'Equal');
@@ -64,15 +64,15 @@ describe('the bench can be used by everyone', () => {
     await page.keyboard.press('ArrowRight');
     expect(await focused()).not.toBe(first);
     await page.keyboard.press('Enter');
-    await expect.poll(() => page.locator('#apart').count()).toBe(1);
+    await eventually(() => page.locator('#apart').count()).toBe(1);
     expect(await written({ page, line, picker, ...bench })).toBe('<2> + <3> = <5> + <30>');
   });
 
   test('a verdict is announced once it is steady', async () => {
     const bench = await openBench(different);
     await expectWord(bench, 'Different');
-    await expect
-      .poll(() => bench.page.locator('[aria-live=polite]').allInnerTexts())
-      .toContain('Different, in degree 1, at 3.');
+    await eventually(() => bench.page.locator('[aria-live=polite]').allInnerTexts()).toContain(
+      'Different, in degree 1, at 3.',
+    );
   });
 });

@@ -30,10 +30,13 @@ export async function openBench(asked?: { field: string; statement: string }, si
 /** What stands in the line. */
 export const written = async (bench: BenchPage): Promise<string> => (await bench.line.innerText()).replace(/\n$/, '');
 
+/** Polls long enough for a busy machine. */
+export const eventually = <T>(look: () => T) => expect.poll(look, { timeout: 15_000 });
+
 /** Waits for a current answer with this word. */
 export async function expectWord(bench: BenchPage, word: string): Promise<void> {
-  await expect.poll(() => bench.word.innerText().catch(() => ''), { timeout: 15_000 }).toBe(word);
-  await expect.poll(() => bench.page.locator('.is-old').count(), { timeout: 15_000 }).toBe(0);
+  await eventually(() => bench.word.innerText().catch(() => '')).toBe(word);
+  await eventually(() => bench.page.locator('.is-old').count()).toBe(0);
 }
 
 /** Whether anything on the page is wider than the window. */

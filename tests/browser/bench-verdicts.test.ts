@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { errorsOf } from '../harness/browser';
-import { expectWord, openBench } from './bench-page';
+import { eventually, expectWord, openBench } from './bench-page';
 
 /** Each is true or false by a one-line reason. */
 const cases: readonly (readonly [field: string, statement: string, word: string, reason: string])[] = [
@@ -43,13 +43,13 @@ describe('the bench decides', () => {
 
   test('an expression is brought to its canonical form, with its derivation and its residues', async () => {
     const bench = await openBench({ field: 'Q', statement: '[5][2] + <2>[5][3]' });
-    await expect.poll(() => bench.page.locator('.mark-tile').count()).toBe(1);
-    await expect
-      .poll(() => bench.page.locator('.lead').first().innerText())
-      .toMatch(/is its canonical form, in degree 2/);
-    await expect.poll(() => bench.page.locator('#why .chain tr').count()).toBeGreaterThan(1);
+    await eventually(() => bench.page.locator('.mark-tile').count()).toBe(1);
+    await eventually(() => bench.page.locator('.lead').first().innerText()).toMatch(
+      /is its canonical form, in degree 2/,
+    );
+    await eventually(() => bench.page.locator('#why .chain tr').count()).toBeGreaterThan(1);
     // [5][2] + <2>[5][3] = [5][6] = [-1][6] ramifies at 3 only (Steinberg at -5 + 6 = 1).
-    await expect.poll(() => bench.page.locator('#residues tbody tr').count()).toBe(1);
+    await eventually(() => bench.page.locator('#residues tbody tr').count()).toBe(1);
     expect(await bench.page.locator('#residues tbody td').first().innerText()).toContain('3');
     expect(await bench.page.locator('#residues .hint').innerText()).toMatch(/At every place not listed/);
   });
@@ -57,13 +57,15 @@ describe('the bench decides', () => {
   test('of a chain every step is judged, the first wrong one is marked, and its floor is shown', async () => {
     const bench = await openBench({ field: 'Q', statement: '[6] = [2] + <2>[3] = [2] + [3] = [3] + [2]' });
     await expectWord(bench, 'Different');
-    await expect
-      .poll(() => bench.page.locator('#steps .chain-step').allInnerTexts())
-      .toEqual(['Equal', 'Different, the first wrong step', 'Equal']);
+    await eventually(() => bench.page.locator('#steps .chain-step').allInnerTexts()).toEqual([
+      'Equal',
+      'Different, the first wrong step',
+      'Equal',
+    ]);
     expect(await bench.page.locator('#steps tr.wrong').count()).toBe(1);
     expect(await bench.page.locator('.tile.split').count()).toBe(1);
     await bench.page.getByRole('button', { name: 'Equal' }).first().click();
-    await expect.poll(() => bench.page.locator('.tile.split').count()).toBe(0);
+    await eventually(() => bench.page.locator('.tile.split').count()).toBe(0);
   });
 
   test('left and right apart: every invariant with both values, opened by a tile or by W', async () => {
@@ -71,10 +73,10 @@ describe('the bench decides', () => {
     await expectWord(bench, 'Equal');
     expect(await bench.page.locator('#apart').count()).toBe(0);
     await bench.page.locator('.tile.whole').first().click();
-    await expect.poll(() => bench.page.locator('#apart tbody tr').count()).toBeGreaterThan(2);
+    await eventually(() => bench.page.locator('#apart tbody tr').count()).toBeGreaterThan(2);
     expect(await bench.page.locator('#apart [data-same=false]').count()).toBe(0);
     await bench.page.keyboard.press('w');
-    await expect.poll(() => bench.page.locator('#apart').count()).toBe(0);
+    await eventually(() => bench.page.locator('#apart').count()).toBe(0);
   });
 
   test('the missing term is offered, and makes the sides equal', async () => {
@@ -103,7 +105,7 @@ describe('the bench decides', () => {
       }),
     );
     await line.fill('[a] = 0');
-    await expect.poll(() => word.innerText()).toBe('Undecided');
+    await eventually(() => word.innerText()).toBe('Undecided');
     expect(await page.locator('[data-mark=undecided]').count()).toBe(1);
     expect(await page.locator('.notes').innerText()).toMatch(/side conditions/);
   });

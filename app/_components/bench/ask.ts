@@ -8,6 +8,8 @@ export interface Question {
   readonly kind: 'statement' | 'expression';
   readonly field: string;
   readonly text: string;
+  /** Of an expression with hypotheses: itself without them, and each of them. */
+  readonly under?: { readonly expression: string; readonly hypotheses: string[] };
 }
 
 /** An answer together with the question it belongs to. */
@@ -93,7 +95,7 @@ export async function ask(question: Question, signal: AbortSignal): Promise<Answ
   }
   const body = await post<NormalizeRequest, NormalizeAnswer>(
     '/api/v1/normalize',
-    { field, expression: text, steps: true },
+    { field, ...(question.under ?? { expression: text }), steps: true },
     signal,
   );
   return { kind: 'expression', question, body };

@@ -8,9 +8,9 @@ const draftKey = 'quadrel.bench.draft';
 const fieldKey = 'quadrel.bench.field';
 
 /** A browser may refuse storage; the bench then works without a memory. */
-function attempt<T>(use: (storage: Storage) => T): T | undefined {
+function attempt<T>(reach: (storage: Storage) => T): T | undefined {
   try {
-    return use(window.localStorage);
+    return reach(window.localStorage);
   } catch {
     return undefined;
   }

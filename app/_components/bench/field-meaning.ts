@@ -57,9 +57,9 @@ export function orderOf(name: FieldName): bigint | undefined {
 function finiteMeaning(name: FieldName, order: bigint | undefined, answer: FieldAnswer | undefined): Phrase {
   const count = order === undefined ? 'a finite field' : elements(order);
   if (name.kind === 'extension')
-    return [`${count}; `, tex(name.letter), ' generates it over ', tex(fieldNameTex(name.base)), ``];
-  if (!answer?.modulus) return [`${count}`];
-  return [`${count}; `, tex('z'), ' generates it, with ', tex(`${answer.modulus.tex} = 0`), ``];
+    return [`${count}; `, tex(name.letter), ' generates it over ', tex(fieldNameTex(name.base))];
+  if (!answer?.modulus) return [count];
+  return [`${count}; `, tex('z'), ' generates it, with ', tex(`${answer.modulus.tex} = 0`)];
 }
 
 /**

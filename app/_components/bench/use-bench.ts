@@ -1,11 +1,13 @@
 'use client';
 
 import { useCallback, useDeferredValue, useEffect, useMemo, useRef, useState } from 'react';
+import { conditionText, expressionText } from '@/engine/expression/to-text';
 import type { Question } from './ask';
-import { type Draft, lastField, rememberField } from './drafts';
+import { type Draft, rememberField } from './drafts';
 import type { LineHandle } from './editor/line-editor';
 import { faultOfDeclined, faultOfReading } from './fault';
 import { useAnswer } from './use-answer';
+import type { Reading } from './reading';
 import { useReading } from './use-reading';
 
 /** How long a line must stay unread before a note under it says why, so that the page does not move at each bracket that is opened. */
@@ -24,6 +26,16 @@ function useAfterRest(active: boolean, delay: number): boolean {
   return active && rested;
 }
 
+/** What a line that can be read asks. An expression is asked apart from its hypotheses; a statement carries them. */
+function questionOf(reading: Reading | undefined, field: string): Question | undefined {
+  if (reading?.state !== 'read') return undefined;
+  const question = { kind: reading.kind, field, text: reading.text.trimEnd() };
+  const { sides, conditions } = reading.statement;
+  const [only] = sides;
+  if (reading.kind === 'statement' || conditions.length === 0 || !only) return question;
+  return { ...question, under: { expression: expressionText(only), hypotheses: conditions.map(conditionText) } };
+}
+
 /** Everything that is known while one writes: the text, how it reads, what is wrong in it, and the last answer. */
 export function useBench(opened: Draft | undefined) {
   const line = useRef<LineHandle>(null);
@@ -32,16 +44,9 @@ export function useBench(opened: Draft | undefined) {
   const [edited, setEdited] = useState(false);
   const [lastKey, setLastKey] = useState(0);
 
-  useEffect(() => {
-    if (!opened) setFieldState((now) => lastField() ?? now);
-  }, [opened]);
-
   const reading = useReading(text);
   const settled = useDeferredValue(reading);
-  const question = useMemo<Question | undefined>(
-    () => (reading?.state === 'read' ? { kind: reading.kind, field, text: reading.text.trimEnd() } : undefined),
-    [reading, field],
-  );
+  const question = useMemo(() => questionOf(reading, field), [reading, field]);
   const asked = useAnswer(question, lastKey);
   const fault = useMemo(
     () => faultOfReading(reading) ?? faultOfDeclined(asked.declined, text),

@@ -1,7 +1,7 @@
 'use client';
 
 import { useCallback, useEffect, useRef, useState } from 'react';
-import { type Draft, keepDraft, keptDraft } from './drafts';
+import { type Draft, keepDraft, keptDraft, lastField } from './drafts';
 
 const rest = 300;
 const same = (a: Draft, b: Draft): boolean => a.statement === b.statement && a.field === b.field;
@@ -10,7 +10,7 @@ const same = (a: Draft, b: Draft): boolean => a.statement === b.statement && a.f
  * Keeps what is written on this device. When the page opened something else than what was kept, the kept text is offered and not
  * overwritten until one of the two is chosen by writing on.
  *
- * @param opened - what the address opened, undefined for the bare bench, which goes on with the kept text by itself
+ * @param opened - what the address opened, undefined for the bare bench, which goes on with the kept text, or over the last field
  * @param write - puts a draft into the line
  */
 export function useDraft(opened: Draft | undefined, now: Draft, edited: boolean, write: (draft: Draft) => void) {
@@ -24,9 +24,11 @@ export function useDraft(opened: Draft | undefined, now: Draft, edited: boolean,
 
   useEffect(() => {
     const kept = keptDraft();
-    if (!kept) return;
     const { opened: given, write: begin } = start.current;
-    if (!given) begin(kept);
+    const field = lastField();
+    if (!kept) {
+      if (!given && field !== undefined) begin({ field, statement: '' });
+    } else if (!given) begin(kept);
     else if (!same(kept, given)) setOffered(kept);
   }, []);
 

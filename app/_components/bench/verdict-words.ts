@@ -28,6 +28,13 @@ function equalPhrase(answer: CompareAnswer): Phrase {
   ];
 }
 
+/** Why the two values differ: what the service says after naming them. */
+function reasonOf({ sentence, right }: NonNullable<CompareAnswer['evidence']['separating']>): string {
+  const named = `right side ${right.text}. `;
+  const end = sentence.lastIndexOf(named);
+  return end < 0 ? '' : ` ${sentence.slice(end + named.length)}`;
+}
+
 function differentPhrase(answer: CompareAnswer): Phrase {
   const { separating } = answer.evidence;
   const degrees = degreesOf(answer.parts.filter((part) => part.verdict === 'different'));
@@ -38,7 +45,7 @@ function differentPhrase(answer: CompareAnswer): Phrase {
     tex(separating.left.tex),
     ' and the right side ',
     tex(separating.right.tex),
-    '.',
+    `.${reasonOf(separating)}`,
   ];
 }
 

@@ -1,3 +1,4 @@
+import Link from 'next/link';
 import { Colophon } from '../../_components/shell/colophon';
 import { Row } from '../../_components/shell/row';
 
@@ -16,9 +17,9 @@ export default function UnknownLink() {
             The link may have been cut short when it was copied: its last part has at least ten characters.
           </p>
           <p className="acts mt-4">
-            <a className="plain" href="/bench">
+            <Link className="plain" href="/bench">
               To the bench
-            </a>
+            </Link>
           </p>
         </Row>
       </main>

@@ -1,27 +1,31 @@
 import { type EditorState, type Extension, StateField } from '@codemirror/state';
 import { Decoration, type DecorationSet, EditorView } from '@codemirror/view';
-import { bracketsIn, partners } from './brackets';
+import { bracketPartners, type Token } from '@/grammar/tokens';
+import { lineTokens } from './line-tokens';
 
 const partner = Decoration.mark({ class: 'line-partner' });
-/** Past this many characters the partner is not looked for at each key. */
-const longest = 6000;
+
+const isBracket = (token: Token): boolean => token.kind === 'open' || token.kind === 'close';
 
 function decorate(state: EditorState): DecorationSet {
   const { head, empty } = state.selection.main;
-  if (!empty || state.doc.length > longest) return Decoration.none;
-  const brackets = bracketsIn(state.doc.toString());
+  const tokens = state.field(lineTokens);
+  if (!empty) return Decoration.none;
   // The bracket just written, to the left of the caret, comes before the one to its right.
-  const behind = brackets.findIndex((bracket) => bracket.end === head);
-  const here = behind >= 0 ? behind : brackets.findIndex((bracket) => bracket.start === head);
-  const other = here < 0 ? undefined : partners(brackets)[here];
-  const found = other === undefined ? undefined : brackets[other];
+  const behind = tokens.findIndex((token) => token.end === head && isBracket(token));
+  const here = behind >= 0 ? behind : tokens.findIndex((token) => token.start === head && isBracket(token));
+  const other = here < 0 ? undefined : bracketPartners(tokens)[here];
+  const found = other === undefined ? undefined : tokens[other];
   return found ? Decoration.set(partner.range(found.start, found.end)) : Decoration.none;
 }
 
 /** Underlines the partner of the bracket at the caret. */
-export const bracketPartner: Extension = StateField.define<DecorationSet>({
-  create: decorate,
-  update: (marks, transaction) =>
-    transaction.docChanged || transaction.selection ? decorate(transaction.state) : marks,
-  provide: (field) => EditorView.decorations.from(field),
-});
+export const bracketPartner: Extension = [
+  lineTokens,
+  StateField.define<DecorationSet>({
+    create: decorate,
+    update: (marks, transaction) =>
+      transaction.docChanged || transaction.selection ? decorate(transaction.state) : marks,
+    provide: (field) => EditorView.decorations.from(field),
+  }),
+];

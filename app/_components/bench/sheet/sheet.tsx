@@ -122,7 +122,10 @@ export function Sheet({ bench }: { readonly bench: BenchState }) {
           {answer.kind === 'statement' ? (
             <StatementEvidence key={`${answer.question.field} ${answer.question.text}`} answer={answer.body} />
           ) : (
-            <ExpressionEvidence answer={answer.body} expression={answer.question.text} />
+            <ExpressionEvidence
+              answer={answer.body}
+              expression={answer.question.under?.expression ?? answer.question.text}
+            />
           )}
           <Notes answer={answer} meaning={meaning} onWrite={bench.change} />
         </>

@@ -20,7 +20,7 @@ export function FieldPicker({ field, onChange, refusal }: Props) {
   const face = fieldFace(field);
   useKey({ keyName: 'F', label: 'choose the field', act: () => setOpen(true) });
   return (
-    <div>
+    <div className="bench-over">
       <span className="label" id={`${id}-label`}>
         Over the field
       </span>

@@ -33,7 +33,7 @@ export function SlabRow({ bench, label, bare = false }: Props) {
   return (
     <div className="row">
       <FieldPicker field={field} onChange={setField} refusal={fault?.ofField && noted ? fault.message : undefined} />
-      <div>
+      <div className="bench-asked">
         <span className="label" id={labelId} onClick={() => line.current?.focus()}>
           {label}
         </span>
