@@ -1,4 +1,4 @@
-import { grammar, type Grammar } from 'ohm-js';
+import { type Grammar, makeRecipe } from 'ohm-js';
 import type { Element } from '../engine/expression/element';
 import type { Expression } from '../engine/expression/expression';
 import type { FieldName } from '../engine/expression/field-name';
@@ -8,15 +8,20 @@ import { elementOf } from './element-tree';
 import { expressionOf } from './expression-tree';
 import { fieldNameOf } from './field-tree';
 import { checkSize, tooDeepHere } from './limits';
-import { quadrelSource } from './quadrel-source';
+import { quadrelRecipe } from './quadrel-recipe';
 import { conditionOf, statementOf } from './statement-tree';
 import { SyntaxNode } from './syntax-node';
 import { undressed } from './tree-parts';
 
+// The parser exports this function and leaves it out of its types.
+declare module 'ohm-js' {
+  export function makeRecipe(recipe: string): Grammar;
+}
+
 let rules: Grammar | undefined;
 
-/** The grammar of quadrel.ohm, built at the first use. */
-const quadrel = (): Grammar => (rules ??= grammar(quadrelSource));
+/** The grammar of quadrel.ohm, loaded at the first use. */
+const quadrel = (): Grammar => (rules ??= makeRecipe(quadrelRecipe));
 
 const startRules: Record<Reading, string> = {
   expression: 'wholeExpression',

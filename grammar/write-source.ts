@@ -1,20 +1,26 @@
 import { readFileSync, writeFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
+import { grammar } from 'ohm-js';
 
-const header =
-  '// Written from quadrel.ohm by write-source.ts, so that the grammar needs no file system where it runs.\n';
+const header = `// Written from quadrel.ohm by write-source.ts: the grammar as the parser loads it a hundred times faster than from its
+// text, and without a file system.
+`;
+
+/** The text of quadrel.ohm. */
+export const grammarText = (): string => readFileSync(new URL('./quadrel.ohm', import.meta.url), 'utf8');
 
 /**
- * The module that carries the grammar's text, as it must stand in quadrel-source.ts.
+ * The module that carries the grammar, as it must stand in quadrel-recipe.ts.
  *
  * Run this file (`npx tsx grammar/write-source.ts`) after every change of quadrel.ohm; a test holds the two together.
  */
 export function grammarModule(): string {
-  const text = readFileSync(new URL('./quadrel.ohm', import.meta.url), 'utf8');
-  if (text.includes('`') || text.includes('${')) throw new Error('quadrel.ohm must have no backtick and no ${');
-  return `${header}export const quadrelSource = String.raw\`${text}\`;\n`;
+  // The parser offers this method and leaves it out of its types.
+  const recipe = (grammar(grammarText()) as unknown as { toRecipe(): string }).toRecipe();
+  if (recipe.includes('`') || recipe.includes('${')) throw new Error('quadrel.ohm must have no backtick and no ${');
+  return `${header}export const quadrelRecipe = String.raw\`${recipe}\`;\n`;
 }
 
 if (process.argv[1] === fileURLToPath(import.meta.url)) {
-  writeFileSync(new URL('./quadrel-source.ts', import.meta.url), grammarModule());
+  writeFileSync(new URL('./quadrel-recipe.ts', import.meta.url), grammarModule());
 }

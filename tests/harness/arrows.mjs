@@ -13,7 +13,7 @@ export const rooms = [
     packages: [],
   },
   { room: 'engine/version', rooms: [], packages: [] },
-  { room: 'grammar/write-source', rooms: [], packages: ['node'] },
+  { room: 'grammar/write-source', rooms: [], packages: ['node', 'ohm-js'] },
   { room: 'grammar', rooms: ['engine/expression'], packages: ['ohm-js'] },
   { room: 'models', rooms: [], packages: ['sequelize'] },
   { room: 'migrations', rooms: [], packages: ['sequelize'] },
