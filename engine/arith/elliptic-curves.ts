@@ -15,7 +15,8 @@ const D = 210;
 const babySteps = Array.from({ length: D / 2 }, (_, j) => j).filter((j) => gcd(BigInt(j), BigInt(D)) === 1n);
 
 /**
- * A proper divisor of n by `curves` elliptic curves with the bounds B₁ and 60·B₁, or `undefined`. A prime factor p is found by a
+ * A proper divisor of n by `curves` elliptic curves with the bounds B₁ and 60·B₁ (20·B₁ from
+ * B₁ = 100000 on), or `undefined`. A prime factor p is found by a
  * curve whose order modulo p is smooth: the time depends on p much more than on n.
  *
  * H. W. Lenstra, Factoring integers with elliptic curves, Ann. of Math. 126 (1987); arithmetic and second stage:
@@ -31,7 +32,7 @@ export function ellipticCurves(
   doing: string,
 ): bigint | undefined {
   const stream = seeded(Number(n & 0x3fffffffn) + bound);
-  const limit = 60 * bound;
+  const limit = bound < 100_000 ? 60 * bound : 20 * bound;
   const primes = primesBelow(limit);
   const isPrime = new Uint8Array(limit + D);
   for (const p of primes) isPrime[p] = 1;

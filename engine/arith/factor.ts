@@ -56,15 +56,15 @@ function split(n: bigint, multiplicity: number, found: Map<bigint, number>, budg
 
 /** Up to this length rho alone is quickest; up to the second the quadratic sieve ends in a time worth waiting for. */
 const RHO_BITS = 52;
-const SIEVE_BITS = 320;
+const SIEVE_BITS = 280;
 
 /** Elliptic curves against factors of about 12, 15, 20, 25, … digits: how long n must be for them, the bound B₁, how many. */
 const stages: readonly { readonly bits: number; readonly bound: number; readonly curves: number }[] = [
   { bits: 150, bound: 500, curves: 10 },
-  { bits: 165, bound: 2000, curves: 25 },
-  { bits: 190, bound: 11000, curves: 90 },
-  { bits: 230, bound: 50000, curves: 240 },
-  { bits: 270, bound: 250000, curves: 500 },
+  { bits: 175, bound: 2000, curves: 25 },
+  { bits: 205, bound: 11000, curves: 90 },
+  { bits: 240, bound: 50000, curves: 240 },
+  { bits: 280, bound: 250000, curves: 500 },
 ];
 
 /** A divisor other than 1 and n of a composite n that is no perfect power and has no prime factor below 2^12. */
@@ -76,8 +76,8 @@ function properDivisor(n: bigint, budget: Budget, doing: string): bigint {
     divisor ??= ellipticCurves(n, stage.bound, stage.curves, budget, doing);
   }
   if (bits <= SIEVE_BITS) divisor ??= quadraticSieve(n, budget, doing);
-  for (let bound = 1_000_000; divisor === undefined; bound *= 2)
-    divisor = ellipticCurves(n, bound, 1000, budget, doing);
+  divisor ??= ellipticCurves(n, 1_000_000, Number.POSITIVE_INFINITY, budget, doing);
+  if (divisor === undefined) throw new Error(`no factor found of ${named(n)}`);
   return divisor;
 }
 
