@@ -22,8 +22,11 @@ export const runs = (identity) => identity.began !== undefined && beginning(iden
 
 const pause = (milliseconds) => new Promise((resolve) => setTimeout(resolve, milliseconds));
 
-/** Signals a process that was identified (its whole group when it leads one) and waits for its end; harder after the patience is over. */
-export async function end(identity, signal, patience = 10_000) {
+/**
+ * Signals a process that was identified (its whole group when it leads one) and waits for its end; harder after the patience is
+ * over. A database, which is ended by SIGINT, has longer: it first writes what it holds in memory.
+ */
+export async function end(identity, signal, patience = signal === 'SIGINT' ? 60_000 : 10_000) {
   const send = (name) => {
     for (const target of [-identity.pid, identity.pid]) {
       try {
