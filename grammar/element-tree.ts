@@ -41,7 +41,7 @@ function elementProduct(node: SyntaxNode): Element {
       factors = [quotientElement(numerator, factor, spanFrom(numerator.at, factor.at))];
       return;
     }
-    if (operator.rule === 'juxtaposed') {
+    if (operator.rule === '') {
       if (operators[i - 1]?.rule === 'over') refuseAfterDivision(node.text, before, operators, rest, i);
       if (before.at && factor.at && digitsMeet(node.text, before.at, factor.at)) {
         throw adjacentNumbers(node.text, before.at, factor.at);
@@ -64,7 +64,7 @@ function refuseAfterDivision(
   index: number,
 ): void {
   let last = index;
-  while (operators[last + 1]?.rule === 'juxtaposed') last++;
+  while (operators[last + 1]?.rule === '') last++;
   const [first, end] = [rest[index], rest[last]];
   if (quotient.kind !== 'quotient' || !quotient.numerator.at || !quotient.denominator.at || !first || !end) return;
   const factors = { start: first.start, end: first.start + text.slice(first.start, end.end).trimEnd().length };
@@ -98,7 +98,7 @@ function elementAtom(node: SyntaxNode): Element {
 }
 
 /** The letter that a node of the rule `fieldLetter` writes, in the form `x12''`. */
-export function letterOf(node: SyntaxNode): string {
-  const primes = "'".repeat(node.child(1).count + node.child(3).count);
-  return node.child(0).source + plainInteger(node.child(2).source) + primes;
+export function letterOf({ source }: SyntaxNode): string {
+  const primes = source.match(/['′’]|\\prime/gu) ?? [];
+  return source.charAt(0) + plainInteger(source.slice(1)) + "'".repeat(primes.length);
 }

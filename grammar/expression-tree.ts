@@ -37,7 +37,7 @@ function productOf(node: SyntaxNode): Expression {
     const before = factors.at(-1)?.at;
     if (!operator || !before) return;
     const factor = signed(negate, innerSign(operator), factorOf(next));
-    if (operator.rule === 'juxtaposed' && factor.kind !== 'epsilonInteger' && factor.at) {
+    if (operator.rule === '' && factor.kind !== 'epsilonInteger' && factor.at) {
       if (digitsMeet(node.text, before, factor.at)) throw adjacentNumbers(node.text, before, factor.at);
       if (factor.kind === 'integer' && isWord(factors.at(-1)) && before.end === factor.at.start) {
         throw numberAfterWord(node.text, before, factor.at);

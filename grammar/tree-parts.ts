@@ -41,9 +41,9 @@ export function signed<T extends { readonly at?: Span }>(
   return result;
 }
 
-/** The sign that `times` and `over` bring for the factor after them. */
+/** The sign that `times` and `over` bring for the factor after them; a product without a sign is the empty word. */
 export const innerSign = (operator: SyntaxNode): SyntaxNode | undefined =>
-  operator.rule === 'juxtaposed' ? undefined : operator.option(2);
+  operator.rule === '' ? undefined : operator.option(2);
 
 /** Whether the text of one factor ends in a digit and that of the next begins with one. */
 export const digitsMeet = (text: string, left: Span, right: Span): boolean =>

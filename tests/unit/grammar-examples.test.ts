@@ -18,10 +18,11 @@ const partsOfOthers = new Set([
   'ending',
   'equals',
   'index',
-  'juxtaposed',
+
   'latin',
   'digits',
   'integer',
+  'letterMarks',
   'lowered',
   'raised',
   'raisedPrime',
