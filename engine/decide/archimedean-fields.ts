@@ -24,7 +24,8 @@ const TORSION =
   'Rational symbols are torsion in K_2 (Tate; J. Milnor, Introduction to Algebraic K-Theory, §11), and K^M_n of this field is ' +
   'uniquely divisible for n ≥ 2 up to the part seen by signs. ';
 
-const PULL_BACK = 'With the pull-back theorem (F. Morel, Comment. Math. Helv. 79, 2004) this is complete for rational entries.';
+const PULL_BACK =
+  'With the pull-back theorem (F. Morel, Comment. Math. Helv. 79, 2004) this is complete for rational entries.';
 
 type Terms = readonly Term<RationalEntry>[];
 
@@ -44,7 +45,11 @@ export const realField: DecidableField = {
     const statement = read([expression], conditions, budget);
     const [terms = []] = statement.sides;
     const rank = BigInt(evaluate(terms, rankRing, budget).get(0) ?? 0);
-    const signatures = evaluate(terms, signatureRing<RationalEntry>((entry) => entry.negative), budget);
+    const signatures = evaluate(
+      terms,
+      signatureRing<RationalEntry>((entry) => entry.negative),
+      budget,
+    );
     const parts: [number, Expression][] = [...new Set([...signatures.keys(), 0])].map((degree) => [
       degree,
       constantPart(degree, BigInt(signatures.get(degree) ?? 0), rank),
@@ -91,11 +96,7 @@ export const complexField: DecidableField = {
   sideConditions: () => [],
 };
 
-function read(
-  expressions: readonly Expression[],
-  conditions: readonly Condition[],
-  budget: Budget,
-): RationalStatement {
+function read(expressions: readonly Expression[], conditions: readonly Condition[], budget: Budget): RationalStatement {
   checkConcreteConditions(rationals, conditions, budget);
   return rationalStatement(expressions, budget);
 }
@@ -106,7 +107,11 @@ function productFindings(statement: RationalStatement, target: string, budget: B
 
 /** The rank modulo 2 in every degree. */
 function parities(terms: Terms, budget: Budget): Graded<bigint> {
-  const ranks = evaluate(terms, signatureRing<RationalEntry>(() => false), budget);
+  const ranks = evaluate(
+    terms,
+    signatureRing<RationalEntry>(() => false),
+    budget,
+  );
   return new Map([...ranks].map(([degree, rank]) => [degree, isOddInt(rank) ? 1n : 0n]));
 }
 
@@ -128,4 +133,3 @@ function collect(parts: readonly (readonly [number, Expression])[]): readonly No
     .sort(([a], [b]) => b - a)
     .map(([degree, words]) => ({ degree, normalForm: total(words), canonical: true }));
 }
-

@@ -65,7 +65,10 @@ function compared(finding: Finding): Compared {
 function firstDifference(findings: readonly Finding[]): Finding | undefined {
   return findings
     .filter((finding) => !finding.same)
-    .reduce<Finding | undefined>((best, next) => (best === undefined || next.degree > best.degree ? next : best), undefined);
+    .reduce<Finding | undefined>(
+      (best, next) => (best === undefined || next.degree > best.degree ? next : best),
+      undefined,
+    );
 }
 
 const NOUN: Readonly<Record<MapName, string>> = {
@@ -83,7 +86,8 @@ const NOUN: Readonly<Record<MapName, string>> = {
 
 function describe(finding: Finding): Separating {
   const [left, right] = [finding.left(), finding.right()];
-  const where = finding.place === undefined ? '' : finding.place === 'real' ? ', at the real place' : `, at ${finding.place}`;
+  const where =
+    finding.place === undefined ? '' : finding.place === 'real' ? ', at the real place' : `, at ${finding.place}`;
   const values = `the left side has ${NOUN[finding.map]} ${expressionText(left)} and the right side ${expressionText(right)}`;
   return {
     degree: finding.degree,

@@ -20,7 +20,11 @@ export interface DecidableField {
   /** The canonical form by degree, highest first; parts that are zero are left out. */
   normalForm(expression: Expression, conditions: readonly Condition[], budget: Budget): readonly NormalizedDegree[];
   /** Side conditions under which the entries make sense; none over a field whose elements are known. */
-  sideConditions(expressions: readonly Expression[], conditions: readonly Condition[], budget: Budget): readonly Condition[];
+  sideConditions(
+    expressions: readonly Expression[],
+    conditions: readonly Condition[],
+    budget: Budget,
+  ): readonly Condition[];
   /** Residues; absent for a field that has no discrete valuation the engine knows. */
   readonly residues?: (
     expression: Expression,

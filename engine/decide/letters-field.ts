@@ -8,7 +8,13 @@ import { elementText } from '../expression/to-text';
 import { degreesOf } from '../ring/degrees';
 import { evaluate } from '../ring/evaluate';
 import { lower } from '../ring/lower';
-import { characteristicClass, isZeroModEta, isZeroModH, type CharacteristicClass, type SignClass } from '../ring/sign-ring';
+import {
+  characteristicClass,
+  isZeroModEta,
+  isZeroModH,
+  type CharacteristicClass,
+  type SignClass,
+} from '../ring/sign-ring';
 import type { Term } from '../ring/term';
 import { countBits, lettersOf, wordRing, type Monomial, type Words } from '../ring/word-ring';
 import { etaFactors, minusOneElement, multiple, symbolFactors, total, zeroExpression } from '../ring/write-word';
@@ -44,7 +50,10 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
       if (statement.letters.length === 0) {
         const decision = constants(statement.characteristic, budget).decide(left, right, [], budget);
         const over = statement.characteristic === 0n ? 'Q' : `F_${statement.characteristic}`;
-        return { ...decision, theorem: `It holds over every such field iff it holds over ${over}. ${decision.theorem}` };
+        return {
+          ...decision,
+          theorem: `It holds over every such field iff it holds over ${over}. ${decision.theorem}`,
+        };
       }
       const char = characteristicClass(statement.characteristic);
       const ring = wordRing(char, budget);
@@ -63,7 +72,11 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
       const value = evaluate(statement.sides[0] ?? [], ring, budget);
       return [...value]
         .sort(([a], [b]) => b - a)
-        .map(([degree, words]) => ({ degree, normalForm: writeWords(statement.letters, degree, words), canonical: true }));
+        .map(([degree, words]) => ({
+          degree,
+          normalForm: writeWords(statement.letters, degree, words),
+          canonical: true,
+        }));
     },
     sideConditions: sideConditionsOf,
   };
@@ -91,7 +104,8 @@ function readStatement(
   const named = expressions.map((expression) =>
     lower(expression, (entry): Named => {
       const value = read(entry);
-      if (value.kind === 'zero') throw notAUnit(entry, characteristic === 0n ? 'every field' : `characteristic ${characteristic}`);
+      if (value.kind === 'zero')
+        throw notAUnit(entry, characteristic === 0n ? 'every field' : `characteristic ${characteristic}`);
       if (value.kind === 'signed') {
         for (const name of value.exponents.keys()) names.add(name);
         return value;
@@ -114,7 +128,9 @@ function readStatement(
   const monomial = (value: Named): Monomial => {
     const known = monomials.get(value);
     if (known !== undefined) return known;
-    const exponents = new Map([...value.exponents].map(([name, e]) => [indexOf.get(name) ?? 0, e] as const).sort(([a], [b]) => a - b));
+    const exponents = new Map(
+      [...value.exponents].map(([name, e]) => [indexOf.get(name) ?? 0, e] as const).sort(([a], [b]) => a - b),
+    );
     const made: Monomial = { negative: value.negative, exponents };
     monomials.set(value, made);
     return made;
@@ -179,7 +195,12 @@ function wordFindings(
 }
 
 function coefficientGroup(char: CharacteristicClass, degree: number): string {
-  if (degree === 0) return char === 'zero' ? '\\mathbb{Z}^{2}' : char === 'three-mod-four' ? '\\mathbb{Z}\\oplus\\mathbb{Z}/2' : '\\mathbb{Z}';
+  if (degree === 0)
+    return char === 'zero'
+      ? '\\mathbb{Z}^{2}'
+      : char === 'three-mod-four'
+        ? '\\mathbb{Z}\\oplus\\mathbb{Z}/2'
+        : '\\mathbb{Z}';
   if (char === 'zero') return '\\mathbb{Z}';
   if (degree < 0) return char === 'three-mod-four' ? '\\mathbb{Z}/4' : '\\mathbb{Z}/2';
   return degree === 1 && char !== 'two' ? '\\mathbb{Z}/2' : '0';
@@ -205,7 +226,15 @@ function writeWords(letters: readonly string[], degree: number, words: Words): E
 /** b·[p_S] for a coefficient b of degree `own`. */
 function writeWord(letters: readonly string[], own: number, mask: bigint, { x, y }: SignClass): readonly Expression[] {
   const tail = lettersOf(mask).map((i) => symbol([letterElement(letters[i] ?? 'a')]));
-  const plain = x === 0n ? [] : [multiple(x, [...etaFactors(own < 0 ? -own : 0), ...symbolFactors(minusOneElement, own > 0 ? own : 0), ...tail])];
+  const plain =
+    x === 0n
+      ? []
+      : [
+          multiple(x, [
+            ...etaFactors(own < 0 ? -own : 0),
+            ...symbolFactors(minusOneElement, own > 0 ? own : 0),
+            ...tail,
+          ]),
+        ];
   return y === 0n ? plain : [...plain, multiple(y, [...etaFactors(1), ...symbolFactors(minusOneElement, 1), ...tail])];
 }
-

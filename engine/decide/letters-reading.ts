@@ -18,7 +18,11 @@ export function characteristicOf(conditions: readonly Condition[]): bigint {
       throw new Refusal('hypothesis', `${condition.prime} is not a prime, so it is no characteristic.`, condition.at);
     if (!condition.is) continue;
     if (fixed !== 0n && fixed !== condition.prime)
-      throw new Refusal('hypothesis', `The characteristic cannot be both ${fixed} and ${condition.prime}.`, condition.at);
+      throw new Refusal(
+        'hypothesis',
+        `The characteristic cannot be both ${fixed} and ${condition.prime}.`,
+        condition.at,
+      );
     fixed = condition.prime;
   }
   for (const condition of conditions)
@@ -112,7 +116,8 @@ function solve<E>(f: Laurent<E>, ring: LaurentRing<E>): Solution<E> | undefined 
   return undefined;
 }
 
-const inverseLetter = <E>(name: string, ring: LaurentRing<E>): Laurent<E> => ring.invert(ring.letter(name)) ?? new Map();
+const inverseLetter = <E>(name: string, ring: LaurentRing<E>): Laurent<E> =>
+  ring.invert(ring.letter(name)) ?? new Map();
 
 function substitute<E>(f: Laurent<E>, { name, value }: Solution<E>, ring: LaurentRing<E>): Laurent<E> {
   let result: Laurent<E> = new Map();
@@ -120,8 +125,14 @@ function substitute<E>(f: Laurent<E>, { name, value }: Solution<E>, ring: Lauren
     const e = term.exponents.get(name) ?? 0n;
     const base = e < 0n ? ring.invert(value) : value;
     if (base === undefined)
-      throw new Refusal('not-yet', `Conditions that put a sum in the place of ${name} in a denominator are not decided yet.`);
-    let product: Laurent<E> = ring.multiply(new Map([[key, term]]), e === 0n ? ring.constant(ring.field.one) : powerOf(name, -e, ring));
+      throw new Refusal(
+        'not-yet',
+        `Conditions that put a sum in the place of ${name} in a denominator are not decided yet.`,
+      );
+    let product: Laurent<E> = ring.multiply(
+      new Map([[key, term]]),
+      e === 0n ? ring.constant(ring.field.one) : powerOf(name, -e, ring),
+    );
     for (let i = 0n; i < (e < 0n ? -e : e); i += 1n) product = ring.multiply(product, base);
     result = ring.add(result, product);
   }

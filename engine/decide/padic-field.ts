@@ -100,19 +100,43 @@ export function padicField(p: bigint): DecidableField {
     const findings: Finding[] = [];
     if (degree < 0)
       findings.push(
-        pairFinding('rank', degree, integer(BigInt(left.rank)), integer(BigInt(right.rank)), '\\mathbb{Z}/2', true, left.rank === right.rank),
+        pairFinding(
+          'rank',
+          degree,
+          integer(BigInt(left.rank)),
+          integer(BigInt(right.rank)),
+          '\\mathbb{Z}/2',
+          true,
+          left.rank === right.rank,
+        ),
       );
     if (degree < 1) {
       const same = left.discriminant === right.discriminant;
       const write = (c: number): Expression => angle([square(c)]);
       const target = `${tex}^{\\times}/${tex}^{\\times 2}`;
-      const finding = pairFinding('discriminant', degree, write(left.discriminant), write(right.discriminant), target, true, same);
+      const finding = pairFinding(
+        'discriminant',
+        degree,
+        write(left.discriminant),
+        write(right.discriminant),
+        target,
+        true,
+        same,
+      );
       findings.push({ ...finding, zero: left.discriminant === 0 && right.discriminant === 0 });
     }
     const hasse = (bit: 0 | 1): Expression => multiple(bit === 0 ? 1n : -1n, []);
     // in degree 2 over ℚ_2 the Hilbert symbol is also the class modulo η
     const sameHasse = left.hasse === right.hasse;
-    const finding = pairFinding('hasse', degree, hasse(left.hasse), hasse(right.hasse), '\\{\\pm 1\\}', degree < 2 || sameHasse, sameHasse);
+    const finding = pairFinding(
+      'hasse',
+      degree,
+      hasse(left.hasse),
+      hasse(right.hasse),
+      '\\{\\pm 1\\}',
+      degree < 2 || sameHasse,
+      sameHasse,
+    );
     findings.push({ ...finding, zero: left.hasse === 0 && right.hasse === 0 });
     return findings.map((found) => ({ ...found, place: p.toString() }));
   }
@@ -121,12 +145,17 @@ export function padicField(p: bigint): DecidableField {
     const write = (x: ResidueClass<Int> | undefined): Expression => writeResidueClass(primeResidueField(p), 1, x);
     const same = left?.unit === right?.unit;
     const sameModH = same || (left?.squareClass ?? 0) === (right?.squareClass ?? 0);
-    return { ...pairFinding('residue', 2, write(left), write(right), `\\mathbb{F}_{${p}}^{\\times}`, same, sameModH), place: p.toString() };
+    return {
+      ...pairFinding('residue', 2, write(left), write(right), `\\mathbb{F}_{${p}}^{\\times}`, same, sameModH),
+      place: p.toString(),
+    };
   }
 
   function degreeTwo(tameSymbol: ResidueClass<Int> | undefined, value: WittVector): Expression {
     if (p !== 2n) return writeResidueClass(primeResidueField(p), 1, tameSymbol, [symbol([integerElement(p)])]);
-    return invariants(value.length === 0 ? undefined : value).hasse === 1 ? product(rho.map((a) => symbol([a]))) : total([]);
+    return invariants(value.length === 0 ? undefined : value).hasse === 1
+      ? product(rho.map((a) => symbol([a])))
+      : total([]);
   }
 
   function degreeOne(statement: RationalStatement, value: WittVector, budget: Budget): Expression {
@@ -192,4 +221,3 @@ function pairFinding(
     reason: () => `The two values in degree ${degree} differ.`,
   };
 }
-

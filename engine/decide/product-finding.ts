@@ -52,7 +52,9 @@ export function productFinding(statement: RationalStatement, target: string, bud
 function writeProduct(base: readonly BaseElement[], value: ProductClass | undefined): Expression {
   if (value === undefined || value.kind === 'integer') return total([]);
   if (sizeOf(base, value) <= WRITTEN_BITS) return symbol([rationals.write(productValue(base, value))]);
-  const words = [...value.exponents].map(([i, e]) => multiple(BigInt(e), [symbol([integerElement(base[i]?.value ?? 1n)])]));
+  const words = [...value.exponents].map(([i, e]) =>
+    multiple(BigInt(e), [symbol([integerElement(base[i]?.value ?? 1n)])]),
+  );
   return total(value.sign === 0 ? words : [...symbolFactors(minusOneElement, 1), ...words]);
 }
 
@@ -73,6 +75,7 @@ export function productValue(base: readonly BaseElement[], value: ProductClass |
 /** An upper bound for the binary digits of the product, to compare with the limits above. */
 function sizeOf(base: readonly BaseElement[], value: ProductClass & { kind: 'unit' }): bigint {
   let bits = 0n;
-  for (const [i, e] of value.exponents) bits += BigInt(e < 0 ? negateInt(e) : e) * BigInt(bitLength(base[i]?.value ?? 1n));
+  for (const [i, e] of value.exponents)
+    bits += BigInt(e < 0 ? negateInt(e) : e) * BigInt(bitLength(base[i]?.value ?? 1n));
   return bits;
 }

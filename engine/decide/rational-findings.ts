@@ -45,7 +45,7 @@ export function rationalFindings(statement: RationalStatement, budget: Budget): 
 const isUnknownModH = (finding: Finding): boolean =>
   finding instanceof ResidueFinding && finding.outcomeModH === 'unknown';
 
-function residueFindings({ base, terms }: Incidence, budget: Budget): readonly ResidueFinding[] {
+function residueFindings({ base, terms, entries }: Incidence, budget: Budget): readonly ResidueFinding[] {
   return base.flatMap((element, index) => {
     const { units, local } = rationalPlace(base, index);
     const ring: GradedRing<RationalEntry, Theta<Int>> = thetaRing(units, local);
@@ -56,7 +56,7 @@ function residueFindings({ base, terms }: Incidence, budget: Budget): readonly R
       const [x, y] = [l.get(degree)?.d, r.get(degree)?.d];
       const minus = y && kappa.negate(degree - 1, y);
       const difference = x === undefined ? minus : minus === undefined ? x : kappa.add(degree - 1, x, minus);
-      return new ResidueFinding(base, element, degree, x, y, difference, units.classOfMinusOne);
+      return new ResidueFinding(base, entries, element, degree, x, y, difference, units.classOfMinusOne);
     });
   });
 }
@@ -68,6 +68,7 @@ class ResidueFinding implements Finding {
 
   constructor(
     private readonly sight: readonly BaseElement[],
+    private readonly entries: readonly RationalEntry[],
     private readonly element: BaseElement,
     readonly degree: number,
     private readonly x: ResidueClass<Int> | undefined,
@@ -79,7 +80,7 @@ class ResidueFinding implements Finding {
       ? difference === undefined
         ? 'zero'
         : 'nonzero'
-      : unsplitZeroTest(sight, element.value, degree - 1, difference);
+      : unsplitZeroTest(sight, entries, element.value, degree - 1, difference);
   }
 
   get base(): bigint {
@@ -104,7 +105,7 @@ class ResidueFinding implements Finding {
     if (this.same) return 'zero';
     if (this.element.prime) return zeroModH(this.difference, this.classOfMinusOne);
     const asForm = this.difference && { ...this.difference, unit: undefined };
-    return unsplitZeroTest(this.sight, this.base, -1, asForm);
+    return unsplitZeroTest(this.sight, this.entries, this.base, -1, asForm);
   }
   left(): Expression {
     return this.write(this.x);
@@ -151,4 +152,3 @@ function residueGroup(degree: number, b: bigint, prime: boolean): string {
   if (degree === 1) return prime ? `${field}^{\\times}` : `\\mathbb{F}_{p}^{\\times},\\ p \\mid ${b}`;
   return degree === 0 ? `\\mathrm{GW}(${field})` : `\\mathrm{W}(${field})`;
 }
-

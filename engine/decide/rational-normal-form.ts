@@ -37,8 +37,13 @@ export function rationalNormalForm(statement: RationalStatement, budget: Budget)
   for (const [degree, word] of tower(statement, budget)) put(degree, word);
   const [terms = []] = statement.sides;
   const rank = BigInt(evaluate(terms, rankRing, budget).get(0) ?? 0);
-  const signatures = evaluate(terms, signatureRing<RationalEntry>((entry) => entry.negative), budget);
-  for (const degree of new Set([...signatures.keys(), 0])) put(degree, constantPart(degree, BigInt(signatures.get(degree) ?? 0), rank));
+  const signatures = evaluate(
+    terms,
+    signatureRing<RationalEntry>((entry) => entry.negative),
+    budget,
+  );
+  for (const degree of new Set([...signatures.keys(), 0]))
+    put(degree, constantPart(degree, BigInt(signatures.get(degree) ?? 0), rank));
   return [...parts]
     .sort(([a], [b]) => b - a)
     .map(([degree, words]) => ({ degree, normalForm: total(words.reverse()), canonical: true }));
@@ -95,7 +100,10 @@ function* tower(statement: RationalStatement, budget: Budget): Generator<readonl
       if (d === undefined) continue;
       const prefix = [symbol([integerElement(p)])];
       yield [degree, writeResidueClass(field, degree - 1, d, prefix)];
-      for (const word of residueWords(degree - 1, d, { nonSquare: field.nonSquare, orderModFour: orderModFour(field) })) {
+      for (const word of residueWords(degree - 1, d, {
+        nonSquare: field.nonSquare,
+        orderModFour: orderModFour(field),
+      })) {
         const lift = word.symbol ?? word.angle;
         if (lift === undefined) continue; // [p]ηᵏ ramifies at p only
         const entry = entryOf(BigInt(lift));

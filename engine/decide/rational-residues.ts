@@ -45,7 +45,12 @@ export function rationalResidues(
     const place = rationalPlace(base, index ?? sight.base.length);
     const local = parameter === undefined ? place.local : against(parameter, p, place.local);
     const value = evaluate(terms, thetaRing(place.units, local), budget);
-    return describe(p, value, parameter === undefined ? integerElement(p) : rationals.write(parameter), Math.max(0, ...degreesOf(terms)));
+    return describe(
+      p,
+      value,
+      parameter === undefined ? integerElement(p) : rationals.write(parameter),
+      Math.max(0, ...degreesOf(terms)),
+    );
   };
 
   if (asked !== undefined) {
@@ -95,12 +100,17 @@ function readPrime(text: string): bigint {
   return BigInt(trimmed);
 }
 
-const shown = (text: string): string => (text.length > 40 ? `${text.slice(0, 40)}…` : text === '' ? 'An empty text' : text);
+const shown = (text: string): string =>
+  text.length > 40 ? `${text.slice(0, 40)}…` : text === '' ? 'An empty text' : text;
 
 function readUniformizer(element: Element, asked: readonly bigint[] | undefined, budget: Budget): Rational {
   const [p] = asked ?? [];
   if (p === undefined || new Set(asked).size !== 1)
-    throw new Refusal('uniformizer', 'A uniformizer goes with exactly one place. Name that place in places.', element.at);
+    throw new Refusal(
+      'uniformizer',
+      'A uniformizer goes with exactly one place. Name that place in places.',
+      element.at,
+    );
   const value = unitReader(rationals, budget)(element);
   const order = valuation(value.num, p).exponent - valuation(value.den, p).exponent;
   if (order !== 1)

@@ -24,6 +24,7 @@ export function rationalStatement(expressions: readonly Expression[], budget: Bu
 /** The terms of each side that ramify at each element of the base, by its index. */
 export interface Incidence {
   readonly base: readonly BaseElement[];
+  readonly entries: readonly RationalEntry[];
   /** For every base index, one list of terms for each side. */
   readonly terms: readonly (readonly (readonly Term<RationalEntry>[])[])[];
 }
@@ -42,5 +43,5 @@ export function incidence({ sides, entries }: RationalStatement, split: Splittin
       });
     }
   });
-  return { base, terms };
+  return { base, entries, terms };
 }

@@ -25,7 +25,11 @@ export function resolveField(name: FieldName, budget: Budget): DecidableField {
       return complexField;
     case 'padics':
       if (!isPrime(name.prime))
-        throw new Refusal('field', `${name.prime} is not a prime, so there is no field Q_${name.prime}. Type a prime, as in Q_5.`, name.at);
+        throw new Refusal(
+          'field',
+          `${name.prime} is not a prime, so there is no field Q_${name.prime}. Type a prime, as in Q_5.`,
+          name.at,
+        );
       return padicField(name.prime);
     case 'finite':
       return decidableFiniteField(resolveFiniteField(name, budget));

@@ -16,6 +16,9 @@ export function residues(
   budget: Budget,
 ): ResiduesOutcome {
   if (field.residues === undefined)
-    throw new Refusal('place', `Residues are taken along discrete valuations, and ${field.name} is given without any. Choose Q.`);
+    throw new Refusal(
+      'place',
+      `Residues are taken along discrete valuations, and ${field.name} is given without any. Choose Q.`,
+    );
   return field.residues(expression, options.places, options.uniformizer, budget);
 }

@@ -27,4 +27,9 @@ export const quotientElement = (numerator: Element, denominator: Element, at?: S
   at,
 });
 /** `exponent` is any integer; its size is bounded where text is read. */
-export const powerElement = (base: Element, exponent: number, at?: Span): Element => ({ kind: 'power', base, exponent, at });
+export const powerElement = (base: Element, exponent: number, at?: Span): Element => ({
+  kind: 'power',
+  base,
+  exponent,
+  at,
+});

@@ -33,4 +33,9 @@ export const epsilonInteger = (count: bigint, at?: Span): Expression => ({ kind:
 export const negate = (of: Expression, at?: Span): Expression => ({ kind: 'negate', of, at });
 export const sum = (terms: readonly Expression[], at?: Span): Expression => ({ kind: 'sum', terms, at });
 export const product = (factors: readonly Expression[], at?: Span): Expression => ({ kind: 'product', factors, at });
-export const power = (base: Expression, exponent: number, at?: Span): Expression => ({ kind: 'power', base, exponent, at });
+export const power = (base: Expression, exponent: number, at?: Span): Expression => ({
+  kind: 'power',
+  base,
+  exponent,
+  at,
+});

@@ -11,6 +11,12 @@ export type FieldName =
   | { readonly kind: 'complexes'; readonly at?: Span }
   | { readonly kind: 'padics'; readonly prime: bigint; readonly at?: Span }
   | { readonly kind: 'finite'; readonly order: bigint; readonly at?: Span }
-  | { readonly kind: 'extension'; readonly base: FieldName; readonly letter: string; readonly modulus: Element; readonly at?: Span }
+  | {
+      readonly kind: 'extension';
+      readonly base: FieldName;
+      readonly letter: string;
+      readonly modulus: Element;
+      readonly at?: Span;
+    }
   | { readonly kind: 'functions'; readonly base: FieldName; readonly letter: string; readonly at?: Span }
   | { readonly kind: 'any'; readonly at?: Span };

@@ -37,7 +37,7 @@ function oddSquares(p: bigint): LocalSquares {
     representatives: [1n, s, p, s * p],
     classOf(a) {
       const order = orderAt(a, p);
-      return (quadraticClass(unitModulo(a, p, order), p)) | ((order & 1) << 1);
+      return quadraticClass(unitModulo(a, p, order), p) | ((order & 1) << 1);
     },
     hilbert: (a, b) =>
       ((bit(a, 1) & bit(b, 1) & minusOne) ^ (bit(a, 0) & bit(b, 1)) ^ (bit(b, 0) & bit(a, 1))) === 1 ? 1 : 0,
@@ -55,6 +55,5 @@ const dyadicSquares: LocalSquares = {
     const unit = (odd(a.num) * odd(a.den)) & 7;
     return bit(unit, 1) | ((unit === 3 || unit === 5 ? 1 : 0) << 1) | ((order & 1) << 2);
   },
-  hilbert: (a, b) =>
-    ((bit(a, 0) & bit(b, 0)) ^ (bit(a, 2) & bit(b, 1)) ^ (bit(b, 2) & bit(a, 1))) === 1 ? 1 : 0,
+  hilbert: (a, b) => (((bit(a, 0) & bit(b, 0)) ^ (bit(a, 2) & bit(b, 1)) ^ (bit(b, 2) & bit(a, 1))) === 1 ? 1 : 0),
 };

@@ -15,7 +15,10 @@ export interface RationalEntry {
 }
 
 /** Makes entries from rationals, one object for each value. */
-export function rationalEntries(): { intern(value: Rational, at?: Span): RationalEntry; all(): readonly RationalEntry[] } {
+export function rationalEntries(): {
+  intern(value: Rational, at?: Span): RationalEntry;
+  all(): readonly RationalEntry[];
+} {
   const all: RationalEntry[] = [];
   const byDenominator = new Map<bigint, Map<bigint, RationalEntry>>();
   return {

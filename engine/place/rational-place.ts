@@ -8,6 +8,7 @@ import { primeField } from '../field/prime-field';
 import type { Rational } from '../field/rational';
 import { fieldUnits } from '../ring/field-units';
 import type { ResidueClass, UnitGroup } from '../ring/residue-class-ring';
+import { isKnownSquare } from './known-square';
 import type { RationalEntry } from './rational-entry';
 import type { BaseElement } from './sight';
 import type { LocalEntry } from './theta-ring';
@@ -135,6 +136,7 @@ export type ZeroTest = 'zero' | 'nonzero' | 'unknown';
  */
 export function unsplitZeroTest(
   base: readonly BaseElement[],
+  entries: readonly RationalEntry[],
   b: bigint,
   degree: number,
   x: ResidueClass<Int> | undefined,
@@ -156,5 +158,6 @@ export function unsplitZeroTest(
   base.forEach(({ value }, i) => {
     if (((mask >> BigInt(i + 1)) & 1n) === 1n) unit = (unit * value) % b;
   });
-  return jacobi(unit, b) === -1 ? 'nonzero' : 'unknown';
+  if (jacobi(unit, b) === -1) return 'nonzero';
+  return isKnownSquare(base, entries, b, mask) ? 'zero' : 'unknown';
 }

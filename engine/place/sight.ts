@@ -55,12 +55,15 @@ export function see(entries: readonly RationalEntry[], split: Splitting, budget:
     below: entry.value.den === 1n ? undefined : strip(entry.value.den, entry),
   }));
 
-  const base: BaseElement[] = hardBase(hard, primes, split, entries, budget).filter(({ value }) => !primes.has(toInt(value)));
+  const base: BaseElement[] = hardBase(hard, primes, split, entries, budget).filter(
+    ({ value }) => !primes.has(toInt(value)),
+  );
   for (const p of primes) base.push({ value: BigInt(p), prime: true });
   base.sort((a, b) => (a.value < b.value ? -1 : 1));
   const index = new Map<Int, number>(base.map(({ value }, i) => [toInt(value), i]));
   // what a composite is made of: none of its factors is found by trial division
-  const large = hard.size === 0 ? [] : base.flatMap(({ value }, i) => (value >= BigInt(TRIAL_BOUND) ? [{ value, i }] : []));
+  const large =
+    hard.size === 0 ? [] : base.flatMap(({ value }, i) => (value >= BigInt(TRIAL_BOUND) ? [{ value, i }] : []));
 
   for (const { entry, above, below } of parts) {
     const exponents = new Map<number, Int>();
@@ -94,7 +97,8 @@ function stripSmall(n: number, entry: RationalEntry, budget: Budget): Stripped {
   }
   if (rest === 1) return { factors, rest: 1n };
   if (rest < TRIAL_BOUND * TRIAL_BOUND) factors.push([rest, 1]);
-  else for (const { prime, exponent } of factorEntry(BigInt(rest), entry, budget)) factors.push([toInt(prime), exponent]);
+  else
+    for (const { prime, exponent } of factorEntry(BigInt(rest), entry, budget)) factors.push([toInt(prime), exponent]);
   return { factors, rest: 1n };
 }
 

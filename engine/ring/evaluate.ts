@@ -45,8 +45,13 @@ function addTerm<A, H>(total: Graded<H>, term: Term<A>, ring: GradedRing<A, H>, 
   else if (word !== undefined) accumulate(total, degree, word, ring);
 }
 
-const times = <A, H>(m: number, x: H | undefined, n: number, y: H | undefined, ring: GradedRing<A, H>): H | undefined =>
-  x === undefined || y === undefined ? undefined : ring.multiply(m, x, n, y);
+const times = <A, H>(
+  m: number,
+  x: H | undefined,
+  n: number,
+  y: H | undefined,
+  ring: GradedRing<A, H>,
+): H | undefined => (x === undefined || y === undefined ? undefined : ring.multiply(m, x, n, y));
 
 function multiply<A, H>(x: Graded<H>, y: Graded<H>, ring: GradedRing<A, H>, budget: Budget): Graded<H> {
   const product: Graded<H> = new Map();

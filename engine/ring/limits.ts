@@ -11,7 +11,10 @@ export const DEGREE_LIMIT = 10_000;
 /** Returns `n`, or refuses it when it is past the limit on coefficients. */
 export function boundedCoefficient<N extends Int>(n: N): N {
   if (typeof n === 'bigint' && (n > LARGEST || n < LEAST))
-    throw new Refusal('size', 'A coefficient has more than 100 000 digits. Use smaller powers or smaller coefficients.');
+    throw new Refusal(
+      'size',
+      'A coefficient has more than 100 000 digits. Use smaller powers or smaller coefficients.',
+    );
   return n;
 }
 

@@ -25,7 +25,9 @@ function lowerNode<A>(node: Expression, read: (entry: Element) => A): readonly T
     case 'integer':
       return node.value === 0n ? [] : [constantTerm(boundedCoefficient(toInt(node.value)))];
     case 'symbol':
-      return [{ ...constantTerm<A>(1), factors: node.entries.map((entry) => ({ kind: 'symbol', entry: read(entry) })) }];
+      return [
+        { ...constantTerm<A>(1), factors: node.entries.map((entry) => ({ kind: 'symbol', entry: read(entry) })) },
+      ];
     case 'angle':
       return node.entries.map((entry) => angleTerm(1, read(entry)));
     case 'pfister':

@@ -24,15 +24,16 @@ export function productRing<A>(factored: (entry: A) => FactoredEntry): GradedRin
   const integer = (value: Int): ProductClass | undefined =>
     value === 0 ? undefined : { kind: 'integer', value: boundedCoefficient(value) };
   const unit = (odd: boolean, exponents: ReadonlyMap<number, Int>): ProductClass | undefined =>
-    !odd && exponents.size === 0
-      ? undefined
-      : { kind: 'unit', sign: odd ? 1 : 0, exponents };
+    !odd && exponents.size === 0 ? undefined : { kind: 'unit', sign: odd ? 1 : 0, exponents };
   const scale = (n: Int, x: ProductClass): ProductClass | undefined =>
     x.kind === 'integer'
       ? integer(multiplyInt(n, x.value))
       : n === 0
         ? undefined
-        : unit(isOddInt(n) && x.sign === 1, new Map([...x.exponents].map(([i, e]) => [i, boundedCoefficient(multiplyInt(n, e))])));
+        : unit(
+            isOddInt(n) && x.sign === 1,
+            new Map([...x.exponents].map(([i, e]) => [i, boundedCoefficient(multiplyInt(n, e))])),
+          );
 
   return {
     integer,
@@ -58,7 +59,7 @@ export function productRing<A>(factored: (entry: A) => FactoredEntry): GradedRin
       x.kind === 'integer' ? scale(x.value, y) : y.kind === 'integer' ? scale(y.value, x) : undefined,
     equal: (_degree, x, y) =>
       x.kind === 'integer' || y.kind === 'integer'
-        ? x.kind === "integer" && y.kind === "integer" && x.value === y.value
+        ? x.kind === 'integer' && y.kind === 'integer' && x.value === y.value
         : x.sign === y.sign &&
           x.exponents.size === y.exponents.size &&
           [...x.exponents].every(([i, e]) => y.exponents.get(i) === e),

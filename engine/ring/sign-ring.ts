@@ -38,9 +38,7 @@ export function multiplySign(m: number, a: SignClass, n: number, b: SignClass): 
   if (m > 0 === n > 0) return { x, y: 0n };
   // [−1]ᵏηˡ: each pair of one [−1] and one η gives −2, but the last pair stays in degree 0, as η[−1]
   const pairs = Math.min(Math.abs(m), Math.abs(n));
-  return m + n === 0
-    ? { x: 0n, y: x * (-2n) ** BigInt(pairs - 1) }
-    : { x: x * (-2n) ** BigInt(pairs), y: 0n };
+  return m + n === 0 ? { x: 0n, y: x * (-2n) ** BigInt(pairs - 1) } : { x: x * (-2n) ** BigInt(pairs), y: 0n };
 }
 
 /** n_ε in B_0: n = x + y in all, y of them ⟨−1⟩ = 1 + η[−1]. */

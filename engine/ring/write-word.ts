@@ -31,4 +31,3 @@ export function total(words: readonly Expression[]): Expression {
 export const isZero = (word: Expression): boolean => word.kind === 'integer' && word.value === 0n;
 
 export const zeroExpression: Expression = integer(0n);
-
