@@ -116,10 +116,3 @@ const smaller = 'Ask about something smaller.';
 
 const isOutOfMemory = (error: unknown): boolean =>
   error instanceof Error && 'code' in error && error.code === 'ERR_WORKER_OUT_OF_MEMORY';
-
-/** Ends the threads; for the end of the process. */
-export async function closePool(): Promise<void> {
-  const open = held.quadrelEngine;
-  delete held.quadrelEngine;
-  await open?.threads.destroy();
-}

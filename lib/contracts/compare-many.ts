@@ -15,7 +15,6 @@ export const compareManyRequest = z.strictObject({
     .describe('Up to 500 questions, each as for `compare`.')
     .meta({ items: { $ref: '#/components/schemas/CompareRequest' } }),
 });
-export type CompareManyRequest = z.infer<typeof compareManyRequest>;
 
 export const compareManyItem = z.union([
   z.object({ status: z.literal(200), answer: compareAnswer }),

@@ -35,7 +35,6 @@ export type CompareRequest = z.infer<typeof compareRequest>;
 export const verdict = z
   .enum(['equal', 'different', 'undecided'])
   .describe('`undecided` when neither an argument nor a separating invariant was found.');
-export type VerdictName = z.infer<typeof verdict>;
 
 export const mapName = z
   .enum([
