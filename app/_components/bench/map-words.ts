@@ -32,8 +32,9 @@ const contribution: Record<MapName, string> = {
 
 /** "the part at the real place, and the residue at every prime in sight". */
 export function contributions(maps: readonly MapName[]): string {
+  // The rank is part of what the real place sees.
   const parts = (Object.keys(contribution) as MapName[])
-    .filter((map) => maps.includes(map))
+    .filter((map) => maps.includes(map) && !(map === 'rank' && maps.includes('signature')))
     .map((map) => contribution[map]);
   const last = parts.at(-1) ?? '';
   return parts.length < 2 ? last : `${parts.slice(0, -1).join(', ')}, and ${last}`;

@@ -12,6 +12,15 @@ export function Said({ phrase }: { readonly phrase: Phrase }) {
   ));
 }
 
+/** Plain words in which K_2, F_7 and Q_5 are set as they are written by hand. */
+export function withFormulas(words: string): Phrase {
+  return words
+    .split(/\b([KQF]_\w+)\b/)
+    .map((part, index) =>
+      index % 2 === 0 ? part : tex(`${part.startsWith('K') ? 'K' : `\\mathbb{${part.charAt(0)}}`}_{${part.slice(2)}}`),
+    );
+}
+
 /** "2", "2 and 0", "2, 1 and 0". */
 export function listed(items: readonly string[]): string {
   const head = items.slice(0, -1);

@@ -54,26 +54,39 @@ export function useBench(opened: Draft | undefined) {
   );
   const noted = useAfterRest(fault !== undefined, patience);
 
-  const change = useCallback((next: string) => {
-    setText(next);
+  const touch = useCallback(() => {
     setEdited(true);
     setLastKey(performance.now());
   }, []);
-  const setField = useCallback((next: string) => {
-    setFieldState(next);
-    setEdited(true);
-    setLastKey(performance.now());
-    rememberField(next);
-  }, []);
-  const write = useCallback((draft: Draft) => {
-    setText(draft.statement);
-    setFieldState(draft.field);
-    setEdited(true);
-    setLastKey(performance.now());
-  }, []);
+  /** The editor reports what stands in it now. */
+  const change = useCallback(
+    (next: string) => {
+      setText(next);
+      touch();
+    },
+    [touch],
+  );
+  /** Puts another text into the line. */
+  const put = useCallback((next: string) => line.current?.replace(next), []);
+  const setField = useCallback(
+    (next: string) => {
+      setFieldState(next);
+      touch();
+      rememberField(next);
+    },
+    [touch],
+  );
+  const write = useCallback(
+    (draft: Draft) => {
+      setFieldState(draft.field);
+      touch();
+      put(draft.statement);
+    },
+    [touch, put],
+  );
 
   const live = settled?.state === 'read' ? settled : undefined;
-  return { line, field, setField, text, change, write, edited, reading, live, question, asked, fault, noted };
+  return { line, field, setField, text, change, put, write, edited, reading, live, question, asked, fault, noted };
 }
 
 export type BenchState = ReturnType<typeof useBench>;

@@ -13,6 +13,8 @@ import { weights } from './weights';
 export interface LineHandle {
   focus(): void;
   insert(piece: Pick<Insertion, 'before' | 'after'>): void;
+  /** Writes another text in place of what stands there. */
+  replace(text: string): void;
   /** Writes a piece at an offset and puts the caret behind it. */
   insertAt(offset: number, text: string): void;
   /** Puts the caret at the end of the line, after writing something there. */
@@ -21,7 +23,8 @@ export interface LineHandle {
 
 interface Props {
   readonly ref?: Ref<LineHandle>;
-  readonly text: string;
+  /** What stands in the line at first. From then on the editor alone holds the text: it is replaced through the handle. */
+  readonly initial: string;
   readonly onChange: (text: string) => void;
   readonly onDecide: () => void;
   readonly fault?: FaultSpans;
@@ -50,12 +53,12 @@ const pageNonce = (): string => document.querySelector<HTMLScriptElement>('scrip
  * The line one writes on. Until the editor has been made it shows the same text in the same place, so that nothing moves; every key
  * reaches the text, whatever is being computed.
  */
-export function LineEditor({ ref, text, onChange, onDecide, fault, labelledBy, describedBy }: Props) {
+export function LineEditor({ ref, initial, onChange, onDecide, fault, labelledBy, describedBy }: Props) {
   const host = useRef<HTMLDivElement>(null);
   const view = useRef<EditorView>(null);
   const calls = useRef({ onChange, onDecide });
-  const [initial] = useState(text);
-  const kept = useRef(text);
+  const [still] = useState(initial);
+  const kept = useRef(initial);
 
   useEffect(() => {
     calls.current = { onChange, onDecide };
@@ -106,18 +109,6 @@ export function LineEditor({ ref, text, onChange, onDecide, fault, labelledBy, d
   }, [labelledBy, describedBy]);
 
   useEffect(() => {
-    const made = view.current;
-    if (!made) return;
-    const now = made.state.doc.toString();
-    if (now !== text)
-      made.dispatch({
-        changes: { from: 0, to: now.length, insert: text },
-        selection: { anchor: text.length },
-        userEvent: 'input',
-      });
-  }, [text]);
-
-  useEffect(() => {
     view.current?.dispatch({
       effects: [
         setFault.of(fault),
@@ -132,6 +123,14 @@ export function LineEditor({ ref, text, onChange, onDecide, fault, labelledBy, d
       if (!view.current) return;
       insertPiece(view.current, piece);
       view.current.focus();
+    },
+    replace: (next) => {
+      const made = view.current;
+      made?.dispatch({
+        changes: { from: 0, to: made.state.doc.length, insert: next },
+        selection: { anchor: next.length },
+        userEvent: 'input',
+      });
     },
     insertAt: (offset, piece) => {
       const made = view.current;
@@ -161,7 +160,7 @@ export function LineEditor({ ref, text, onChange, onDecide, fault, labelledBy, d
     <div className="line">
       <div className="line-made" ref={host} />
       <div className="line-still" aria-hidden="true">
-        {initial}
+        {still}
       </div>
     </div>
   );

@@ -2,6 +2,7 @@ import type { ReactNode } from 'react';
 import type { ComparedPart } from '@/lib/contracts/compare';
 import { Floor, type FloorCell } from '../../tile/floor';
 import { floorOfComparison } from '../../tile/floor-of-parts';
+import { withRankAtReal } from '../real-place';
 import { LongFormula } from './long-formula';
 
 function FormsOf({ part }: { readonly part: ComparedPart }): ReactNode {
@@ -27,7 +28,7 @@ interface Props {
 
 /** The floor of tiles of a comparison, the canonical forms at the ends of its rows, and what its tiles mean. */
 export function EvidenceFloor({ parts, onShow, children }: Props) {
-  const { places, rows } = floorOfComparison(parts);
+  const { places, rows } = floorOfComparison(withRankAtReal(parts));
   const states = new Set(rows.flatMap((row) => row.cells.map((cell) => cell?.state)));
   const agree = parts.every((part) => part.verdict === 'equal');
   return (

@@ -10,6 +10,7 @@ import { Row } from '../../shell/row';
 import { Floor, type FloorCell } from '../../tile/floor';
 import { askInvariants, askResidues } from '../ask';
 import { floorOfExpression } from '../floor-of-expression';
+import { withRankAtReal } from '../real-place';
 import { FormFacts } from './form-facts';
 import { LongFormula } from './long-formula';
 import { ResidueTable } from './residue-table';
@@ -25,7 +26,7 @@ function InvariantsFloor({
   readonly answer: NormalizeAnswer;
 }) {
   const [chosen, setChosen] = useState<FloorCell>();
-  const { places, rows } = floorOfExpression(parts);
+  const { places, rows } = floorOfExpression(withRankAtReal(parts));
   const formOf = (degree: number) => answer.parts.find((part) => part.degree === degree)?.normalForm;
   const states = new Set(rows.flatMap((row) => row.cells.map((cell) => cell?.state)));
   return (

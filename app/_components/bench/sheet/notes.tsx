@@ -1,7 +1,7 @@
 import type { Answer } from '../ask';
 import { degreeMeaning, degreeName } from '../degrees';
 import { Formula } from '../../math/formula';
-import { type Phrase, Said, tex } from '../phrase';
+import { type Phrase, Said, tex, withFormulas } from '../phrase';
 
 function conditionsPhrase(answer: Answer): Phrase {
   const { field } = answer.body;
@@ -64,7 +64,9 @@ export function Notes({ answer, meaning, onWrite }: Props) {
       {statement && statement.evidence.theorem !== '' && (
         <div>
           <h2>why this is enough</h2>
-          <p>{statement.evidence.theorem}</p>
+          <p>
+            <Said phrase={withFormulas(statement.evidence.theorem)} />
+          </p>
         </div>
       )}
       <Degrees answer={answer} />

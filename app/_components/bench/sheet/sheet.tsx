@@ -53,8 +53,8 @@ function Repair({ bench, answer }: { readonly bench: BenchState; readonly answer
   useKey({ keyName: '=', label: 'compare it with another', act: compare, enabled: expression && asked.current });
   const add = () => {
     if (!form) return;
-    const line = `${answer.question.text} ${form.text.startsWith('-') ? `- (${form.text.slice(1).trimStart()})` : `+ ${form.text}`}`;
-    bench.change(line);
+    const line = `${answer.question.text} ${form.text.startsWith('-') ? form.text : `+ ${form.text}`}`;
+    bench.put(line);
   };
   useKey({
     keyName: 'A',
@@ -127,7 +127,7 @@ export function Sheet({ bench }: { readonly bench: BenchState }) {
               expression={answer.question.under?.expression ?? answer.question.text}
             />
           )}
-          <Notes answer={answer} meaning={meaning} onWrite={bench.change} />
+          <Notes answer={answer} meaning={meaning} onWrite={bench.put} />
         </>
       )}
     </main>

@@ -7,6 +7,12 @@ interface Props {
   readonly onInsert: (offset: number, text: string) => void;
 }
 
+/** Words with what is to be typed between backticks, as code. */
+function Typed({ text }: { readonly text: string }) {
+  return text.split('`').map((part, index) => (index % 2 === 0 ? part : <code key={index}>{part}</code>));
+}
+
+/** A piece that could stand there; where it is known what to write, its first sign is a button that writes it. */
 function Piece({
   piece,
   offset,
@@ -16,12 +22,17 @@ function Piece({
   offset: number | undefined;
   onInsert: Props['onInsert'];
 }) {
-  const { insert } = piece;
-  if (insert === undefined || offset === undefined) return <>{piece.text}</>;
+  const { insert, text } = piece;
+  const [before = '', sign, ...rest] = text.split('`');
+  if (insert === undefined || offset === undefined) return <Typed text={text} />;
   return (
-    <button type="button" className="plain" title={`Write ${insert} there`} onClick={() => onInsert(offset, insert)}>
-      {piece.text}
-    </button>
+    <>
+      {sign === undefined ? '' : before}
+      <button type="button" className="plain" title={`Write ${insert} there`} onClick={() => onInsert(offset, insert)}>
+        {sign ?? before}
+      </button>
+      <Typed text={rest.join('`')} />
+    </>
   );
 }
 
@@ -31,7 +42,7 @@ export function FaultNote({ id, fault, onInsert }: Props) {
     <div className="fault" role="status" id={id}>
       <p>
         {fault.place && <b>{fault.place} </b>}
-        {fault.message}
+        <Typed text={fault.message} />
       </p>
       {fault.expected.length > 0 && (
         <p>

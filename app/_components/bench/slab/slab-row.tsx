@@ -39,7 +39,7 @@ export function SlabRow({ bench, label, bare = false }: Props) {
         </span>
         <LineEditor
           ref={line}
-          text={text}
+          initial={text}
           onChange={change}
           onDecide={asked.askNow}
           fault={lineFault?.spans}
