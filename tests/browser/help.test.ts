@@ -18,7 +18,10 @@ test('no link within the page leads nowhere, and no id is there twice', async ()
   const { lost, twice } = await page.evaluate(() => {
     const ids = [...document.querySelectorAll('[id]')].map((place) => place.id);
     const links = [...document.querySelectorAll<HTMLAnchorElement>('a[href^="#"]')].map((link) => link.hash.slice(1));
-    return { lost: links.filter((id) => !ids.includes(id)), twice: ids.filter((id, index) => ids.indexOf(id) !== index) };
+    return {
+      lost: links.filter((id) => !ids.includes(id)),
+      twice: ids.filter((id, index) => ids.indexOf(id) !== index),
+    };
   });
   expect(lost).toEqual([]);
   expect(twice).toEqual([]);
@@ -27,7 +30,9 @@ test('no link within the page leads nowhere, and no id is there twice', async ()
 test('every example is read and decided as the page says: equal, but for the chain with a wrong step', async () => {
   const page = await openPage('/help');
   const links = await page.evaluate(() =>
-    [...document.querySelectorAll<HTMLAnchorElement>('a[href^="/bench?"]')].map((link) => link.getAttribute('href') ?? ''),
+    [...document.querySelectorAll<HTMLAnchorElement>('a[href^="/bench?"]')].map(
+      (link) => link.getAttribute('href') ?? '',
+    ),
   );
   expect(links.length).toBeGreaterThanOrEqual(15);
   for (const link of links) {
@@ -49,5 +54,7 @@ test('the index marks the subject that is read', async () => {
   const page = await openPage('/help');
   const index = page.getByRole('navigation', { name: 'On this page' });
   await index.getByRole('link', { name: 'conventions' }).click();
-  await expect.poll(() => index.getByRole('link', { name: 'conventions' }).getAttribute('aria-current')).toBe('location');
+  await expect
+    .poll(() => index.getByRole('link', { name: 'conventions' }).getAttribute('aria-current'))
+    .toBe('location');
 });

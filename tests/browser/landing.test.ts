@@ -5,12 +5,16 @@ test('the line gives a real answer, and another one to another statement', async
   const page = await openPage('/');
   await page.getByRole('heading', { level: 1, name: /one class, or two/ }).waitFor();
   const sheet = page.getByRole('main');
-  await expect.poll(() => sheet.getByText('Equal', { exact: true }).count(), { timeout: 20_000 }).toBeGreaterThanOrEqual(2);
+  await expect
+    .poll(() => sheet.getByText('Equal', { exact: true }).count(), { timeout: 20_000 })
+    .toBeGreaterThanOrEqual(2);
   await sheet.getByRole('table').waitFor();
   expect(await findings(page)).toEqual([]);
 
   await page.getByRole('button', { name: '[6] = [2] + [3]' }).click();
-  await expect.poll(() => sheet.getByText('Different', { exact: true }).count(), { timeout: 20_000 }).toBeGreaterThanOrEqual(2);
+  await expect
+    .poll(() => sheet.getByText('Different', { exact: true }).count(), { timeout: 20_000 })
+    .toBeGreaterThanOrEqual(2);
   expect(await findings(page)).toEqual([]);
   expect(errorsOf(page)).toEqual([]);
 });
@@ -25,7 +29,9 @@ test('what stands in the line opens on the bench', async () => {
 test('the contents name the rooms there are, and nothing that is not there', async () => {
   const page = await openPage('/');
   const contents = page.getByRole('navigation', { name: 'Contents' });
-  const paths = await contents.getByRole('link').evaluateAll((links) => links.map((link) => link.getAttribute('href') ?? ''));
+  const paths = await contents
+    .getByRole('link')
+    .evaluateAll((links) => links.map((link) => link.getAttribute('href') ?? ''));
   expect(paths).toEqual(['/bench', '/help', '/help/api']);
   for (const path of paths) expect((await page.request.get(path)).status()).toBe(200);
 });

@@ -23,9 +23,12 @@ describe.each(pages)('%s', (path) => {
     expect(errorsOf(page)).toEqual([]);
   });
 
-  test.each([320, 390, 720, 900, 1200, 1920])('does not move sideways at %i px', async (width) => {
-    const page = await openPage(path, { width, height: 800 });
-    expect(await overflow(page)).toBe(0);
+  test('does not move sideways from 320 to 1920 px', async () => {
+    const page = await openPage(path, { width: 1920, height: 800 });
+    for (const width of [1920, 1200, 1199, 900, 720, 719, 390, 320]) {
+      await page.setViewportSize({ width, height: 800 });
+      expect.soft(await overflow(page), `${width} px`).toBe(0);
+    }
   });
 });
 
@@ -129,7 +132,6 @@ test('print shows the sheet only', async () => {
 
 test('who asks for less motion gets none', async () => {
   const page = await openPage('/help', { still: true });
-  expect(await page.evaluate(() => getComputedStyle(document.documentElement).getPropertyValue('--lay').trim())).toBe(
-    '0ms',
-  );
+  const lay = await page.evaluate(() => getComputedStyle(document.documentElement).getPropertyValue('--lay'));
+  expect(Number.parseFloat(lay)).toBe(0);
 });
