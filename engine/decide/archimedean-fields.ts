@@ -16,6 +16,7 @@ import type { DecidableField } from './decidable-field';
 import type { Finding } from './finding';
 import type { NormalizedDegree } from './outcome';
 import { productClasses, productFinding, productValue } from './product-finding';
+import { rationalDerivation } from './rational-derivation';
 import { integerFinding, rankFinding, realFindings } from './real-findings';
 import { constantPart } from './rational-normal-form';
 import { rationalStatement, type RationalStatement } from './rational-statement';
@@ -57,6 +58,8 @@ export const realField: DecidableField = {
     const size = positive(unit(statement, budget));
     return collect(size === undefined ? parts : [[1, size], ...parts]);
   },
+  derivation: (expression, form, _conditions, budget) =>
+    rationalDerivation(expression, form, 'rank, signature and the product of the entries', budget),
   sideConditions: () => [],
 };
 
@@ -93,6 +96,8 @@ export const complexField: DecidableField = {
     if (!rationals.equal(value, rationals.one)) parts.push([1, symbol([rationals.write(value)])]);
     return collect(parts);
   },
+  derivation: (expression, form, _conditions, budget) =>
+    rationalDerivation(expression, form, 'rank and the product of the entries', budget),
   sideConditions: () => [],
 };
 

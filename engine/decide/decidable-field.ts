@@ -2,6 +2,7 @@ import type { Budget } from '../arith/budget';
 import type { Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import type { Condition } from '../expression/statement';
+import type { DerivationStep } from '../derive/rule';
 import type { Finding } from './finding';
 import type { NormalizedDegree, ResiduesOutcome } from './outcome';
 
@@ -19,6 +20,13 @@ export interface DecidableField {
   decide(left: Expression, right: Expression, conditions: readonly Condition[], budget: Budget): Decision;
   /** The canonical form by degree, highest first; parts that are zero are left out. */
   normalForm(expression: Expression, conditions: readonly Condition[], budget: Budget): readonly NormalizedDegree[];
+  /** The derivation of the canonical form `form` of an expression; `undefined` where it would be too long to read. */
+  derivation(
+    expression: Expression,
+    form: Expression,
+    conditions: readonly Condition[],
+    budget: Budget,
+  ): readonly DerivationStep[] | undefined;
   /** Side conditions under which the entries make sense; none over a field whose elements are known. */
   sideConditions(
     expressions: readonly Expression[],

@@ -1,5 +1,8 @@
 import type { Budget } from '../arith/budget';
 import { addInt, moduloFour, negateInt, xorInt } from '../arith/int';
+import type { Word } from '../derive/combination';
+import { derivation } from '../derive/derivation';
+import { finiteRules, unitAtoms } from '../derive/finite-rules';
 import type { Expression } from '../expression/expression';
 import type { FiniteField } from '../field/field';
 import { degreesOf } from '../ring/degrees';
@@ -51,9 +54,25 @@ export function decidableFiniteField<E>(field: FiniteField<E>): DecidableField {
         .sort(([a], [b]) => b - a)
         .map(([degree, part]) => ({ degree, normalForm: writeResidueClass(field, degree, part), canonical: true }));
     },
+    derivation: (expression, form, _conditions, budget) =>
+      derivation(
+        expression,
+        form,
+        () => ({
+          atoms: unitAtoms(field),
+          rules: finiteRules(field),
+          read: unitReader(field, budget),
+          compareWords: (a, b) => degreeOf(b) - degreeOf(a),
+          conclusion: 'in degree 1 the product of the units, in degrees ≤ 0 rank and discriminant',
+        }),
+        budget,
+      ),
     sideConditions: () => [],
   };
 }
+
+const degreeOf = (word: Word<unknown>): number =>
+  word.letters.reduce((sum, letter) => sum + (letter.kind === 'eta' ? -1 : 1), 0);
 
 function finding<E>(
   field: FiniteField<E>,

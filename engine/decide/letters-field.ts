@@ -1,4 +1,7 @@
 import type { Budget } from '../arith/budget';
+import { canonicalRules } from '../derive/canonical-rules';
+import { derivation } from '../derive/derivation';
+import { compareCanonicalWords, factoredAtoms, type FactoredAtom } from '../derive/factored-atoms';
 import { letterElement, type Element } from '../expression/element';
 import { symbol, type Expression } from '../expression/expression';
 import type { FieldName } from '../expression/field-name';
@@ -20,7 +23,7 @@ import { countBits, lettersOf, wordRing, type Monomial, type Words } from '../ri
 import { etaFactors, minusOneElement, multiple, symbolFactors, total, zeroExpression } from '../ring/write-word';
 import type { DecidableField } from './decidable-field';
 import type { Finding } from './finding';
-import { characteristicOf, lettersReader } from './letters-reading';
+import { characteristicOf, lettersReader, type LetterEntry } from './letters-reading';
 import { sideConditionsOf } from './letters-conditions';
 import { notAUnit } from './read-unit';
 
@@ -78,8 +81,33 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
           canonical: true,
         }));
     },
+    derivation(expression, form, conditions, budget) {
+      const { letters, characteristic } = open([expression], conditions, budget);
+      if (letters.length === 0) return constants(characteristic, budget).derivation(expression, form, [], budget);
+      const atoms = factoredAtoms(letters.map((name) => letterElement(name)));
+      const read = lettersReader(characteristic, conditions, budget);
+      return derivation<FactoredAtom>(
+        expression,
+        form,
+        () => ({
+          atoms,
+          rules: canonicalRules(atoms),
+          read: (entry) => atomOf(read(entry), letters),
+          compareWords: compareCanonicalWords,
+          conclusion: `the coefficients of −1 in characteristic ${characteristic}`,
+        }),
+        budget,
+      );
+    },
     sideConditions: sideConditionsOf,
   };
+}
+
+/** An entry that has been read as ± a product of letters, as an atom of derivations. */
+function atomOf(entry: LetterEntry, letters: readonly string[]): FactoredAtom {
+  if (entry.kind !== 'signed') throw new RangeError('not a product of letters');
+  const powers = [...entry.exponents].map(([name, e]) => [letters.indexOf(name), e] as const);
+  return { negative: entry.negative, powers: powers.sort(([a], [b]) => a - b) };
 }
 
 interface LettersStatement {

@@ -1,6 +1,7 @@
 import type { Budget } from '../arith/budget';
 import type { Expression } from '../expression/expression';
 import type { Condition } from '../expression/statement';
+import { total } from '../ring/write-word';
 import type { DecidableField } from './decidable-field';
 import type { NormalizeOutcome } from './outcome';
 
@@ -15,8 +16,12 @@ export function normalize(
   budget: Budget,
 ): NormalizeOutcome {
   const conditions = options.conditions ?? [];
+  const parts = field.normalForm(expression, conditions, budget);
+  const form = total(parts.map(({ normalForm }) => normalForm));
+  const steps = options.steps ? field.derivation(expression, form, conditions, budget) : undefined;
   return {
-    parts: field.normalForm(expression, conditions, budget),
+    parts,
+    ...(steps && { steps }),
     sideConditions: field.sideConditions([expression], conditions, budget),
   };
 }

@@ -1,3 +1,4 @@
+import type { DerivationStep } from '../derive/rule';
 import type { Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import type { Condition } from '../expression/statement';
@@ -73,12 +74,7 @@ export interface NormalizedDegree {
 }
 
 /** One rewriting: the relation used, the field elements it was used at, the whole expression before and after. */
-export interface Step {
-  readonly relation: string;
-  readonly args: readonly Element[];
-  readonly before: Expression;
-  readonly after: Expression;
-}
+export type Step = DerivationStep;
 
 export interface NormalizeOutcome {
   /** By degree, highest first; empty for zero. */

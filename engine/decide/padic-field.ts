@@ -22,6 +22,7 @@ import type { DecidableField } from './decidable-field';
 import type { Finding } from './finding';
 import type { NormalizedDegree } from './outcome';
 import { productClasses, productFinding, productValue } from './product-finding';
+import { rationalDerivation } from './rational-derivation';
 import { rankFinding } from './real-findings';
 import { rationalStatement, type RationalStatement } from './rational-statement';
 
@@ -93,6 +94,13 @@ export function padicField(p: bigint): DecidableField {
         })
         .filter(({ normalForm }) => !isZero(normalForm));
     },
+    derivation: (expression, form, _conditions, budget) =>
+      rationalDerivation(
+        expression,
+        form,
+        'rank, discriminant, Hasse invariant and the symbols of degrees 1 and 2',
+        budget,
+      ),
     sideConditions: () => [],
   };
 

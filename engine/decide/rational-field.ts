@@ -1,6 +1,7 @@
 import { rationals } from '../field/rational';
 import { checkConcreteConditions } from './concrete-conditions';
 import type { DecidableField } from './decidable-field';
+import { rationalDerivation } from './rational-derivation';
 import { rationalFindings } from './rational-findings';
 import { rationalNormalForm } from './rational-normal-form';
 import { rationalResidues } from './rational-residues';
@@ -18,6 +19,13 @@ export const rationalField: DecidableField = {
     checkConcreteConditions(rationals, conditions, budget);
     return rationalNormalForm(rationalStatement([expression], budget), budget);
   },
+  derivation: (expression, form, _conditions, budget) =>
+    rationalDerivation(
+      expression,
+      form,
+      'signature, rank and the residues at all primes, from the largest down',
+      budget,
+    ),
   sideConditions: () => [],
   residues: rationalResidues,
 };
