@@ -9,7 +9,7 @@ const mapWords: Record<ComparedMap['map'], string> = {
   specialisation: 'special value',
   product: 'product',
   symbol: 'symbol',
-  discriminant: 'discri­minant',
+  discriminant: 'discri\u00adminant',
   hasse: 'Hasse',
   class: 'class',
   word: 'word',

@@ -52,24 +52,3 @@ export function TileFace({
   }
   return <>{painted(left ?? right, small)}</>;
 }
-
-/** A tile that only shows. */
-export function Tile({
-  state,
-  firing,
-  left,
-  right,
-  className = '',
-}: {
-  state: TileState;
-  firing?: Firing;
-  left?: Value;
-  right?: Value;
-  className?: string;
-}) {
-  return (
-    <span className={`${tileClass(state, firing, left)} ${className}`}>
-      <TileFace state={state} left={left} right={right} />
-    </span>
-  );
-}
