@@ -35,7 +35,11 @@ export const isOddInt = (a: Int): boolean => (typeof a === 'number' ? a % 2 !== 
 /** a modulo 4, in 0 … 3. */
 export const moduloFour = (a: Int): number => (typeof a === 'number' ? ((a % 4) + 4) % 4 : Number(a & 3n));
 
-/** Bit masks, multiplied by exclusive or. A number stands for a mask of at most 31 bits. */
+/** Masks below this are combined as numbers, for JavaScript's bit operations see 32 bits only. */
+const SMALL_MASK = 2 ** 31;
+
+/** Bit masks (integers ≥ 0), combined by exclusive or. */
 export function xorInt(a: Int, b: Int): Int {
-  return typeof a === 'number' && typeof b === 'number' ? a ^ b : toInt(BigInt(a) ^ BigInt(b));
+  if (typeof a === 'number' && typeof b === 'number' && a < SMALL_MASK && b < SMALL_MASK) return a ^ b;
+  return toInt(BigInt(a) ^ BigInt(b));
 }

@@ -2,9 +2,10 @@ import type { Budget } from '../arith/budget';
 import { canonicalRules } from '../derive/canonical-rules';
 import { derivation } from '../derive/derivation';
 import { compareCanonicalWords, factoredAtoms, type FactoredAtom } from '../derive/factored-atoms';
-import { letterElement, type Element } from '../expression/element';
+import { integerElement, letterElement, type Element } from '../expression/element';
 import { symbol, type Expression } from '../expression/expression';
 import type { FieldName } from '../expression/field-name';
+import { mapEntries } from '../expression/map-entries';
 import { Refusal } from '../expression/refusal';
 import type { Condition } from '../expression/statement';
 import { elementText } from '../expression/to-text';
@@ -51,7 +52,8 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
     decide(left, right, conditions, budget) {
       const statement = open([left, right], conditions, budget);
       if (statement.letters.length === 0) {
-        const decision = constants(statement.characteristic, budget).decide(left, right, [], budget);
+        const [l, r] = [statement.constant(left), statement.constant(right)];
+        const decision = constants(statement.characteristic, budget).decide(l, r, [], budget);
         const over = statement.characteristic === 0n ? 'Q' : `F_${statement.characteristic}`;
         return {
           ...decision,
@@ -70,7 +72,7 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
     normalForm(expression, conditions, budget) {
       const statement = open([expression], conditions, budget);
       if (statement.letters.length === 0)
-        return constants(statement.characteristic, budget).normalForm(expression, [], budget);
+        return constants(statement.characteristic, budget).normalForm(statement.constant(expression), [], budget);
       const ring = wordRing(characteristicClass(statement.characteristic), budget);
       const value = evaluate(statement.sides[0] ?? [], ring, budget);
       return [...value]
@@ -82,8 +84,9 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
         }));
     },
     derivation(expression, form, conditions, budget) {
-      const { letters, characteristic } = open([expression], conditions, budget);
-      if (letters.length === 0) return constants(characteristic, budget).derivation(expression, form, [], budget);
+      const { letters, characteristic, constant } = open([expression], conditions, budget);
+      if (letters.length === 0)
+        return constants(characteristic, budget).derivation(constant(expression), form, [], budget);
       const atoms = factoredAtoms(letters.map((name) => letterElement(name)));
       const read = lettersReader(characteristic, conditions, budget);
       return derivation<FactoredAtom>(
@@ -111,6 +114,8 @@ function atomOf(entry: LetterEntry, letters: readonly string[]): FactoredAtom {
 }
 
 interface LettersStatement {
+  /** An expression without letters, its entries replaced by their values. */
+  constant(expression: Expression): Expression;
   readonly sides: readonly (readonly Term<Monomial>[])[];
   readonly letters: readonly string[];
 }
@@ -150,6 +155,11 @@ function readStatement(
       refused.entry.at,
     );
   }
+  const constantOf = (entry: Element): Element => {
+    const value = read(entry);
+    if (value.kind === 'constant') return { ...value.value, at: entry.at };
+    return { ...(value.kind === 'signed' && value.negative ? minusOneElement : integerElement(1n)), at: entry.at };
+  };
   const letters = [...names].sort(compareLetters);
   const indexOf = new Map(letters.map((name, i) => [name, i]));
   const monomials = new Map<Named, Monomial>();
@@ -163,18 +173,22 @@ function readStatement(
     monomials.set(value, made);
     return made;
   };
-  return { letters, sides: named.map((terms) => terms.map((term) => mapEntries(term, monomial))) };
+  return {
+    letters,
+    constant: (expression) => mapEntries(expression, constantOf),
+    sides: named.map((terms) => terms.map((term) => mapTerm(term, monomial))),
+  };
 }
 
 /** The same term with every entry replaced. */
-function mapEntries<A, B>(term: Term<A>, f: (entry: A) => B): Term<B> {
+function mapTerm<A, B>(term: Term<A>, f: (entry: A) => B): Term<B> {
   return {
     ...term,
     angles: term.angles.map(f),
     factors: term.factors.map((factor) =>
       factor.kind === 'symbol'
         ? { kind: 'symbol', entry: f(factor.entry) }
-        : { ...factor, of: factor.of.map((inner) => mapEntries(inner, f)) },
+        : { ...factor, of: factor.of.map((inner) => mapTerm(inner, f)) },
     ),
   };
 }

@@ -5,7 +5,7 @@ import { Refusal } from '../expression/refusal';
 import type { Condition } from '../expression/statement';
 import { conditionText } from '../expression/to-text';
 import type { Field } from '../field/field';
-import { laurentRing, readLaurent, type Laurent, type LaurentRing } from '../field/laurent';
+import { laurentPower, laurentRing, readLaurent, type Laurent, type LaurentRing } from '../field/laurent';
 import { primeField } from '../field/prime-field';
 import { rationals } from '../field/rational';
 
@@ -33,7 +33,8 @@ export function characteristicOf(conditions: readonly Condition[]): bigint {
 
 /** What an entry in letters is: zero, ± a product of letters (±1 among them), another constant, or something else. */
 export type LetterEntry =
-  | { readonly kind: 'zero' | 'constant' | 'other' }
+  | { readonly kind: 'zero' | 'other' }
+  | { readonly kind: 'constant'; readonly value: Element }
   | { readonly kind: 'signed'; readonly negative: boolean; readonly exponents: ReadonlyMap<string, bigint> };
 
 /**
@@ -89,7 +90,7 @@ function classify<E>(f: Laurent<E>, field: Field<E>): LetterEntry {
   const positive = field.equal(term.coefficient, field.one);
   if (positive || field.equal(term.coefficient, field.negate(field.one)))
     return { kind: 'signed', negative: !positive, exponents: term.exponents };
-  return { kind: term.exponents.size === 0 ? 'constant' : 'other' };
+  return term.exponents.size === 0 ? { kind: 'constant', value: field.write(term.coefficient) } : { kind: 'other' };
 }
 
 interface Solution<E> {
@@ -123,23 +124,8 @@ function substitute<E>(f: Laurent<E>, { name, value }: Solution<E>, ring: Lauren
   let result: Laurent<E> = new Map();
   for (const [key, term] of f) {
     const e = term.exponents.get(name) ?? 0n;
-    const base = e < 0n ? ring.invert(value) : value;
-    if (base === undefined)
-      throw new Refusal(
-        'not-yet',
-        `Conditions that put a sum in the place of ${name} in a denominator are not decided yet.`,
-      );
-    let product: Laurent<E> = ring.multiply(
-      new Map([[key, term]]),
-      e === 0n ? ring.constant(ring.field.one) : powerOf(name, -e, ring),
-    );
-    for (let i = 0n; i < (e < 0n ? -e : e); i += 1n) product = ring.multiply(product, base);
-    result = ring.add(result, product);
+    const without = ring.multiply(new Map([[key, term]]), laurentPower(ring.letter(name), -e, ring));
+    result = ring.add(result, e === 0n ? without : ring.multiply(without, laurentPower(value, e, ring)));
   }
   return result;
-}
-
-function powerOf<E>(name: string, e: bigint, ring: LaurentRing<E>): Laurent<E> {
-  const exponents = new Map([[name, e]]);
-  return new Map([[`${name}^${e}`, { coefficient: ring.field.one, exponents }]]);
 }

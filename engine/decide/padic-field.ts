@@ -67,7 +67,7 @@ export function padicField(p: bigint): DecidableField {
         if (degree === 2 && p !== 2n) return [tameFinding(tameSymbols(l, budget), tameSymbols(r, budget))];
         const values = [invariants(lw.get(degree)), invariants(rw.get(degree))] as const;
         return [
-          ...(degree === 1 ? [productFinding(statement, `${tex}^{\\times}`, budget)] : []),
+          ...(degree === 1 ? [degreeOneProduct(statement, values, budget)] : []),
           ...(degree === 0 ? [rankFinding(l, r, budget)] : []),
           ...wittFindings(degree, ...values),
         ];
@@ -103,6 +103,16 @@ export function padicField(p: bigint): DecidableField {
       ),
     sideConditions: () => [],
   };
+
+  /** The product of the entries; modulo h only its square class is left. */
+  function degreeOneProduct(
+    statement: RationalStatement,
+    [left, right]: readonly [LocalInvariants, LocalInvariants],
+    budget: Budget,
+  ): Finding {
+    const finding = productFinding(statement, `${tex}^{\\times}`, budget);
+    return { ...finding, sameModH: left.discriminant === right.discriminant };
+  }
 
   function wittFindings(degree: number, left: LocalInvariants, right: LocalInvariants): readonly Finding[] {
     const findings: Finding[] = [];

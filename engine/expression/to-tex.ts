@@ -51,7 +51,8 @@ export function conditionTex(condition: Condition): string {
   if (condition.kind === 'characteristic') {
     return `\\operatorname{char} ${condition.is ? '=' : '\\ne'} ${condition.prime}`;
   }
-  return `${elementTex(condition.left)} ${condition.kind === 'equal' ? '=' : '\\ne'} ${elementTex(condition.right)}`;
+  const left = elementTex(condition.left);
+  return `${left.startsWith('char') ? `(${left})` : left} ${condition.kind === 'equal' ? '=' : '\\ne'} ${elementTex(condition.right)}`;
 }
 
 /** The statement in TeX: `[a][1-a] = 0 ;\ a \ne 1`. */

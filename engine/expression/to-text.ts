@@ -40,7 +40,8 @@ export const expressionText = (expression: Expression): string => printExpressio
 /** The hypothesis as plain text: `a != 1`, `char != 2`. */
 export function conditionText(condition: Condition): string {
   if (condition.kind === 'characteristic') return `char ${condition.is ? '=' : '!='} ${condition.prime}`;
-  return `${elementText(condition.left)} ${condition.kind === 'equal' ? '=' : '!='} ${elementText(condition.right)}`;
+  const left = elementText(condition.left);
+  return `${left.startsWith('char') ? `(${left})` : left} ${condition.kind === 'equal' ? '=' : '!='} ${elementText(condition.right)}`;
 }
 
 /** The statement as plain text: `[a][1-a] = 0 ; a != 1`. */

@@ -3,6 +3,7 @@ import type { Element } from '../expression/element';
 import { Refusal } from '../expression/refusal';
 import type { Span } from '../expression/span';
 import type { Field } from './field';
+import { SIZE_LIMIT, tooLarge } from './read-element';
 
 /** A monomial with its coefficient, which is not zero; exponents by letter, those that are 0 left out. */
 export interface LaurentTerm<E> {
@@ -56,11 +57,14 @@ export function laurentRing<E>(field: Field<E>, budget: Budget): LaurentRing<E> 
       const terms = new Map<string, LaurentTerm<E>>();
       for (const a of f.values()) {
         budget.spend('reading an entry');
-        for (const b of g.values())
+        for (const b of g.values()) {
+          if ((field.size?.(a.coefficient) ?? 0) + (field.size?.(b.coefficient) ?? 0) > SIZE_LIMIT)
+            throw tooLarge(undefined);
           put(terms, {
             coefficient: field.multiply(a.coefficient, b.coefficient),
             exponents: addExponents(a.exponents, b.exponents),
           });
+        }
       }
       return terms;
     },
@@ -116,7 +120,9 @@ export function readLaurent<E>(
       case 'quotient':
         return divide(read(e.numerator), read(e.denominator), e.denominator.at ?? e.at);
       case 'power':
-        return power(read(e.base), e.exponent, e.at);
+        return e.exponent < 0
+          ? laurentPower(divide(ring.constant(ring.field.one), read(e.base), e.at), BigInt(-e.exponent), ring, e.at)
+          : laurentPower(read(e.base), BigInt(e.exponent), ring, e.at);
     }
   };
   const divide = (f: Laurent<E>, g: Laurent<E>, at: Span | undefined): Laurent<E> => {
@@ -138,16 +144,37 @@ export function readLaurent<E>(
   };
   const single = (term: LaurentTerm<E> | undefined): Laurent<E> =>
     term === undefined ? new Map() : new Map([[keyOf(term.exponents), term]]);
-  const power = (base: Laurent<E>, exponent: number, at: Span | undefined): Laurent<E> => {
-    if (exponent < 0) return power(divide(ring.constant(ring.field.one), base, at), -exponent, at);
-    if (base.size > 1 && exponent > TERM_LIMIT)
-      throw new Refusal('not-yet', 'Large powers of a sum of letters are not decided yet.', at);
-    let result = ring.constant(ring.field.one);
-    for (const digit of exponent.toString(2)) {
-      result = ring.multiply(result, result);
-      if (digit === '1') result = ring.multiply(result, base);
-    }
-    return result;
-  };
   return read(element);
+}
+
+/**
+ * f^n. A single term is raised at once, its coefficient measured before it is computed; a sum is multiplied out for n ≥ 0 only,
+ * and refused as `not-yet` when that would be long.
+ */
+export function laurentPower<E>(f: Laurent<E>, n: bigint, ring: LaurentRing<E>, at?: Span): Laurent<E> {
+  const [term, more] = f.values();
+  if (n === 0n) return ring.constant(ring.field.one);
+  if (term === undefined) return f;
+  const size = n < 0n ? -n : n;
+  if (more === undefined) {
+    const base = n < 0n ? ring.field.inverse(term.coefficient) : term.coefficient;
+    if (BigInt((ring.field.size?.(base) ?? 1) - 1) * size > BigInt(SIZE_LIMIT)) throw tooLarge(at);
+    const exponents = new Map([...term.exponents].map(([name, e]) => [name, e * n] as const));
+    return new Map([[keyOf(exponents), { coefficient: fieldPower(ring.field, base, size), exponents }]]);
+  }
+  if (n < 0n || n > BigInt(TERM_LIMIT))
+    throw new Refusal('not-yet', 'Large or negative powers of a sum of letters are not decided yet.', at);
+  let result = f;
+  for (let i = 1n; i < n; i += 1n) result = ring.multiply(result, f);
+  return result;
+}
+
+function fieldPower<E>(field: Field<E>, base: E, exponent: bigint): E {
+  if (field.equal(base, field.one)) return base;
+  let result = field.one;
+  for (const digit of exponent.toString(2)) {
+    result = field.multiply(result, result);
+    if (digit === '1') result = field.multiply(result, base);
+  }
+  return result;
 }

@@ -7,7 +7,7 @@ import { lettersOf } from './extension-field';
 import type { Field } from './field';
 
 /** The binary digits of 10^100000: elements of a field of characteristic 0 are refused past them. */
-const SIZE_LIMIT = 332193;
+export const SIZE_LIMIT = 332193;
 
 /**
  * The value of a written element in a field, in canonical form.
@@ -72,7 +72,8 @@ export function elementReader<E>(field: Field<E>, budget: Budget): (element: Ele
   return value;
 }
 
-const tooLarge = (at: Span | undefined): Refusal =>
+/** The refusal of a number past the limit. */
+export const tooLarge = (at: Span | undefined): Refusal =>
   new Refusal('size', 'This number has more than 100000 digits. Write it with smaller exponents.', at);
 
 function unknownLetter(field: Field<unknown>, name: string): string {

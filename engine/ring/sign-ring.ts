@@ -53,7 +53,8 @@ export function isZeroModEta(degree: number, { x }: SignClass): boolean {
 
 /** Whether a coefficient of degree n vanishes modulo h = 2 + η[−1]; in degree 0 that leaves x − 2y. */
 export function isZeroModH(char: CharacteristicClass, degree: number, { x, y }: SignClass): boolean {
-  if (degree !== 0) return x === 0n;
+  // −1 = i² makes [−1] = h[i] in a field with i = √−1, as every field of characteristic p ≡ 1 mod 4 has
+  if (degree !== 0) return x === 0n || (degree > 0 && char === 'one-mod-four');
   const signature = x - 2n * y;
   if (char === 'zero') return signature === 0n;
   return BigInt.asUintN(char === 'three-mod-four' ? 2 : 1, signature) === 0n;
