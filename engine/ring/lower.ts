@@ -2,7 +2,7 @@ import { negateInt, toInt, type Int } from '../arith/int';
 import { integerElement, negateElement, type Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import { boundedCoefficient, checkDegree } from './limits';
-import { constantTerm, degreeRange, multiplyTerms, type Factor, type Term } from './term';
+import { constantTerm, degreeRange, multiplyAll, type Factor, type Term } from './term';
 
 const minusOne = negateElement(integerElement(1n));
 
@@ -11,8 +11,7 @@ const minusOne = negateElement(integerElement(1n));
  *
  * The definitions used: [a, b] = [a][b]; ⟨a, b⟩ = ⟨a⟩ + ⟨b⟩; ⟪a⟫ = 1 − ⟨a⟩; h = 1 + ⟨−1⟩; ε = −⟨−1⟩; (2m)_ε = m·h,
  * (2m+1)_ε = 1 + m·h for m ≥ 0, n_ε = −⟨−1⟩(−n)_ε for n < 0 (F. Morel, LNM 2052, ch. 3).
- * A product with one sum among its factors is multiplied out, one with more is kept, so the kernel form is never longer than
- * the number of leaves of the expression times its depth.
+ * A product with one sum among its factors is multiplied out as long as that does not lengthen it much; one with more is kept.
  */
 export function lower<A>(expression: Expression, read: (entry: Element) => A): readonly Term<A>[] {
   const terms = lowerNode(expression, read);
@@ -63,14 +62,26 @@ function lowerEpsilonInteger<A>(n: bigint, read: (entry: Element) => A): readonl
 
 function multiply<A>(factors: readonly (readonly Term<A>[])[]): readonly Term<A>[] {
   if (factors.some((terms) => terms.length === 0)) return [];
-  const sums = factors.filter((terms) => terms.length > 1).length;
-  let product: readonly Term<A>[] = [constantTerm<A>(1)];
-  for (const terms of factors) {
-    const kept = terms.length > 1 && sums > 1 ? [powerTerm(terms, 1)] : terms;
-    product = product.flatMap((x) => kept.map((y) => multiplyTerms(x, y)));
-  }
-  for (const term of product) boundedCoefficient(term.coefficient);
-  return product;
+  const [only, ...more] = factors.filter((terms) => terms.length > 1);
+  if (only === undefined || more.length > 0) return [multiplyAll(factors.map(single))];
+  const at = factors.indexOf(only);
+  const before = multiplyAll(factors.slice(0, at).map(single));
+  const after = multiplyAll(factors.slice(at + 1).map(single));
+  // multiplying out lets every term be visited at its own places only, but must not lengthen the whole
+  if (only.length * (lengthOf(before) + lengthOf(after)) > MULTIPLIED_OUT)
+    return [multiplyAll([before, powerTerm(only, 1), after])];
+  return only.map((term) => multiplyAll([before, term, after]));
+}
+
+/** A product with one sum is multiplied out up to this many copied letters. */
+const MULTIPLIED_OUT = 20_000;
+
+const lengthOf = <A>(term: Term<A>): number => term.angles.length + term.factors.length;
+
+/** A factor as one term: a sum as its first power. */
+function single<A>(terms: readonly Term<A>[]): Term<A> {
+  const [first] = terms;
+  return terms.length === 1 && first !== undefined ? first : powerTerm(terms, 1);
 }
 
 function lowerPower<A>(base: readonly Term<A>[], exponent: number): readonly Term<A>[] {

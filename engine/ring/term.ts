@@ -1,4 +1,5 @@
 import { multiplyInt, type Int } from '../arith/int';
+import { boundedCoefficient } from './limits';
 
 /**
  * The kernel form of an expression, in which rings are evaluated: a sum of terms
@@ -21,14 +22,19 @@ export type Factor<A> =
 
 export const constantTerm = <A>(coefficient: Int): Term<A> => ({ coefficient, eta: 0, angles: [], factors: [] });
 
-/** The product of two terms. */
-export function multiplyTerms<A>(x: Term<A>, y: Term<A>): Term<A> {
-  return {
-    coefficient: multiplyInt(x.coefficient, y.coefficient),
-    eta: x.eta + y.eta,
-    angles: y.angles.length === 0 ? x.angles : x.angles.length === 0 ? y.angles : [...x.angles, ...y.angles],
-    factors: y.factors.length === 0 ? x.factors : x.factors.length === 0 ? y.factors : [...x.factors, ...y.factors],
-  };
+/** The product of terms, in order. */
+export function multiplyAll<A>(terms: readonly Term<A>[]): Term<A> {
+  let coefficient: Int = 1;
+  let eta = 0;
+  const angles: A[] = [];
+  const factors: Factor<A>[] = [];
+  for (const term of terms) {
+    coefficient = boundedCoefficient(multiplyInt(coefficient, term.coefficient));
+    eta += term.eta;
+    for (const angle of term.angles) angles.push(angle);
+    for (const factor of term.factors) factors.push(factor);
+  }
+  return { coefficient, eta, angles, factors };
 }
 
 /** Calls `visit` for the entries that occur in a term, with repetitions. */
