@@ -55,6 +55,21 @@ describe('the written line', () => {
     await eventually(() => bench.page.locator('.line-partner').allInnerTexts()).toEqual(['<']);
   });
 
+  test.each([
+    '[2] + <3',
+    '<<2,3>> + h[5] = ',
+    '[2][3] = = 4',
+    '\\langle 2\\rangle + [3]',
+    '[[2]]]',
+    '[1/2] ; char != 2',
+  ])('every key goes where the caret is, also while marks come and go: %s', async (text) => {
+    const bench = await openBench();
+    await bench.line.pressSequentially(text, { delay: 40 });
+    for (let step = 0; step < 3; step += 1) await bench.line.press('ArrowLeft');
+    await bench.page.keyboard.type('7', { delay: 40 });
+    expect(await written(bench)).toBe(`${text.slice(0, -3)}7${text.slice(-3)}`);
+  });
+
   test('Ctrl+Enter asks at once, Esc leaves the line', async () => {
     const bench = await openBench();
     await bench.line.pressSequentially('<4> = 1');

@@ -27,8 +27,15 @@ export async function openBench(asked?: { field: string; statement: string }, si
   return bench;
 }
 
-/** What stands in the line. */
-export const written = async (bench: BenchPage): Promise<string> => (await bench.line.innerText()).replace(/\n$/, '');
+/** What stands in the line, without the mark that stands where something is missing. */
+export const written = (bench: BenchPage): Promise<string> =>
+  bench.line.evaluate((line) =>
+    Array.from(line.querySelectorAll('.cm-line'), (row) =>
+      Array.from(row.childNodes, (node) =>
+        node instanceof HTMLElement && node.contentEditable === 'false' ? '' : (node.textContent ?? ''),
+      ).join(''),
+    ).join('\n'),
+  );
 
 /** Polls long enough for a busy machine. */
 export const eventually = <T>(look: () => T) => expect.poll(look, { timeout: 15_000 });

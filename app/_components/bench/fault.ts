@@ -1,5 +1,5 @@
 import type { Declined } from './ask';
-import type { FaultSpans } from './editor/fault-marks';
+import type { FaultSpans } from './editor/line-fault';
 import type { Reading } from './reading';
 
 /** A piece that could stand where the reading ended; `insert` is what a click writes, where it is known. */

@@ -4,10 +4,9 @@ import { history, historyKeymap, standardKeymap } from '@codemirror/commands';
 import { Compartment, EditorState, Prec } from '@codemirror/state';
 import { drawSelection, EditorView, keymap } from '@codemirror/view';
 import { type Ref, useEffect, useImperativeHandle, useRef, useState } from 'react';
-import { bracketPartner } from './bracket-partner';
-import { type FaultSpans, faultMarks, setFault } from './fault-marks';
+import { type FaultSpans, setFault } from './line-fault';
+import { lineMarks } from './line-marks';
 import { anglePair, type Insertion, insertPiece, symbolPair } from './insertions';
-import { weights } from './weights';
 
 /** What the page may ask of the written line. */
 export interface LineHandle {
@@ -81,9 +80,7 @@ export function LineEditor({ ref, initial, onChange, onDecide, fault, labelledBy
           history(),
           drawSelection({ cursorBlinkRate: matchMedia('(prefers-reduced-motion: reduce)').matches ? 0 : 1100 }),
           EditorView.lineWrapping,
-          faultMarks,
-          weights,
-          bracketPartner,
+          lineMarks,
           faultAttributes.of(attributes(labelledBy, describedBy, false)),
           EditorView.updateListener.of((update) => {
             if (update.docChanged) calls.current.onChange(update.state.doc.toString());
