@@ -22,9 +22,16 @@ export function connect(url: string, connections: number): Sequelize {
 // The server loads this module more than once (pages, routes, reloads in development); the process must still hold one pool.
 const held = globalThis as typeof globalThis & { quadrelDatabase?: Sequelize };
 
+// Each copy of this module has its own classes of models, and binds them to the one pool.
+let bound: Sequelize | undefined;
+
 /** The database of this process, opened at the first call. */
 export function database(): Sequelize {
   held.quadrelDatabase ??= connect(config().DATABASE_URL, config().DATABASE_CONNECTIONS);
+  if (bound !== held.quadrelDatabase) {
+    bound = held.quadrelDatabase;
+    for (const initialise of initialisers) initialise(bound);
+  }
   return held.quadrelDatabase;
 }
 
