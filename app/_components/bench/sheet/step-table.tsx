@@ -8,10 +8,13 @@ import { LongFormula } from './long-formula';
 /** So many steps are shown before the rest is asked for. */
 const shownAtFirst = 8;
 
+/** "powers: [aⁿ] = n_ε[a]" is a name and a formula; what it was used at follows. */
 function Reason({ step }: { readonly step: DerivationStep }) {
+  const [name = '', ...formula] = step.relation.split(': ');
   return (
     <>
-      {step.relation}
+      {name}
+      {formula.length > 0 && <span className="upright"> {formula.join(': ')}</span>}
       {step.args.length > 0 && (
         <>
           , at <span className="num upright">{step.args.join(', ')}</span>
