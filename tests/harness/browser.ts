@@ -48,7 +48,7 @@ export async function openContext(sight: Sight = {}): Promise<BrowserContext> {
     hasTouch: sight.touch ?? false,
     permissions: ['clipboard-read', 'clipboard-write'],
   });
-  context.setDefaultTimeout(20_000);
+  context.setDefaultTimeout(60_000);
   open.push(context);
   return context;
 }
