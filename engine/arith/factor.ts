@@ -5,6 +5,7 @@ import { perfectPower } from './perfect-power';
 import { isPrimeWithoutSmallFactor } from './prime';
 import { quadraticSieve } from './quadratic-sieve/quadratic-sieve';
 import { rho } from './rho';
+import { squareForms } from './square-forms';
 import { smallPrimeDivisors, TRIAL_BOUND } from './small-primes';
 import { valuation } from './valuation';
 
@@ -54,7 +55,7 @@ function split(n: bigint, multiplicity: number, found: Map<bigint, number>, budg
   split(n / divisor, multiplicity, found, budget, doing);
 }
 
-/** Up to this length rho alone is quickest; up to the second the quadratic sieve ends in a time worth waiting for. */
+/** Up to this length rho alone is quickest where square forms do not settle it; up to the second the quadratic sieve ends in a time worth waiting for. */
 const RHO_BITS = 52;
 const SIEVE_BITS = 280;
 
@@ -70,6 +71,8 @@ const stages: readonly { readonly bits: number; readonly bound: number; readonly
 /** A divisor other than 1 and n of a composite n that is no perfect power and has no prime factor below 2^12. */
 function properDivisor(n: bigint, budget: Budget, doing: string): bigint {
   const bits = bitLength(n);
+  const small = bits < 53 ? squareForms(Number(n)) : undefined;
+  if (small !== undefined) return BigInt(small);
   let divisor = rho(n, bits <= RHO_BITS ? Number.POSITIVE_INFINITY : bits < 100 ? 2048 : 8192, budget, doing);
   for (const stage of stages) {
     if (bits < stage.bits) break;

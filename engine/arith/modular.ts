@@ -82,7 +82,7 @@ function binaryPower(base: bigint, exponent: number, m: bigint): bigint {
 }
 
 /** base^e modulo m for 0 ≤ base < m < 2^26 and e ≥ 0. */
-export function smallPower(base: number, e: bigint, m: number): number {
+export function smallPower(base: number, e: number | bigint, m: number): number {
   let result = 1 % m;
   if (e < EXACT) {
     let square = base;
@@ -95,9 +95,9 @@ export function smallPower(base: number, e: bigint, m: number): number {
     }
     return result;
   }
-  for (let bit = bitLength(e) - 1, text = e.toString(2), i = 0; i <= bit; i++) {
+  for (const digit of e.toString(2)) {
     result = (result * result) % m;
-    if (text[i] === '1') result = (result * base) % m;
+    if (digit === '1') result = (result * base) % m;
   }
   return result;
 }

@@ -40,7 +40,7 @@ const THEOREM =
  */
 export function lettersField(concrete: (name: FieldName, budget: Budget) => DecidableField): DecidableField {
   const open = (expressions: readonly Expression[], conditions: readonly Condition[], budget: Budget) => {
-    const characteristic = characteristicOf(conditions);
+    const characteristic = characteristicOf(conditions, budget);
     return { characteristic, ...readStatement(expressions, characteristic, conditions, budget) };
   };
   const constants = (characteristic: bigint, budget: Budget): DecidableField =>

@@ -10,11 +10,11 @@ import { primeField } from '../field/prime-field';
 import { rationals } from '../field/rational';
 
 /** The characteristic that the conditions fix, 0 if they fix none. Refuses conditions on it that contradict each other. */
-export function characteristicOf(conditions: readonly Condition[]): bigint {
+export function characteristicOf(conditions: readonly Condition[], budget: Budget): bigint {
   let fixed = 0n;
   for (const condition of conditions) {
     if (condition.kind !== 'characteristic') continue;
-    if (!isPrime(condition.prime))
+    if (!isPrime(condition.prime, budget))
       throw new Refusal('hypothesis', `${condition.prime} is not a prime, so it is no characteristic.`, condition.at);
     if (!condition.is) continue;
     if (fixed !== 0n && fixed !== condition.prime)

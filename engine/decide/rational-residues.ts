@@ -32,7 +32,7 @@ export function rationalResidues(
   uniformizer: Element | undefined,
   budget: Budget,
 ): ResiduesOutcome {
-  const asked = places?.map(readPrime);
+  const asked = places?.map((text) => readPrime(text, budget));
   const typed = uniformizer && readUniformizer(uniformizer, asked, budget);
   const statement = rationalStatement([expression], budget);
   const [terms = []] = statement.sides;
@@ -91,11 +91,11 @@ function against(
   };
 }
 
-function readPrime(text: string): bigint {
+function readPrime(text: string, budget: Budget): bigint {
   const trimmed = text.trim();
   if (/^(real|infinity|inf|oo|∞)$/i.test(trimmed))
     throw new Refusal('place', 'The real place of Q has no residue. Name a prime, such as 7.');
-  if (!/^[0-9]{1,2000}$/.test(trimmed) || !isPrime(BigInt(trimmed)))
+  if (!/^[0-9]{1,2000}$/.test(trimmed) || !isPrime(BigInt(trimmed), budget))
     throw new Refusal('place', `${shown(trimmed)} is no place of Q. Name a prime, such as 7.`);
   return BigInt(trimmed);
 }

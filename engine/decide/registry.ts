@@ -24,7 +24,7 @@ export function resolveField(name: FieldName, budget: Budget): DecidableField {
     case 'complexes':
       return complexField;
     case 'padics':
-      if (!isPrime(name.prime))
+      if (!isPrime(name.prime, budget))
         throw new Refusal(
           'field',
           `${name.prime} is not a prime, so there is no field Q_${name.prime}. Type a prime, as in Q_5.`,

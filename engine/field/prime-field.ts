@@ -1,4 +1,5 @@
 import { jacobi } from '../arith/jacobi';
+import { leastNonResidue } from '../arith/non-residue';
 import { inverseModulo, modulo, powerModulo } from '../arith/modular';
 import { integerElement } from '../expression/element';
 import type { FiniteField } from './field';
@@ -41,10 +42,7 @@ export function primeField(p: bigint): FiniteField<bigint> {
     isSquare,
     get nonSquare() {
       if (p === 2n) return undefined;
-      if (leastNonSquare === undefined) {
-        leastNonSquare = 2n;
-        while (isSquare(leastNonSquare)) leastNonSquare++;
-      }
+      leastNonSquare ??= leastNonResidue(p);
       return leastNonSquare;
     },
   });

@@ -1,4 +1,5 @@
 import { jacobi } from '../arith/jacobi';
+import { leastNonResidue } from '../arith/non-residue';
 import { valuation } from '../arith/valuation';
 import type { Rational } from '../field/rational';
 import type { SquareClasses } from '../ring/local-witt-ring';
@@ -28,8 +29,7 @@ const bit = (mask: number, i: number): number => (mask >> i) & 1;
 export const orderAt = (a: Rational, p: bigint): number => valuation(a.num, p).exponent - valuation(a.den, p).exponent;
 
 function oddSquares(p: bigint): LocalSquares {
-  let s = 2n;
-  while (jacobi(s, p) !== -1) s += 1n;
+  const s = leastNonResidue(p);
   const minusOne = jacobi(p - 1n, p) === 1 ? 0 : 1;
   return {
     size: 4,

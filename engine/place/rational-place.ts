@@ -1,6 +1,6 @@
 import { EXACT, bitLength } from '../arith/bits';
 import { gcd } from '../arith/gcd';
-import { isOddInt, moduloFour, toInt, type Int } from '../arith/int';
+import { isOddInt, moduloFour, negateInt, toInt, type Int } from '../arith/int';
 import { jacobi, smallJacobi } from '../arith/jacobi';
 import { inverseModulo, modulo, powerModulo, smallInverse, smallPower } from '../arith/modular';
 import { TRIAL_BOUND } from '../arith/small-primes';
@@ -58,7 +58,7 @@ function smallUnits(p: number): UnitGroup<Int> {
         ? a
         : n === -1
           ? smallInverse(number(a), p)
-          : smallPower(n < 0 ? smallInverse(number(a), p) : number(a), n < 0 ? -BigInt(n) : BigInt(n), p),
+          : smallPower(n < 0 ? smallInverse(number(a), p) : number(a), n < 0 ? negateInt(n) : n, p),
     equal: (a, b) => a === b,
     minusOne,
     classOfMinusOne: p % 4 === 3 ? 1 : 0,

@@ -10,7 +10,7 @@ import { valuation } from '../arith/valuation';
 import { Refusal } from '../expression/refusal';
 import type { RationalEntry } from './rational-entry';
 
-/** An element of a coprime base: a prime, or a number that is composite but has not been split. */
+/** An element of a coprime base: a prime, or a number that has not been split, most often a composite. */
 export interface BaseElement {
   readonly value: bigint;
   readonly prime: boolean;
@@ -18,6 +18,9 @@ export interface BaseElement {
 
 /** Composites below this are split at once: that costs less than asking whether one can do without. */
 const SPLIT_AT_ONCE = 1n << 60n;
+
+/** Larger numbers are taken for composites until they have to be split: the test would cost more than it can save. */
+const TESTED_FOR_PRIMALITY = 1n << 2048n;
 
 /** Which of the large composites to split into primes. */
 export type Splitting = 'none' | 'all' | ReadonlySet<bigint>;
@@ -112,7 +115,7 @@ function stripLarge(n: bigint, entry: RationalEntry, budget: Budget): Stripped {
     rest = unit;
   }
   if (rest === 1n) return { factors, rest };
-  if (rest >= SPLIT_AT_ONCE && !isPrime(rest)) return { factors, rest };
+  if (rest >= TESTED_FOR_PRIMALITY || (rest >= SPLIT_AT_ONCE && !isPrime(rest, budget))) return { factors, rest };
   const split = rest >= SPLIT_AT_ONCE ? [{ prime: rest, exponent: 1 }] : factorEntry(rest, entry, budget);
   for (const { prime, exponent } of split) factors.push([toInt(prime), exponent]);
   return { factors, rest: 1n };
@@ -136,8 +139,9 @@ function hardBase(
   const elements: BaseElement[] = [];
   for (const b of coprimeBase([...rests])) {
     const { root } = perfectPower(b);
-    if (isPrime(root)) elements.push({ value: root, prime: true });
-    else if (root < SPLIT_AT_ONCE || split === 'all' || (split !== 'none' && split.has(root))) {
+    const toSplit = root < SPLIT_AT_ONCE || split === 'all' || (split !== 'none' && split.has(root));
+    if ((toSplit || root < TESTED_FOR_PRIMALITY) && isPrime(root, budget)) elements.push({ value: root, prime: true });
+    else if (toSplit) {
       const owner = entries.find(({ value }) => value.num % root === 0n || value.den % root === 0n);
       for (const { prime } of factorEntry(root, owner, budget)) elements.push({ value: prime, prime: true });
     } else elements.push({ value: root, prime: false });

@@ -15,9 +15,21 @@ export function degreesOf<A>(terms: readonly Term<A>[]): readonly number[] {
     if (term.factors.every((factor) => factor.kind === 'symbol')) degrees.add(term.factors.length - term.eta);
     else sums.push(term);
   }
-  const set = degreeSet(sums);
-  if (set !== undefined) for (const i of bitsOf(set.bits)) degrees.add(set.low + i);
+  for (const term of sums) for (const degree of degreesOfSum(term)) degrees.add(degree);
   return [...degrees].sort((a, b) => b - a);
+}
+
+/** Terms are asked once for every place they ramify at. */
+const known = new WeakMap<object, readonly number[]>();
+
+function degreesOfSum<A>(term: Term<A>): readonly number[] {
+  let degrees = known.get(term);
+  if (degrees === undefined) {
+    const set = degreeSet([term]);
+    degrees = set === undefined ? [] : bitsOf(set.bits).map((i) => set.low + i);
+    known.set(term, degrees);
+  }
+  return degrees;
 }
 
 function degreeSet<A>(terms: readonly Term<A>[]): DegreeSet | undefined {

@@ -28,12 +28,14 @@ const WORD_LIMIT = 200_000;
  */
 export function wordRing(char: CharacteristicClass, budget: Budget): GradedRing<Monomial, Words> {
   const epsilon: SignClass = { x: -1n, y: -1n };
+  let pace = 0;
   const one: Words = new Map([[0n, { x: 1n, y: 0n }]]);
 
   const put = (words: Map<bigint, SignClass>, degree: number, mask: bigint, b: SignClass): void => {
     const present = words.get(mask);
     const sum = present === undefined ? b : { x: present.x + b.x, y: present.y + b.y };
     boundedCoefficient(sum.x);
+    boundedCoefficient(sum.y);
     const reduced = reduceSign(char, degree - countBits(mask), sum);
     if (reduced === undefined) words.delete(mask);
     else words.set(mask, reduced);
@@ -50,8 +52,9 @@ export function wordRing(char: CharacteristicClass, budget: Budget): GradedRing<
   const multiply = (m: number, x: Words, n: number, y: Words): Words | undefined => {
     const product = new Map<bigint, SignClass>();
     for (const [s, a] of x) {
-      budget.spend('writing out canonical words');
       for (const [t, b] of y) {
+        pace += 1;
+        if (pace % 64 === 0) budget.spend('writing out canonical words');
         const common = s & t;
         const repeated = countBits(common);
         const [ma, nb] = [m - countBits(s), n - countBits(t)];

@@ -4,7 +4,7 @@ import type { FiniteField } from '../field/field';
 import { orderModFour } from './field-units';
 import type { ResidueClass } from './residue-class-ring';
 import { residueWords } from './residue-words';
-import { etaFactors, multiple, total } from './write-word';
+import { etaFactors, multiple, total, zeroExpression } from './write-word';
 
 /** What writing needs to know of a finite field. */
 export type WrittenField<E> = Pick<FiniteField<E>, 'name' | 'order' | 'characteristic' | 'write' | 'nonSquare'>;
@@ -16,6 +16,7 @@ export function writeResidueClass<E>(
   value: ResidueClass<E> | undefined,
   prefix: readonly Expression[] = [],
 ): Expression {
+  if (value === undefined) return zeroExpression;
   const write = (unit: E): Element => field.write(unit);
   return total(
     residueWords(degree, value, { nonSquare: field.nonSquare, orderModFour: orderModFour(field) }).map((word) =>

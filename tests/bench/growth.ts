@@ -1,0 +1,61 @@
+import { unlimited } from '@/engine/arith/budget';
+import { primesBelow } from '@/engine/arith/small-primes';
+import { seeded, randomBetween } from '@/engine/arith/seeded';
+import { rationalField } from '@/engine/decide/rational-field';
+import { integerElement } from '@/engine/expression/element';
+import { integer, product, sum, symbol, type Expression } from '@/engine/expression/expression';
+import { readExpression } from '@/grammar/read';
+
+// How the cost of a decision grows with the number of terms and of primes, and powers that must not be multiplied out.
+
+const stream = seeded(11);
+const upTo = (n: number): bigint => randomBetween(1n, BigInt(n), stream);
+
+/** CPU milliseconds, the least of several runs. */
+function cost(left: Expression, right: Expression): number {
+  let least = Number.POSITIVE_INFINITY;
+  for (let i = 0; i < 5; i += 1) {
+    const from = process.cpuUsage();
+    rationalField.decide(left, right, [], unlimited).findings.every(({ same }) => same);
+    const { user, system } = process.cpuUsage(from);
+    least = Math.min(least, (user + system) / 1000);
+  }
+  return least;
+}
+
+/** The exponent k of the best fit y = c·xᵏ. */
+function exponent(points: readonly (readonly [number, number])[]): number {
+  const logs = points.map(([x, y]) => [Math.log(x), Math.log(y)] as const);
+  const mean = (values: readonly number[]): number => values.reduce((a, b) => a + b, 0) / values.length;
+  const [mx, my] = [mean(logs.map(([x]) => x)), mean(logs.map(([, y]) => y))];
+  return mean(logs.map(([x, y]) => (x - mx) * (y - my))) / mean(logs.map(([x]) => (x - mx) ** 2));
+}
+
+function report(name: string, points: readonly (readonly [number, number])[]): void {
+  console.log(`${name}: ${points.map(([n, ms]) => `${n}: ${ms.toFixed(1)} ms`).join('  ')}`);
+  console.log(`  fitted exponent ${exponent(points).toFixed(2)} (allowed: 1.1)`);
+}
+
+/** c·[a][b]… with one to three entries below 5 000. */
+const randomTerm = (): Expression =>
+  product([integer(upTo(5)), symbol(Array.from({ length: Number(upTo(3)) }, () => integerElement(1n + upTo(5000))))]);
+
+const sizes = [1_000, 2_000, 4_000, 7_000, 10_000];
+report(
+  'random terms over Q',
+  sizes.map((n) => [n, cost(sum(Array.from({ length: n }, randomTerm)), integer(0n))] as const),
+);
+
+const primes = [...primesBelow(120_000)].map(BigInt);
+report(
+  'terms [p][q] in neighbouring primes',
+  sizes.map((n) => {
+    const words = primes.slice(0, n).map((p, i) => symbol([integerElement(p), integerElement(primes[i + 1] ?? 2n)]));
+    return [n, cost(sum(words), integer(0n))] as const;
+  }),
+);
+
+for (const text of ['([2]+[3]+[30])^40', '([6]+<10>)^30']) {
+  const power = readExpression(text);
+  console.log(`${text} against 0: ${cost(power, integer(0n)).toFixed(1)} ms (allowed: 50)`);
+}
