@@ -1,4 +1,4 @@
-import { EXACT, bitLength } from './bits';
+import { EXACT } from './bits';
 
 /** Below this modulus a product of two residues is below 2^52, so that it is exact as a number. */
 const SMALL = 1n << 26n;
