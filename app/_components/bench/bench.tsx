@@ -1,6 +1,7 @@
 'use client';
 
-import './bench.css';
+import './sheet/sheet.css';
+import './slab/slab.css';
 import { useMemo } from 'react';
 import { Button } from '../button/button';
 import { Slip } from '../slip/slip';

@@ -1,6 +1,7 @@
 'use client';
 
-import './bench.css';
+import './sheet/sheet.css';
+import './slab/slab.css';
 import Link from 'next/link';
 import { createContext, type ReactNode, useContext, useMemo } from 'react';
 import type { CompareAnswer } from '@/lib/contracts/compare';

@@ -12,13 +12,18 @@ export function Said({ phrase }: { readonly phrase: Phrase }) {
   ));
 }
 
-/** Plain words in which K_2, F_7 and Q_5 are set as they are written by hand. */
+/** A name as plain words write it (K_2, K^MW_n, F_9, Q_5, n_ε), in TeX. */
+function nameTex(name: string): string {
+  const [base = '', index = ''] = name.split('_');
+  const set = base === 'K^MW' ? 'K^{\\mathrm{MW}}' : /^[QF]$/.test(base) ? `\\mathbb{${base}}` : base;
+  return `${set}_{${index === 'ε' ? '\\varepsilon' : index}}`;
+}
+
+/** Plain words with the names of groups and fields in them set as formulas. */
 export function withFormulas(words: string): Phrase {
   return words
-    .split(/\b([KQF]_\w+)\b/)
-    .map((part, index) =>
-      index % 2 === 0 ? part : tex(`${part.startsWith('K') ? 'K' : `\\mathbb{${part.charAt(0)}}`}_{${part.slice(2)}}`),
-    );
+    .split(/(K\^MW_\w+|\b[KQF]_\w+|\bn_ε)/u)
+    .map((part, index) => (index % 2 === 0 ? part : tex(nameTex(part))));
 }
 
 /** "2", "2 and 0", "2, 1 and 0". */

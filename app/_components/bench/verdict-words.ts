@@ -3,7 +3,7 @@ import type { NormalizeAnswer } from '@/lib/contracts/normalize';
 import type { Answer } from './ask';
 import { degreeName, degreesName, inDegrees } from './degrees';
 import { contributions, mapWord, placeWords } from './map-words';
-import { type Phrase, tex } from './phrase';
+import { type Phrase, tex, withFormulas } from './phrase';
 
 export const verdictWord = { equal: 'Equal', different: 'Different', undecided: 'Undecided' } as const;
 
@@ -28,11 +28,14 @@ function equalPhrase(answer: CompareAnswer): Phrase {
   ];
 }
 
+const nounOf = (map: keyof typeof mapWord): string =>
+  map === 'class' ? 'class' : map === 'word' ? 'the term' : mapWord[map];
+
 /** Why the two values differ: what the service says after naming them. */
-function reasonOf({ sentence, right }: NonNullable<CompareAnswer['evidence']['separating']>): string {
+function reasonOf({ sentence, right }: NonNullable<CompareAnswer['evidence']['separating']>): Phrase {
   const named = `right side ${right.text}. `;
   const end = sentence.lastIndexOf(named);
-  return end < 0 ? '' : ` ${sentence.slice(end + named.length)}`;
+  return end < 0 ? [] : withFormulas(` ${sentence.slice(end + named.length)}`);
 }
 
 function differentPhrase(answer: CompareAnswer): Phrase {
@@ -41,11 +44,12 @@ function differentPhrase(answer: CompareAnswer): Phrase {
   if (!separating) return [`${inDegrees(degrees)}.`];
   const at = separating.place === undefined ? '. The' : `, at ${placeWords(separating.place)}. There the`;
   return [
-    `in ${degreeName(separating.degree)}${at} left side has ${separating.map === 'class' ? 'class' : mapWord[separating.map]} `,
+    `in ${degreeName(separating.degree)}${at} left side has ${nounOf(separating.map)} `,
     tex(separating.left.tex),
     ' and the right side ',
     tex(separating.right.tex),
-    `.${reasonOf(separating)}`,
+    '.',
+    ...reasonOf(separating),
   ];
 }
 

@@ -5,14 +5,24 @@ import { Formula } from '../../math/formula';
 import { mapWord, placeTex } from '../map-words';
 import { LongFormula } from './long-formula';
 
-function ApartRow({ degree, one, chosen }: { degree: number | undefined; one: ComparedMap; chosen: boolean }) {
+interface RowProps {
+  readonly degree: number | undefined;
+  readonly one: ComparedMap;
+  readonly placed: boolean;
+  readonly chosen: boolean;
+}
+
+function ApartRow({ degree, one, placed, chosen }: RowProps) {
+  const mark = !one.same && <VerdictMark of="different" className="inl" label="Different here" />;
   return (
     <tr className={one.same ? (chosen ? 'chosen' : undefined) : 'apart'} data-same={one.same}>
       {degree !== undefined && <td className="st num">{String(degree).replace('-', '−')}</td>}
-      <td className="st">
-        {one.place === undefined ? <span className="quiet">everywhere</span> : <Formula tex={placeTex(one.place)} />}
-        {!one.same && <VerdictMark of="different" className="inl" label="Different here" />}
-      </td>
+      {placed && (
+        <td className="st">
+          {one.place !== undefined && <Formula tex={placeTex(one.place)} />}
+          {mark}
+        </td>
+      )}
       <td className="st">
         <LongFormula text={one.left.text} tex={one.left.tex} />
       </td>
@@ -22,7 +32,10 @@ function ApartRow({ degree, one, chosen }: { degree: number | undefined; one: Co
       <td className="st">
         <Formula tex={one.target} />
       </td>
-      <td className={one.same ? 'text quiet' : 'text'}>{mapWord[one.map]}</td>
+      <td className={one.same ? 'text quiet' : 'text'}>
+        {mapWord[one.map]}
+        {!placed && mark}
+      </td>
     </tr>
   );
 }
@@ -36,9 +49,10 @@ export function ApartTable({
   readonly chosen: string | undefined;
 }) {
   const several = parts.length > 1;
+  const placed = parts.some((part) => part.compared.some((one) => one.place !== undefined));
   return (
     <Ledger
-      head={[...(several ? ['degree'] : []), 'at', 'left', 'right', 'compared in', 'by']}
+      head={[...(several ? ['degree'] : []), ...(placed ? ['at'] : []), 'left', 'right', 'compared in', 'by']}
       caption="Left and right apart"
     >
       {parts.flatMap((part) =>
@@ -47,6 +61,7 @@ export function ApartTable({
             key={`${part.degree}:${one.map}:${one.place ?? ''}:${index}`}
             degree={several ? part.degree : undefined}
             one={one}
+            placed={placed}
             chosen={chosen === `${part.degree}:${one.place ?? `map:${one.map}`}`}
           />
         )),

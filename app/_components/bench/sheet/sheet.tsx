@@ -16,7 +16,7 @@ import { ExpressionEvidence } from './expression-evidence';
 import { LongFormula } from './long-formula';
 import { Notes } from './notes';
 import { StatementEvidence } from './statement-evidence';
-import { UnreadRow, VerdictRow } from './verdict-row';
+import { UnansweredRow, VerdictRow } from './verdict-row';
 import { wholeForm } from './whole-form';
 
 /** What is copied: a statement as it was understood, an expression together with its canonical form. */
@@ -87,6 +87,7 @@ export function Sheet({ bench }: { readonly bench: BenchState }) {
   const meaning = useMemo(() => (answer ? meaningOf(answer) : undefined), [answer]);
   if (reading?.state === 'empty') return <EmptySheet bench={bench} />;
   const old = answer !== undefined && !current;
+  const refusal = asked.declined && (fault?.message ?? asked.declined.message);
   const oldSaid = old && (noted || asked.slow || asked.stopped || asked.declined !== undefined || asked.offline);
   const shown = answer && (answer.kind === 'statement' ? answer.body.statement : answer.body.expression);
   const set = live ? { text: live.text, tex: live.tex } : shown;
@@ -110,7 +111,11 @@ export function Sheet({ bench }: { readonly bench: BenchState }) {
           <LongFormula text={set.text} tex={set.tex} />
         </p>
       )}
-      {answer ? <VerdictRow answer={answer} old={old} /> : <UnreadRow unread={fault !== undefined && noted} />}
+      {answer ? (
+        <VerdictRow answer={answer} old={old} />
+      ) : (
+        <UnansweredRow unread={reading?.state === 'unread' && noted} refusal={refusal} />
+      )}
       {answer && (
         <>
           <Deeds

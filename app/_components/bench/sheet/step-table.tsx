@@ -3,6 +3,7 @@
 import { useState } from 'react';
 import type { DerivationStep } from '@/lib/contracts/normalize';
 import { Button } from '../../button/button';
+import { Said, withFormulas } from '../phrase';
 import { LongFormula } from './long-formula';
 
 /** So many steps are shown before the rest is asked for. */
@@ -13,8 +14,13 @@ function Reason({ step }: { readonly step: DerivationStep }) {
   const [name = '', ...formula] = step.relation.split(': ');
   return (
     <>
-      {name}
-      {formula.length > 0 && <span className="upright"> {formula.join(': ')}</span>}
+      <Said phrase={withFormulas(name)} />
+      {formula.length > 0 && (
+        <span className="upright">
+          {' '}
+          <Said phrase={withFormulas(formula.join(': '))} />
+        </span>
+      )}
       {step.args.length > 0 && (
         <>
           , at <span className="num upright">{step.args.join(', ')}</span>

@@ -57,17 +57,25 @@ export function VerdictRow({ answer, old }: { readonly answer: Answer; readonly 
   );
 }
 
-/** Before there is an answer: a tile that could not be read, or that is still empty. */
-export function UnreadRow({ unread }: { readonly unread: boolean }) {
+interface WithoutAnswer {
+  /** The line cannot be read. */
+  readonly unread: boolean;
+  /** Why a line that can be read is not answered. */
+  readonly refusal: string | undefined;
+}
+
+/** Where there is no answer: the line cannot be read, or is not answered; else a tile that is still empty. */
+export function UnansweredRow({ unread, refusal }: WithoutAnswer) {
+  const word = unread ? 'Unread' : refusal === undefined ? undefined : 'Unanswered';
   return (
     <div className="row verdict">
-      {unread ? <VerdictMark of="unread" size="l" className="mark" /> : <span className="mark mark-tile mark-blank" />}
+      {word ? <VerdictMark of="unread" size="l" className="mark" /> : <span className="mark mark-tile mark-blank" />}
       <div>
-        {unread && (
-          <>
-            <h2>Unread</h2>
-            <p className="lead">The line above cannot be read to the end yet; the note under it says where and why.</p>
-          </>
+        {word && <h2>{word}</h2>}
+        {word && (
+          <p className="lead">
+            {unread ? 'The note under the line says how far it can be read, and why no further.' : refusal}
+          </p>
         )}
       </div>
     </div>
