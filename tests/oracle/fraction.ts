@@ -43,14 +43,21 @@ export function valueOf(element: Element): Fraction {
 }
 
 const known = new Map<bigint, readonly bigint[]>();
+const large: bigint[] = [];
 
-/** The primes that divide n ≠ 0, ascending, by trial division. */
+/** Primes past what trial division reaches, that a test builds its entries from. */
+export function declarePrimes(primes: readonly bigint[]): void {
+  large.push(...primes);
+}
+
+/** The primes that divide n ≠ 0: those declared, then by trial division. */
 export function primesOf(n: bigint): readonly bigint[] {
   let rest = n < 0n ? -n : n;
   const found = known.get(rest);
   if (found !== undefined) return found;
   const size = rest;
-  const primes: bigint[] = [];
+  const primes = large.filter((p) => rest % p === 0n);
+  for (const p of primes) while (rest % p === 0n) rest /= p;
   for (let p = 2n; p * p <= rest; p += 1n) {
     if (rest % p !== 0n) continue;
     primes.push(p);

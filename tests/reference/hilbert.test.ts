@@ -80,7 +80,7 @@ describe('all places together', () => {
       const primes = [...new Set([2n, ...primesOf(a), ...primesOf(b)])];
       const symbols = [byForms('R', a, b), ...primes.map((p) => byForms(`Q_${p}`, a, b))];
       expect(
-        symbols.reduce((x, y) => x * y, 1),
+        symbols.reduce<number>((x, y) => x * y, 1),
         `(${a}, ${b})`,
       ).toBe(1);
       const global = verdict('Q', `<<${entryText(a)}, ${entryText(b)}>>`, '0');
