@@ -1,7 +1,7 @@
 import type { Budget } from '../arith/budget';
 import { Refusal } from '../expression/refusal';
 import type { Condition } from '../expression/statement';
-import { conditionText } from '../expression/to-text';
+import { shownCondition } from '../expression/shown';
 import type { Field } from '../field/field';
 import { readElement } from '../field/read-element';
 
@@ -19,7 +19,7 @@ export function checkConcreteConditions<E>(field: Field<E>, conditions: readonly
     if (!holds)
       throw new Refusal(
         'hypothesis',
-        `The condition ${conditionText(condition)} does not hold in ${field.name}, so the statement would claim nothing. Leave it out or change the field.`,
+        `The condition ${shownCondition(condition)} does not hold in ${field.name}, so the statement would claim nothing. Leave it out or change the field.`,
         condition.at,
       );
   }

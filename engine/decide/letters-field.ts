@@ -8,7 +8,7 @@ import type { FieldName } from '../expression/field-name';
 import { mapEntries } from '../expression/map-entries';
 import { Refusal } from '../expression/refusal';
 import type { Condition } from '../expression/statement';
-import { elementText } from '../expression/to-text';
+import { shownElement } from '../expression/shown';
 import { degreesOf } from '../ring/degrees';
 import { evaluate } from '../ring/evaluate';
 import { lower } from '../ring/lower';
@@ -42,6 +42,23 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
   const open = (expressions: readonly Expression[], conditions: readonly Condition[], budget: Budget) => {
     const characteristic = characteristicOf(conditions, budget);
     return { characteristic, ...readStatement(expressions, characteristic, conditions, budget) };
+  };
+  /** In characteristic p the part without letters is written as over 𝔽_p, so that it has one form whatever else is in sight. */
+  const withConstant = (
+    statement: ReturnType<typeof open>,
+    degree: number,
+    words: Words,
+    budget: Budget,
+  ): Expression => {
+    const constant = words.get(0n);
+    if (statement.characteristic === 0n || constant === undefined) return writeWords(statement.letters, degree, words);
+    const rest = new Map([...words].filter(([mask]) => mask !== 0n));
+    const form = constants(statement.characteristic, budget).normalForm(
+      total(writeWord([], degree, 0n, constant)),
+      [],
+      budget,
+    );
+    return total([...form.map(({ normalForm }) => normalForm), writeWords(statement.letters, degree, rest)]);
   };
   const constants = (characteristic: bigint, budget: Budget): DecidableField =>
     concrete(characteristic === 0n ? { kind: 'rationals' } : { kind: 'finite', order: characteristic }, budget);
@@ -79,7 +96,7 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
         .sort(([a], [b]) => b - a)
         .map(([degree, words]) => ({
           degree,
-          normalForm: writeWords(statement.letters, degree, words),
+          normalForm: withConstant(statement, degree, words, budget),
           canonical: true,
         }));
     },
@@ -151,7 +168,7 @@ function readStatement(
   if (refused !== undefined && (names.size > 0 || !refused.constant)) {
     throw new Refusal(
       'not-yet',
-      `Over an unspecified field this version decides entries that are products of letters, and ${elementText(refused.entry)} is none. Use letters only, or choose a field.`,
+      `Over an unspecified field this version decides entries that are products of letters, and ${shownElement(refused.entry)} is none. Use letters only, or choose a field.`,
       refused.entry.at,
     );
   }
@@ -214,7 +231,7 @@ function wordFindings(
 ): readonly Finding[] {
   const masks = new Set([...(left?.keys() ?? []), ...(right?.keys() ?? [])]);
   if (masks.size === 0) masks.add(0n);
-  return [...masks].sort(compareMasks).map((mask): Finding => {
+  return sortMasks(masks).map((mask): Finding => {
     const [l, r] = [left?.get(mask), right?.get(mask)];
     const own = degree - countBits(mask);
     const difference: SignClass = { x: (l?.x ?? 0n) - (r?.x ?? 0n), y: (l?.y ?? 0n) - (r?.y ?? 0n) };
@@ -249,19 +266,21 @@ function coefficientGroup(char: CharacteristicClass, degree: number): string {
 }
 
 /** Words with fewer letters first, then by their letters. */
-function compareMasks(a: bigint, b: bigint): number {
-  const size = countBits(a) - countBits(b);
-  if (size !== 0) return size;
-  const [x, y] = [lettersOf(a), lettersOf(b)];
-  const at = x.findIndex((letter, i) => letter !== y[i]);
-  return at < 0 ? 0 : (x[at] ?? 0) - (y[at] ?? 0);
+function sortMasks(masks: Iterable<bigint>): readonly bigint[] {
+  return [...masks]
+    .map((mask) => ({ mask, letters: lettersOf(mask) }))
+    .sort(({ letters: x }, { letters: y }) => {
+      const at = x.findIndex((letter, i) => letter !== y[i]);
+      return x.length - y.length || (at < 0 ? 0 : (x[at] ?? 0) - (y[at] ?? 0));
+    })
+    .map(({ mask }) => mask);
 }
 
 function writeWords(letters: readonly string[], degree: number, words: Words): Expression {
   return total(
-    [...words]
-      .sort(([a], [b]) => compareMasks(a, b))
-      .flatMap(([mask, b]) => writeWord(letters, degree - countBits(mask), mask, b)),
+    sortMasks(words.keys()).flatMap((mask) =>
+      writeWord(letters, degree - countBits(mask), mask, words.get(mask) ?? { x: 0n, y: 0n }),
+    ),
   );
 }
 

@@ -3,7 +3,7 @@ import { isPrime } from '../arith/prime';
 import type { Element } from '../expression/element';
 import { Refusal } from '../expression/refusal';
 import type { Condition } from '../expression/statement';
-import { conditionText } from '../expression/to-text';
+import { shownCondition } from '../expression/shown';
 import type { Field } from '../field/field';
 import { laurentPower, laurentRing, readLaurent, type Laurent, type LaurentRing } from '../field/laurent';
 import { primeField } from '../field/prime-field';
@@ -71,7 +71,7 @@ function readerOver<E>(
     if (solution === undefined)
       throw new Refusal(
         'hypothesis',
-        `The condition ${conditionText(condition)} cannot be solved for a letter. Write one letter, times a product of letters, on a side of its own.`,
+        `The condition ${shownCondition(condition)} cannot be solved for a letter. Write one letter, times a product of letters, on a side of its own.`,
         condition.at,
       );
     for (const [name, value] of solved) solved.set(name, substitute(value, solution, ring));
@@ -79,7 +79,7 @@ function readerOver<E>(
   }
   for (const condition of conditions)
     if (condition.kind === 'unequal' && difference(condition).size === 0)
-      throw new Refusal('hypothesis', `The condition ${conditionText(condition)} never holds.`, condition.at);
+      throw new Refusal('hypothesis', `The condition ${shownCondition(condition)} never holds.`, condition.at);
   return (element) => classify(read(element), field);
 }
 

@@ -1,9 +1,9 @@
 import type { Budget } from '../arith/budget';
 import { integerElement } from '../expression/element';
 import { moduloFour, xorInt, type Int } from '../arith/int';
-import { eta, power, type Expression } from '../expression/expression';
+import { angle, symbol, type Expression } from '../expression/expression';
 import { primeResidueField } from '../place/prime-residue-field';
-import { rationalPlace, unsplitZeroTest, type ZeroTest } from '../place/rational-place';
+import { maskedProduct, rationalPlace, unsplitZeroTest, type ZeroTest } from '../place/rational-place';
 import type { RationalEntry } from '../place/rational-entry';
 import type { BaseElement } from '../place/sight';
 import { thetaRing, type Theta } from '../place/theta-ring';
@@ -12,7 +12,7 @@ import { evaluate } from '../ring/evaluate';
 import type { GradedRing } from '../ring/graded-ring';
 import { residueClassRing, type ResidueClass } from '../ring/residue-class-ring';
 import { writeResidueClass } from '../ring/write-residue-class';
-import { multiple, zeroExpression } from '../ring/write-word';
+import { etaFactors, multiple, total, zeroExpression } from '../ring/write-word';
 import type { Finding } from './finding';
 import { incidence, type Incidence, type RationalStatement } from './rational-statement';
 import { realFindings } from './real-findings';
@@ -28,18 +28,27 @@ import { residueReason } from './residue-reason';
  */
 export function rationalFindings(statement: RationalStatement, budget: Budget): readonly Finding[] {
   const [left = [], right = []] = statement.sides;
+  const real = realFindings(left, right, budget);
   const split = new Set<bigint>();
   for (;;) {
-    const at = incidence(statement, split.size === 0 ? 'none' : split, budget);
-    const residues = residueFindings(at, budget);
-    const findings = [...realFindings(left, right, budget), ...residues];
-    const unknown = residues.filter((finding) => finding.outcome === 'unknown');
-    const unknownModH = residues.filter((finding) => finding.outcomeModH === 'unknown');
-    // a class that is seen to differ modulo h anywhere differs modulo h, whatever else is not known
-    const settledModH = unknownModH.length === 0 || findings.some((f) => !f.sameModH && !isUnknownModH(f));
-    if (unknown.length === 0 && settledModH) return findings;
-    for (const finding of unknown.length > 0 ? unknown : unknownModH) split.add(finding.base);
+    const residues = residueFindings(incidence(statement, split.size === 0 ? 'none' : split, budget), budget);
+    const open = unsettled(real, residues);
+    if (open.length === 0) return [...real, ...residues.filter(({ outcome }) => outcome !== 'unknown')];
+    for (const { base } of open) split.add(base);
   }
+}
+
+/** The residues at unsplit composites that still matter: for the verdict, and for whether the sides agree modulo η and modulo h. */
+function unsettled(real: readonly Finding[], residues: readonly ResidueFinding[]): readonly ResidueFinding[] {
+  const known = [...real, ...residues.filter(({ outcome }) => outcome !== 'unknown')];
+  const different = known.some(({ same }) => !same);
+  const differentModEta = known.some(({ sameModEta }) => !sameModEta);
+  const differentModH = [...real, ...residues].some((finding) => !finding.sameModH && !isUnknownModH(finding));
+  return residues.filter(
+    (finding) =>
+      (finding.outcome === 'unknown' && (!different || (!differentModEta && !finding.sameModEta))) ||
+      (finding.outcomeModH === 'unknown' && !differentModH),
+  );
 }
 
 const isUnknownModH = (finding: Finding): boolean =>
@@ -123,7 +132,7 @@ class ResidueFinding implements Finding {
   private write(value: ResidueClass<Int> | undefined): Expression {
     return this.element.prime
       ? writeResidueClass(primeResidueField(this.base), this.degree - 1, value)
-      : writeUnsplit(this.degree - 1, value);
+      : writeUnsplit(this.sight, this.base, this.degree - 1, value);
   }
 }
 
@@ -138,12 +147,20 @@ function zeroModH(x: ResidueClass<Int> | undefined, classOfMinusOne: Int): 'zero
   return rank % 2 === 0 && xorInt(x.squareClass, rank === 2 ? classOfMinusOne : 0) === 0 ? 'zero' : 'nonzero';
 }
 
-/** A residue at an unsplit composite: rank and a discriminant that is only known as a product. */
-function writeUnsplit(degree: number, x: ResidueClass<Int> | undefined): Expression {
+/** A residue at an unsplit composite: its rank, and its discriminant as a residue modulo the composite. */
+function writeUnsplit(
+  sight: readonly BaseElement[],
+  b: bigint,
+  degree: number,
+  x: ResidueClass<Int> | undefined,
+): Expression {
   if (x === undefined) return zeroExpression;
-  if (x.unit !== undefined) return multiple(1n, [{ kind: 'symbol', entries: [integerElement(BigInt(x.unit))] }]);
-  const etas = degree === 0 ? [] : [degree === -1 ? eta() : power(eta(), -degree)];
-  return x.rank === 0 ? zeroExpression : multiple(BigInt(x.rank), etas);
+  if (x.unit !== undefined) return symbol([integerElement(BigInt(x.unit))]);
+  const mask = BigInt(x.squareClass);
+  const plain = BigInt(x.rank) - (mask === 0n ? 0n : 1n);
+  const etas = etaFactors(-degree);
+  const form = mask === 0n ? [] : [multiple(1n, [...etas, angle([integerElement(maskedProduct(sight, b, mask))])])];
+  return total([...(plain === 0n ? [] : [multiple(plain, etas)]), ...form]);
 }
 
 function residueGroup(degree: number, b: bigint, prime: boolean): string {

@@ -4,7 +4,7 @@ import { isPrime } from '../arith/prime';
 import { integerElement, type Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import { Refusal } from '../expression/refusal';
-import { elementText } from '../expression/to-text';
+import { shownElement } from '../expression/shown';
 import { rationals, type Rational } from '../field/rational';
 import { primeResidueField } from '../place/prime-residue-field';
 import type { RationalEntry } from '../place/rational-entry';
@@ -116,7 +116,7 @@ function readUniformizer(element: Element, asked: readonly bigint[] | undefined,
   if (order !== 1)
     throw new Refusal(
       'uniformizer',
-      `${elementText(element)} has valuation ${order} at ${p}, so it is no uniformizer there. Take ${p} times a unit at ${p}.`,
+      `${shownElement(element)} has valuation ${order} at ${p}, so it is no uniformizer there. Take ${p} times a unit at ${p}.`,
       element.at,
     );
   return value;

@@ -1,7 +1,7 @@
 import type { Budget } from '../arith/budget';
 import type { Element } from '../expression/element';
 import { Refusal } from '../expression/refusal';
-import { elementText } from '../expression/to-text';
+import { shownElement } from '../expression/shown';
 import type { Field } from '../field/field';
 import { elementReader } from '../field/read-element';
 
@@ -17,7 +17,7 @@ export function unitReader<E>(field: Field<E>, budget: Budget): (entry: Element)
 
 /** The refusal of an entry that is zero. */
 export function notAUnit(entry: Element, fieldName: string): Refusal {
-  const text = elementText(entry);
+  const text = shownElement(entry);
   const zero = text === '0' ? '0 is none' : `${text} is 0 in ${fieldName}`;
   return new Refusal('not-a-unit', `An entry of a symbol must be a unit, and ${zero}.`, entry.at);
 }

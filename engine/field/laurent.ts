@@ -23,6 +23,7 @@ export interface LaurentRing<E> {
   constant(value: E): Laurent<E>;
   letter(name: string): Laurent<E>;
   add(f: Laurent<E>, g: Laurent<E>): Laurent<E>;
+  sum(list: readonly Laurent<E>[]): Laurent<E>;
   negate(f: Laurent<E>): Laurent<E>;
   multiply(f: Laurent<E>, g: Laurent<E>): Laurent<E>;
   /** The inverse of a single term; `undefined` for a polynomial that is no unit of the ring. */
@@ -47,6 +48,14 @@ export function laurentRing<E>(field: Field<E>, budget: Budget): LaurentRing<E> 
     constant: (value) => of({ coefficient: value, exponents: new Map() }),
     letter: (name) => of({ coefficient: field.one, exponents: new Map([[name, 1n]]) }),
     add: (f, g) => of(...f.values(), ...g.values()),
+    sum(list) {
+      const terms = new Map<string, LaurentTerm<E>>();
+      for (const f of list) {
+        budget.spend('reading an entry');
+        for (const term of f.values()) put(terms, term);
+      }
+      return terms;
+    },
     negate: (f) => of(...[...f.values()].map((term) => ({ ...term, coefficient: field.negate(term.coefficient) }))),
     multiply(f, g) {
       if (f.size * g.size > TERM_LIMIT)
@@ -114,7 +123,7 @@ export function readLaurent<E>(
       case 'negate':
         return ring.negate(read(e.of));
       case 'sum':
-        return e.terms.map(read).reduce(ring.add);
+        return ring.sum(e.terms.map(read));
       case 'product':
         return e.factors.map(read).reduce(ring.multiply);
       case 'quotient':

@@ -122,6 +122,15 @@ function unsplitPlace(b: bigint, index: number): Place {
   };
 }
 
+/** The product modulo b that a formal square class stands for. */
+export function maskedProduct(base: readonly BaseElement[], b: bigint, mask: bigint): bigint {
+  let unit = (mask & 1n) === 1n ? b - 1n : 1n;
+  base.forEach(({ value }, i) => {
+    if (((mask >> BigInt(i + 1)) & 1n) === 1n) unit = (unit * value) % b;
+  });
+  return unit;
+}
+
 export type ZeroTest = 'zero' | 'nonzero' | 'unknown';
 
 /**
@@ -154,10 +163,6 @@ export function unsplitZeroTest(
   if (degree === 0 ? x.rank !== 0 : isOddInt(x.rank)) return 'nonzero';
   const mask = BigInt(x.squareClass) ^ (degree < 0 && moduloFour(x.rank) === 2 ? 1n : 0n);
   if (mask === 0n) return 'zero';
-  let unit = (mask & 1n) === 1n ? b - 1n : 1n;
-  base.forEach(({ value }, i) => {
-    if (((mask >> BigInt(i + 1)) & 1n) === 1n) unit = (unit * value) % b;
-  });
-  if (jacobi(unit, b) === -1) return 'nonzero';
+  if (jacobi(maskedProduct(base, b, mask), b) === -1) return 'nonzero';
   return isKnownSquare(base, entries, b, mask) ? 'zero' : 'unknown';
 }

@@ -17,14 +17,14 @@ export interface Monomial {
 export type Words = ReadonlyMap<bigint, SignClass>;
 
 /** More words than this are not kept. */
-const WORD_LIMIT = 200_000;
+const WORD_LIMIT = 5_000;
 
 /**
  * Canonical words in ±monomials of letters: equal elements have the same words, over every field at once. When the letters are
  * indeterminates over ℚ or 𝔽_p the words are a basis over B_* (split exactness of residues along each letter in turn: F. Morel,
  * LNM 2052, Theorem 3.24, number from memory). Sorting uses [q][p] = ε[p][q], repetition [p][p] = [−1][p].
  *
- * This ring expands: an entry with k letters has up to 2ᵏ words. Past 200 000 words it refuses.
+ * This ring expands: an entry with k letters has up to 2ᵏ words. Past 5 000 words it refuses.
  */
 export function wordRing(char: CharacteristicClass, budget: Budget): GradedRing<Monomial, Words> {
   const epsilon: SignClass = { x: -1n, y: -1n };
@@ -40,7 +40,7 @@ export function wordRing(char: CharacteristicClass, budget: Budget): GradedRing<
     if (reduced === undefined) words.delete(mask);
     else words.set(mask, reduced);
     if (words.size > WORD_LIMIT)
-      throw new Refusal('size', 'The canonical form has more than 200 000 words. Use entries with fewer letters.');
+      throw new Refusal('size', 'The canonical form has more than 5 000 words. Use entries with fewer letters.');
   };
   const nonZero = (words: Words): Words | undefined => (words.size === 0 ? undefined : words);
 
