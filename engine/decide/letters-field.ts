@@ -219,7 +219,7 @@ function compareLetters(a: string, b: string): number {
   const [x, y] = [parts(a), parts(b)];
   if (x[0] !== y[0]) return x[0] < y[0] ? -1 : 1;
   if (x[1] !== y[1]) return x[1] < y[1] ? -1 : 1;
-  return x[2] - y[2];
+  return x[2] - y[2] || (a < b ? -1 : a > b ? 1 : 0);
 }
 
 function wordFindings(
