@@ -38,7 +38,7 @@ export const rooms = [
   { room: 'tests/oracle', rooms: ['engine/expression'], packages: [] },
   {
     room: 'tests',
-    rooms: ['app', 'engine', 'grammar', 'lib', 'models', 'migrations', 'seeders', 'package.json'],
+    rooms: ['tests', 'app', 'engine', 'grammar', 'lib', 'models', 'migrations', 'seeders', 'package.json'],
     packages: 'any',
   },
 ];
