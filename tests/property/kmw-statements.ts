@@ -72,5 +72,6 @@ export function editedPair(row: FieldRow): fc.Arbitrary<Pair> {
   return fc.tuple(equalPair(row), edit).map(([{ left, right }, extra]) => ({ left, right: sum([right, extra]) }));
 }
 
-/** Pairs that are equal about half of the time. */
-export const pair = (row: FieldRow): fc.Arbitrary<Pair> => fc.oneof(equalPair(row), editedPair(row));
+/** Pairs that are equal about half of the time: many an edit changes nothing. */
+export const pair = (row: FieldRow): fc.Arbitrary<Pair> =>
+  fc.oneof({ weight: 1, arbitrary: equalPair(row) }, { weight: 2, arbitrary: editedPair(row) });

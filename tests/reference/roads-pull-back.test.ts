@@ -94,7 +94,7 @@ describe.each(roads.map((road) => [road.row.label, road] as const))('the fast ro
     expect(counts.equal + counts.different + counts.unusable).toBeGreaterThanOrEqual(runs);
     expect(counts.fast).toBeGreaterThan(runs * 0.7);
     expect(counts.equal).toBeGreaterThan(runs * 0.2);
-    expect(counts.different).toBeGreaterThan(runs * 0.05);
+    expect(counts.different).toBeGreaterThan(runs * 0.02); // few over F_2, where 1 is the only unit
   });
 });
 
