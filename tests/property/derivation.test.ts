@@ -79,7 +79,12 @@ test('the same derivation under a condition on the characteristic', () => {
 
 test('a derivation that would be too long to read is left out, the canonical form is not', () => {
   const field = resolveField(readFieldName('Q'), unlimited);
-  const { parts, steps } = normalize(field, readExpression('1 + ([2]+[3]+[5]+[7])^20*eta^20'), { steps: true }, unlimited);
+  const { parts, steps } = normalize(
+    field,
+    readExpression('1 + ([2]+[3]+[5]+[7])^20*eta^20'),
+    { steps: true },
+    unlimited,
+  );
   expect(parts.map(({ degree }) => degree)).toEqual([0]);
   expect(steps).toBeUndefined();
 });
