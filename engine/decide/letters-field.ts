@@ -13,9 +13,11 @@ import { wordRing, type Words } from '../ring/word-ring';
 import { total } from '../ring/write-word';
 import type { DecidableField } from './decidable-field';
 import { sideConditionsOf } from './letters-conditions';
+import { constantForm } from './letters-constant';
 import { characteristicOf, lettersReader, type LetterEntry } from './letters-reading';
 import { readStatement } from './letters-statement';
 import { wordFindings, writeWord, writeWords } from './letters-words';
+import type { NormalizedDegree } from './outcome';
 
 const THEOREM =
   'Canonical words in independent letters are a basis, over every field at once: residues along each letter in turn are split exact ' +
@@ -32,7 +34,17 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
     const characteristic = characteristicOf(conditions, budget);
     return { characteristic, ...readStatement(expressions, characteristic, conditions, budget) };
   };
-  /** In characteristic p the part without letters is written as over 𝔽_p, so that it has one form whatever else is in sight. */
+  /** The canonical form of an expression without letters: that over ℚ, or that over 𝔽_p as it stands among letters. */
+  const constantForms = (
+    characteristic: bigint,
+    expression: Expression,
+    budget: Budget,
+  ): readonly NormalizedDegree[] => {
+    const parts = constants(characteristic, budget).normalForm(expression, [], budget);
+    if (characteristic === 0n) return parts;
+    return parts.map((part) => ({ ...part, normalForm: constantForm(part.normalForm, characteristic) }));
+  };
+  /** The part without letters is written as it is when it stands alone, so that it has one form whatever else is in sight. */
   const withConstant = (
     statement: ReturnType<typeof open>,
     degree: number,
@@ -42,12 +54,8 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
     const constant = words.get(0n);
     if (statement.characteristic === 0n || constant === undefined) return writeWords(statement.letters, degree, words);
     const rest = new Map([...words].filter(([mask]) => mask !== 0n));
-    const form = constants(statement.characteristic, budget).normalForm(
-      total(writeWord([], degree, 0n, constant)),
-      [],
-      budget,
-    );
-    return total([...form.map(({ normalForm }) => normalForm), writeWords(statement.letters, degree, rest)]);
+    const written = constantForms(statement.characteristic, total(writeWord([], degree, 0n, constant)), budget);
+    return total([...written.map(({ normalForm }) => normalForm), writeWords(statement.letters, degree, rest)]);
   };
   const constants = (characteristic: bigint, budget: Budget): DecidableField =>
     concrete(characteristic === 0n ? { kind: 'rationals' } : { kind: 'finite', order: characteristic }, budget);
@@ -78,7 +86,7 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
     normalForm(expression, conditions, budget) {
       const statement = open([expression], conditions, budget);
       if (statement.letters.length === 0)
-        return constants(statement.characteristic, budget).normalForm(statement.constant(expression), [], budget);
+        return constantForms(statement.characteristic, statement.constant(expression), budget);
       const ring = wordRing(characteristicClass(statement.characteristic), budget);
       const value = evaluate(statement.sides[0] ?? [], ring, budget);
       return [...value]

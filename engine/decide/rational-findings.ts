@@ -38,16 +38,19 @@ export function rationalFindings(statement: RationalStatement, budget: Budget): 
   }
 }
 
-/** The residues at unsplit composites that still matter: for the verdict, and for whether the sides agree modulo η and modulo h. */
+/**
+ * The residues at unsplit composites that still matter. One that is not known may be left out only where its degree is seen to
+ * differ without it, and where what it could change modulo η and modulo h is settled by others.
+ */
 function unsettled(real: readonly Finding[], residues: readonly ResidueFinding[]): readonly ResidueFinding[] {
   const known = [...real, ...residues.filter(({ outcome }) => outcome !== 'unknown')];
-  const different = known.some(({ same }) => !same);
+  const different = new Set(known.filter(({ same }) => !same).map(({ degree }) => degree));
   const differentModEta = known.some(({ sameModEta }) => !sameModEta);
-  const differentModH = [...real, ...residues].some((finding) => !finding.sameModH && !isUnknownModH(finding));
-  return residues.filter(
-    (finding) =>
-      (finding.outcome === 'unknown' && (!different || (!differentModEta && !finding.sameModEta))) ||
-      (finding.outcomeModH === 'unknown' && !differentModH),
+  const differentModH = known.some((finding) => !finding.sameModH && !isUnknownModH(finding));
+  return residues.filter(({ degree, outcome, outcomeModH, sameModEta }) =>
+    outcome === 'unknown'
+      ? !different.has(degree) || (!sameModEta && !differentModEta) || (outcomeModH !== 'zero' && !differentModH)
+      : outcomeModH === 'unknown' && !differentModH,
   );
 }
 
