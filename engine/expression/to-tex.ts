@@ -52,7 +52,7 @@ export function conditionTex(condition: Condition): string {
     return `\\operatorname{char} ${condition.is ? '=' : '\\ne'} ${condition.prime}`;
   }
   const left = elementTex(condition.left);
-  return `${left.startsWith('char') ? `(${left})` : left} ${condition.kind === 'equal' ? '=' : '\\ne'} ${elementTex(condition.right)}`;
+  return `${/^char(?![a-z])/i.test(left) ? `(${left})` : left} ${condition.kind === 'equal' ? '=' : '\\ne'} ${elementTex(condition.right)}`;
 }
 
 /** The statement in TeX: `[a][1-a] = 0 ;\ a \ne 1`. */

@@ -41,7 +41,7 @@ export const expressionText = (expression: Expression): string => printExpressio
 export function conditionText(condition: Condition): string {
   if (condition.kind === 'characteristic') return `char ${condition.is ? '=' : '!='} ${condition.prime}`;
   const left = elementText(condition.left);
-  return `${left.startsWith('char') ? `(${left})` : left} ${condition.kind === 'equal' ? '=' : '!='} ${elementText(condition.right)}`;
+  return `${/^char(?![a-z])/i.test(left) ? `(${left})` : left} ${condition.kind === 'equal' ? '=' : '!='} ${elementText(condition.right)}`;
 }
 
 /** The statement as plain text: `[a][1-a] = 0 ; a != 1`. */
