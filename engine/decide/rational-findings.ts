@@ -10,7 +10,7 @@ import { thetaRing, type Theta } from '../place/theta-ring';
 import { degreesOf } from '../ring/degrees';
 import { evaluate } from '../ring/evaluate';
 import type { GradedRing } from '../ring/graded-ring';
-import { residueClassRing, type ResidueClass } from '../ring/residue-class-ring';
+import { residueClassRing, type ResidueClass, type UnitGroup } from '../ring/residue-class-ring';
 import { writeResidueClass } from '../ring/write-residue-class';
 import { etaFactors, multiple, total, zeroExpression } from '../ring/write-word';
 import type { Finding } from './finding';
@@ -61,16 +61,25 @@ function residueFindings({ base, terms, entries }: Incidence, budget: Budget): r
   return base.flatMap((element, index) => {
     const { units, local } = rationalPlace(base, index);
     const ring: GradedRing<RationalEntry, Theta<Int>> = thetaRing(units, local);
-    const kappa = residueClassRing(units);
     const [left = [], right = []] = terms[index] ?? [];
     const [l, r] = [evaluate(left, ring, budget), evaluate(right, ring, budget)];
     return degreesOf(left.length === 0 ? right : right.length === 0 ? left : [...left, ...right]).map((degree) => {
       const [x, y] = [l.get(degree)?.d, r.get(degree)?.d];
-      const minus = y && kappa.negate(degree - 1, y);
-      const difference = x === undefined ? minus : minus === undefined ? x : kappa.add(degree - 1, x, minus);
+      const difference = y === undefined ? x : subtract(units, degree - 1, x, y);
       return new ResidueFinding(base, entries, element, degree, x, y, difference, units.classOfMinusOne);
     });
   });
+}
+
+function subtract(
+  units: UnitGroup<Int>,
+  degree: number,
+  x: ResidueClass<Int> | undefined,
+  y: ResidueClass<Int>,
+): ResidueClass<Int> | undefined {
+  const kappa = residueClassRing(units);
+  const minus = kappa.negate(degree, y);
+  return x === undefined || minus === undefined ? (x ?? minus) : kappa.add(degree, x, minus);
 }
 
 /** The residues of both sides at one element of the base; a class, so that what is only shown is worked out on demand. */

@@ -32,7 +32,7 @@ export function thetaRing<A extends object, E>(
 class ThetaRing<A extends object, E> implements GradedRing<A, Theta<E>> {
   private readonly kappa: GradedRing<ClassedUnit<E>, ResidueClass<E>>;
   private readonly symbols = new Map<A, Theta<E> | null>();
-  private readonly angles = new Map<A, Theta<E> | null>();
+  private angles: Map<A, Theta<E> | null> | undefined;
 
   constructor(
     private readonly units: UnitGroup<E>,
@@ -60,6 +60,7 @@ class ThetaRing<A extends object, E> implements GradedRing<A, Theta<E>> {
   }
 
   angle(entry: A): Theta<E> | undefined {
+    this.angles ??= new Map();
     let known = this.angles.get(entry);
     if (known === undefined) {
       // ⟨πⁿu⟩ = 1 + η[πⁿu]: s is ⟨ū⟩, and η·n_ε⟨ū⟩ is η⟨ū⟩ for n odd, 0 for n even

@@ -9,15 +9,20 @@ interface DegreeSet {
 
 /** The degrees of the words a sum of terms multiplies out to, highest first. */
 export function degreesOf<A>(terms: readonly Term<A>[]): readonly number[] {
+  const [only, more] = terms;
+  if (only === undefined) return [];
+  if (more === undefined && only.factors.every(isSymbol)) return [only.factors.length - only.eta];
   const degrees = new Set<number>();
   const sums: Term<A>[] = [];
   for (const term of terms) {
-    if (term.factors.every((factor) => factor.kind === 'symbol')) degrees.add(term.factors.length - term.eta);
+    if (term.factors.every(isSymbol)) degrees.add(term.factors.length - term.eta);
     else sums.push(term);
   }
   for (const term of sums) for (const degree of degreesOfSum(term)) degrees.add(degree);
   return [...degrees].sort((a, b) => b - a);
 }
+
+const isSymbol = (factor: { readonly kind: string }): boolean => factor.kind === 'symbol';
 
 /** Terms are asked once for every place they ramify at. */
 const known = new WeakMap<object, readonly number[]>();
