@@ -1,4 +1,4 @@
-import type { Int } from '../arith/int';
+import { toInt, type Int } from '../arith/int';
 import type { Span } from '../expression/span';
 import type { Rational } from '../field/rational';
 
@@ -20,15 +20,15 @@ export function rationalEntries(): {
   all(): readonly RationalEntry[];
 } {
   const all: RationalEntry[] = [];
-  const byDenominator = new Map<bigint, Map<bigint, RationalEntry>>();
+  const byDenominator = new Map<Int, Map<Int, RationalEntry>>();
   return {
     intern(value, at) {
-      let byNumerator = byDenominator.get(value.den);
-      if (byNumerator === undefined) byDenominator.set(value.den, (byNumerator = new Map()));
-      let entry = byNumerator.get(value.num);
+      let byNumerator = byDenominator.get(toInt(value.den));
+      if (byNumerator === undefined) byDenominator.set(toInt(value.den), (byNumerator = new Map()));
+      let entry = byNumerator.get(toInt(value.num));
       if (entry === undefined) {
         entry = { value, negative: value.num < 0n, at, exponents: new Map() };
-        byNumerator.set(value.num, entry);
+        byNumerator.set(toInt(value.num), entry);
         all.push(entry);
       }
       return entry;

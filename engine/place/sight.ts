@@ -39,17 +39,18 @@ interface Stripped {
  * Throws a Refusal `budget` that points to the entry when a factorisation does not end in time.
  */
 export function see(entries: readonly RationalEntry[], split: Splitting, budget: Budget): readonly BaseElement[] {
-  const stripped = new Map<bigint, Stripped>();
+  const stripped = new Map<Int, Stripped>();
   const primes = new Set<Int>();
   const hard = new Set<bigint>();
   const strip = (n: bigint, entry: RationalEntry): Stripped => {
-    const known = stripped.get(n);
+    const key = toInt(n);
+    const known = stripped.get(key);
     if (known !== undefined) return known;
     budget.spend('looking for the primes of the entries');
     const made = n < EXACT ? stripSmall(Number(n), entry, budget) : stripLarge(n, entry, budget);
     for (const [p] of made.factors) primes.add(p);
     if (made.rest > 1n) hard.add(made.rest);
-    stripped.set(n, made);
+    stripped.set(key, made);
     return made;
   };
   const parts = entries.map((entry) => ({
