@@ -7,7 +7,7 @@ import { rationals } from '../field/rational';
 import { localSquares, orderAt } from '../place/local-squares';
 import type { RationalEntry } from '../place/rational-entry';
 import { primeResidueField } from '../place/prime-residue-field';
-import { primePlace } from '../place/rational-place';
+import { localEntry, primeUnits } from '../place/rational-place';
 import { thetaRing } from '../place/theta-ring';
 import { degreesOf } from '../ring/degrees';
 import { evaluate } from '../ring/evaluate';
@@ -43,8 +43,7 @@ const integerOf = (n: bigint): Element => (n < 0n ? negateElement(integerElement
 export function padicField(p: bigint): DecidableField {
   const squares = localSquares(p);
   const ring = localWittRing<RationalEntry>(squares, (entry) => squares.classOf(entry.value));
-  const place = primePlace(p);
-  const tame = thetaRing<RationalEntry, Int>(place.units, (entry) => place.local(entry, orderAt(entry.value, p)));
+  const tame = thetaRing<RationalEntry, Int>(primeUnits(p), ({ value }) => localEntry(value, p, orderAt(value, p)));
   const nonResidue = squares.representatives[1] ?? 1n;
   const rho = p === 2n ? [minusOneElement, minusOneElement] : [integerElement(p), integerElement(nonResidue)];
   const tex = `\\mathbb{Q}_{${p}}`;

@@ -5,9 +5,10 @@ import { integerElement } from '../expression/element';
 import { symbol, type Expression } from '../expression/expression';
 import { Refusal } from '../expression/refusal';
 import { rationals, type Rational } from '../field/rational';
-import type { RationalEntry } from '../place/rational-entry';
+import { exponentMap, type RationalEntry } from '../place/rational-entry';
 import { see, type BaseElement } from '../place/sight';
 import { evaluate } from '../ring/evaluate';
+import type { GradedRing } from '../ring/graded-ring';
 import { productRing, type ProductClass } from '../ring/product-ring';
 import { minusOneElement, multiple, symbolFactors, total } from '../ring/write-word';
 import type { Finding } from './finding';
@@ -19,13 +20,16 @@ const WRITTEN_BITS = 4096n;
 /** A product past this size is not written out: 10⁵ digits. */
 const LARGEST_BITS = 332_193n;
 
+const productsRing = (): GradedRing<RationalEntry, ProductClass> =>
+  productRing((entry) => ({ negative: entry.negative, exponents: exponentMap(entry) }));
+
 /** The classes in K^M_1 of the sides of a statement with rational entries, and the base their exponents belong to. */
 export function productClasses(
   { sides, entries }: RationalStatement,
   budget: Budget,
 ): { readonly base: readonly BaseElement[]; readonly products: readonly (ProductClass | undefined)[] } {
   const base = see(entries, 'none', budget);
-  const ring = productRing<RationalEntry>((entry) => entry);
+  const ring = productsRing();
   return { base, products: sides.map((terms) => evaluate(terms, ring, budget).get(1)) };
 }
 
@@ -33,7 +37,7 @@ export function productClasses(
 export function productFinding(statement: RationalStatement, target: string, budget: Budget): Finding {
   const { base, products } = productClasses(statement, budget);
   const [left, right] = products;
-  const ring = productRing<RationalEntry>((entry) => entry);
+  const ring = productsRing();
   const same = left === undefined || right === undefined ? left === right : ring.equal(1, left, right);
   return {
     map: 'product',

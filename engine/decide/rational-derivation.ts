@@ -6,7 +6,7 @@ import type { DerivationStep } from '../derive/rule';
 import { integerElement, type Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import { rationals } from '../field/rational';
-import { rationalEntries, type RationalEntry } from '../place/rational-entry';
+import { exponentMap, rationalEntries, type RationalEntry } from '../place/rational-entry';
 import { see } from '../place/sight';
 import { lower } from '../ring/lower';
 import { unitReader } from './read-unit';
@@ -40,7 +40,7 @@ export function rationalDerivation(
   );
 }
 
-const atomOf = ({ negative, exponents }: RationalEntry): FactoredAtom => ({
-  negative,
-  powers: [...exponents].map(([g, e]) => [g, BigInt(e)] as const).sort(([a], [b]) => a - b),
+const atomOf = (entry: RationalEntry): FactoredAtom => ({
+  negative: entry.negative,
+  powers: [...exponentMap(entry)].map(([g, e]) => [g, BigInt(e)] as const).sort(([a], [b]) => a - b),
 });

@@ -58,17 +58,20 @@ const isUnknownModH = (finding: Finding): boolean =>
   finding instanceof ResidueFinding && finding.outcomeModH === 'unknown';
 
 function residueFindings({ base, terms, entries }: Incidence, budget: Budget): readonly ResidueFinding[] {
-  return base.flatMap((element, index) => {
+  const findings: ResidueFinding[] = [];
+  base.forEach((element, index) => {
     const { units, local } = rationalPlace(base, index);
     const ring: GradedRing<RationalEntry, Theta<Int>> = thetaRing(units, local);
-    const [left = [], right = []] = terms[index] ?? [];
-    const [l, r] = [evaluate(left, ring, budget), evaluate(right, ring, budget)];
-    return degreesOf(left.length === 0 ? right : right.length === 0 ? left : [...left, ...right]).map((degree) => {
-      const [x, y] = [l.get(degree)?.d, r.get(degree)?.d];
+    const [left, right] = [terms(0, index), terms(1, index)];
+    const l = left.length === 0 ? undefined : evaluate(left, ring, budget);
+    const r = right.length === 0 ? undefined : evaluate(right, ring, budget);
+    for (const degree of degreesOf(left.length === 0 ? right : right.length === 0 ? left : [...left, ...right])) {
+      const [x, y] = [l?.get(degree)?.d, r?.get(degree)?.d];
       const difference = y === undefined ? x : subtract(units, degree - 1, x, y);
-      return new ResidueFinding(base, entries, element, degree, x, y, difference, units.classOfMinusOne);
-    });
+      findings.push(new ResidueFinding(base, entries, element, degree, x, y, difference, units.classOfMinusOne));
+    }
   });
+  return findings;
 }
 
 function subtract(

@@ -4,7 +4,7 @@ import { toInt } from '../arith/int';
 import { integerElement } from '../expression/element';
 import { symbol, type Expression } from '../expression/expression';
 import { primeResidueField } from '../place/prime-residue-field';
-import type { RationalEntry } from '../place/rational-entry';
+import { forEachExponent, rationalEntry, type RationalEntry } from '../place/rational-entry';
 import { rationalPlace } from '../place/rational-place';
 import type { BaseElement } from '../place/sight';
 import { thetaRing } from '../place/theta-ring';
@@ -66,7 +66,7 @@ function* tower(statement: RationalStatement, budget: Budget): Generator<readonl
   const sight = incidence(statement, 'all', budget);
   const base: BaseElement[] = [...sight.base];
   const indexOf = new Map(base.map(({ value }, index) => [value, index]));
-  const pending: Term<RationalEntry>[][] = sight.terms.map(([terms = []]) => [...terms]);
+  const pending = base.map((_, index) => [...sight.terms(0, index)]);
   const queue = [...base.map(({ value }) => value)]; // ascending; the next prime is the last
 
   const indexOfPrime = (p: bigint): number => {
@@ -84,8 +84,8 @@ function* tower(statement: RationalStatement, budget: Budget): Generator<readonl
   const entryOf = (n: bigint): RationalEntry => {
     const known = entries.get(n);
     if (known !== undefined) return known;
-    const exponents = new Map(factor(n, budget).map(({ prime, exponent }) => [indexOfPrime(prime), exponent]));
-    const entry: RationalEntry = { value: { num: n, den: 1n }, negative: false, at: undefined, exponents };
+    const entry = rationalEntry({ num: n, den: 1n });
+    entry.exponents = factor(n, budget).flatMap(({ prime, exponent }) => [indexOfPrime(prime), exponent]);
     entries.set(n, entry);
     return entry;
   };
@@ -116,7 +116,7 @@ function* tower(statement: RationalStatement, budget: Budget): Generator<readonl
             ...(word.symbol === undefined ? [] : [{ kind: 'symbol' as const, entry }]),
           ],
         };
-        for (const other of entry.exponents.keys()) pending[other]?.push(term);
+        forEachExponent(entry, (other) => pending[other]?.push(term));
       }
     }
   }

@@ -1,7 +1,7 @@
 import { coprimeBase } from '../arith/coprime-base';
 import { isOddInt } from '../arith/int';
 import { valuation } from '../arith/valuation';
-import type { RationalEntry } from './rational-entry';
+import { forEachExponent, type RationalEntry } from './rational-entry';
 import type { BaseElement } from './sight';
 
 /**
@@ -23,11 +23,14 @@ export function isKnownSquare(
   base.forEach(({ value }, i) => {
     if (value !== b) numbers.set(value, 1n << BigInt(i + 1));
   });
-  for (const { value, exponents } of entries) {
+  for (const entry of entries) {
+    const { value } = entry;
     for (const [n, above] of [[value.num < 0n ? -value.num : value.num, true] as const, [value.den, false] as const]) {
       if (n === 1n || n % b === 0n || numbers.has(n)) continue;
       let own = 0n;
-      for (const [i, e] of exponents) if (isOddInt(e) && e > 0 === above) own |= 1n << BigInt(i + 1);
+      forEachExponent(entry, (i, e) => {
+        if (isOddInt(e) && e > 0 === above) own |= 1n << BigInt(i + 1);
+      });
       numbers.set(n, own);
     }
   }

@@ -9,7 +9,7 @@ import type { Rational } from '../field/rational';
 import { fieldUnits } from '../ring/field-units';
 import type { ResidueClass, UnitGroup } from '../ring/residue-class-ring';
 import { isKnownSquare } from './known-square';
-import type { RationalEntry } from './rational-entry';
+import { exponentOf, forEachExponent, type RationalEntry } from './rational-entry';
 import type { BaseElement } from './sight';
 import type { LocalEntry } from './theta-ring';
 
@@ -22,48 +22,50 @@ export interface RationalPlace {
 /** Below this a product of two residues is exact as a number. */
 const SMALL_PRIME = 1n << 26n;
 
+const MINUS_EXACT = -EXACT;
+
 /** The place of the base element with this index: a prime of ℚ, or all primes that divide an unsplit composite. */
 export function rationalPlace(base: readonly BaseElement[], index: number): RationalPlace {
   const element = base[index];
   if (element === undefined) throw new RangeError('no such element of the base');
-  const at = element.prime ? primePlace(element.value) : unsplitPlace(element.value, index);
-  return { units: at.units, local: (entry) => at.local(entry, entry.exponents.get(index) ?? 0) };
+  if (!element.prime) return unsplitPlace(element.value, index);
+  const p = element.value;
+  const units = primeUnits(p);
+  return { units, local: (entry) => localEntry(entry.value, p, exponentOf(entry, index)) };
 }
 
-interface Place {
-  readonly units: UnitGroup<Int>;
-  local(entry: RationalEntry, valuation: Int): LocalEntry<Int>;
+/** The residues modulo a prime p; they are numbers if p < 2^26. */
+export const primeUnits = (p: bigint): UnitGroup<Int> => (p < SMALL_PRIME ? new SmallUnits(Number(p)) : largeUnits(p));
+
+/** A non-zero rational number of known valuation as the prime p sees it. */
+export function localEntry(value: Rational, p: bigint, valuation: Int): LocalEntry<Int> {
+  const unit = unitModulo(value, p, valuation);
+  return { valuation, unit, squareClass: quadraticClass(unit, p) };
 }
 
-/** The place at a prime p; units are numbers if p < 2^26. */
-export function primePlace(p: bigint): Place {
-  const units = p < SMALL_PRIME ? smallUnits(Number(p)) : largeUnits(p);
-  return {
-    units,
-    local({ value }, valuation) {
-      const unit = unitModulo(value, p, valuation);
-      return { valuation, unit, squareClass: quadraticClass(unit, p) };
-    },
-  };
-}
+/** A class rather than closures: one is made for every prime in sight. */
+class SmallUnits implements UnitGroup<Int> {
+  readonly one = 1;
+  readonly minusOne: number;
+  readonly classOfMinusOne: 0 | 1;
+  readonly orderModFour: 1 | 2 | 3;
 
-function smallUnits(p: number): UnitGroup<Int> {
-  const number = (a: Int): number => Number(a);
-  const minusOne = p - 1;
-  return {
-    one: 1,
-    multiply: (a, b) => (number(a) * number(b)) % p,
-    power: (a, n) =>
-      n === 1
-        ? a
-        : n === -1
-          ? smallInverse(number(a), p)
-          : smallPower(n < 0 ? smallInverse(number(a), p) : number(a), n < 0 ? negateInt(n) : n, p),
-    equal: (a, b) => a === b,
-    minusOne,
-    classOfMinusOne: p % 4 === 3 ? 1 : 0,
-    orderModFour: p === 2 ? 2 : p % 4 === 1 ? 1 : 3,
-  };
+  constructor(private readonly p: number) {
+    this.minusOne = p - 1;
+    this.orderModFour = p === 2 ? 2 : p % 4 === 1 ? 1 : 3;
+    this.classOfMinusOne = this.orderModFour === 3 ? 1 : 0;
+  }
+  multiply(a: Int, b: Int): number {
+    return (Number(a) * Number(b)) % this.p;
+  }
+  power(a: Int, n: Int): Int {
+    if (n === 1) return a;
+    const base = n < 0 ? smallInverse(Number(a), this.p) : Number(a);
+    return n === -1 ? base : smallPower(base, n < 0 ? negateInt(n) : n, this.p);
+  }
+  equal(a: Int, b: Int): boolean {
+    return a === b;
+  }
 }
 
 function largeUnits(p: bigint): UnitGroup<Int> {
@@ -87,6 +89,8 @@ export function quadraticClass(unit: Int, p: bigint): 0 | 1 {
 
 /** The residue modulo b of a / b^valuation, for b prime to what is left. */
 export function unitModulo({ num, den }: Rational, b: bigint, valuation: Int): Int {
+  if (b < SMALL_PRIME && num < EXACT && num > MINUS_EXACT && den < EXACT)
+    return smallUnitModulo(Number(num), Number(den), Number(b), Number(valuation));
   const top = valuation > 0 ? num / b ** BigInt(valuation) : num;
   const bottom = valuation < 0 ? den / b ** -BigInt(valuation) : den;
   if (b < SMALL_PRIME) {
@@ -99,11 +103,20 @@ export function unitModulo({ num, den }: Rational, b: bigint, valuation: Int): I
   return toInt(bottom === 1n ? residue : (residue * inverseModulo(bottom, b)) % b);
 }
 
+/** `unitModulo` for numbers below 2^53 and a modulus below 2^26. */
+function smallUnitModulo(num: number, den: number, p: number, valuation: number): number {
+  for (; valuation > 0; valuation -= 1) num /= p;
+  for (; valuation < 0; valuation += 1) den /= p;
+  const remainder = num % p;
+  const residue = remainder < 0 ? remainder + p : remainder;
+  return den === 1 ? residue : (residue * smallInverse(den % p, p)) % p;
+}
+
 /**
  * The place at all primes that divide a composite b, none of which is known. Square classes are formal: bit 0 stands for −1 and
  * bit i + 1 for the i-th element of the base, so that a mask of 0 is a square modulo every prime, whichever they are.
  */
-function unsplitPlace(b: bigint, index: number): Place {
+function unsplitPlace(b: bigint, index: number): RationalPlace {
   return {
     units: {
       one: 1,
@@ -114,9 +127,12 @@ function unsplitPlace(b: bigint, index: number): Place {
       classOfMinusOne: 1,
       orderModFour: undefined,
     },
-    local(entry, valuation) {
+    local(entry) {
       let mask = entry.negative ? 1n : 0n;
-      for (const [i, e] of entry.exponents) if (i !== index && isOddInt(e)) mask |= 1n << BigInt(i + 1);
+      forEachExponent(entry, (i, e) => {
+        if (i !== index && isOddInt(e)) mask |= 1n << BigInt(i + 1);
+      });
+      const valuation = exponentOf(entry, index);
       return { valuation, unit: unitModulo(entry.value, b, valuation), squareClass: toInt(mask) };
     },
   };

@@ -39,55 +39,57 @@ interface Stripped {
  * Throws a Refusal `budget` that points to the entry when a factorisation does not end in time.
  */
 export function see(entries: readonly RationalEntry[], split: Splitting, budget: Budget): readonly BaseElement[] {
-  const stripped = new Map<Int, Stripped>();
-  const primes = new Set<Int>();
-  const hard = new Set<bigint>();
-  const strip = (n: bigint, entry: RationalEntry): Stripped => {
-    const key = toInt(n);
-    const known = stripped.get(key);
-    if (known !== undefined) return known;
+  const primes = new Map<Int, number>();
+  const stripped = new Map<bigint, Stripped>();
+  const rests = new Map<RationalEntry, { readonly above: bigint; readonly below: bigint }>();
+  /** Appends the primes of n with sign times their exponents, and gives the composite that is left. */
+  const strip = (n: bigint, sign: 1 | -1, entry: RationalEntry, exponents: Int[]): bigint => {
     budget.spend('looking for the primes of the entries');
-    const made = n < EXACT ? stripSmall(Number(n), entry, budget) : stripLarge(n, entry, budget);
-    for (const [p] of made.factors) primes.add(p);
-    if (made.rest > 1n) hard.add(made.rest);
-    stripped.set(key, made);
-    return made;
+    if (n < EXACT) {
+      stripSmall(Number(n), sign, entry, exponents, budget);
+      return 1n;
+    }
+    const known = stripped.get(n) ?? stripLarge(n, entry, budget);
+    stripped.set(n, known);
+    for (const [p, e] of known.factors) exponents.push(p, sign * e);
+    return known.rest;
   };
-  const parts = entries.map((entry) => ({
-    entry,
-    above: strip(entry.negative ? -entry.value.num : entry.value.num, entry),
-    below: entry.value.den === 1n ? undefined : strip(entry.value.den, entry),
-  }));
+  for (const entry of entries) {
+    const { num, den } = entry.value;
+    const exponents: Int[] = [];
+    const above = strip(entry.negative ? -num : num, 1, entry, exponents);
+    const below = strip(den, -1, entry, exponents);
+    if (above !== 1n || below !== 1n) rests.set(entry, { above, below });
+    for (let i = 0; i < exponents.length; i += 2) primes.set(exponents[i] ?? 1, -1);
+    entry.exponents = exponents; // by the primes themselves until all are known
+  }
 
+  const hard = new Set([...rests.values()].flatMap(({ above, below }) => [above, below].filter((n) => n !== 1n)));
   const base: BaseElement[] = hardBase(hard, primes, split, entries, budget).filter(
     ({ value }) => !primes.has(toInt(value)),
   );
-  for (const p of primes) base.push({ value: BigInt(p), prime: true });
+  for (const p of primes.keys()) base.push({ value: BigInt(p), prime: true });
   base.sort((a, b) => (a.value < b.value ? -1 : 1));
-  const index = new Map<Int, number>(base.map(({ value }, i) => [toInt(value), i]));
+  base.forEach(({ value }, i) => primes.set(toInt(value), i));
   // what a composite is made of: none of its factors is found by trial division
   const large =
     hard.size === 0 ? [] : base.flatMap(({ value }, i) => (value >= BigInt(TRIAL_BOUND) ? [{ value, i }] : []));
 
-  for (const { entry, above, below } of parts) {
-    const exponents = new Map<number, Int>();
-    for (const [part, sign] of [[above, 1] as const, [below, -1] as const]) {
-      if (part === undefined) continue;
-      for (const [p, e] of part.factors) exponents.set(index.get(p) ?? -1, sign * e);
-      if (part.rest === 1n) continue;
-      for (const { value, i } of large) {
-        const e = valuation(part.rest, value).exponent;
-        if (e !== 0) exponents.set(i, sign * e + Number(exponents.get(i) ?? 0));
-      }
-    }
+  for (const entry of entries) {
+    const exponents = entry.exponents.map((x, i) => (i % 2 === 0 ? (primes.get(x) ?? -1) : x));
     entry.exponents = exponents;
+    const rest = rests.get(entry);
+    if (rest === undefined) continue;
+    for (const { value, i } of large) {
+      const e = valuation(rest.above, value).exponent - valuation(rest.below, value).exponent;
+      if (e !== 0) exponents.push(i, e);
+    }
   }
   return base;
 }
 
-/** Strips 1 ≤ n < 2^53. */
-function stripSmall(n: number, entry: RationalEntry, budget: Budget): Stripped {
-  const factors: [Int, number][] = [];
+/** Appends the primes of 1 ≤ n < 2^53 with sign times their exponents. */
+function stripSmall(n: number, sign: 1 | -1, entry: RationalEntry, exponents: Int[], budget: Budget): void {
   let rest = n;
   for (const p of smallPrimes) {
     if (p * p > rest) break;
@@ -95,18 +97,18 @@ function stripSmall(n: number, entry: RationalEntry, budget: Budget): Stripped {
     let exponent = 0;
     do {
       rest /= p;
-      exponent += 1;
+      exponent += sign;
     } while (rest % p === 0);
-    factors.push([p, exponent]);
+    exponents.push(p, exponent);
   }
-  if (rest === 1) return { factors, rest: 1n };
-  if (rest < TRIAL_BOUND * TRIAL_BOUND) factors.push([rest, 1]);
+  if (rest === 1) return;
+  if (rest < TRIAL_BOUND * TRIAL_BOUND) exponents.push(rest, sign);
   else
-    for (const { prime, exponent } of factorEntry(BigInt(rest), entry, budget)) factors.push([toInt(prime), exponent]);
-  return { factors, rest: 1n };
+    for (const { prime, exponent } of factorEntry(BigInt(rest), entry, budget))
+      exponents.push(toInt(prime), sign * exponent);
 }
 
-/** Strips n ≥ 2^53: primes below the trial bound, then what is prime or below 2^60. */
+/** Takes n ≥ 2^53 apart: primes below the trial bound, then what is prime or below 2^60. */
 function stripLarge(n: bigint, entry: RationalEntry, budget: Budget): Stripped {
   const factors: [Int, number][] = [];
   let rest = n;
@@ -125,7 +127,7 @@ function stripLarge(n: bigint, entry: RationalEntry, budget: Budget): Stripped {
 /** A coprime base of the composites that resisted, refined against the known primes and split as far as asked. */
 function hardBase(
   hard: ReadonlySet<bigint>,
-  primes: ReadonlySet<Int>,
+  primes: ReadonlyMap<Int, number>,
   split: Splitting,
   entries: readonly RationalEntry[],
   budget: Budget,
@@ -134,7 +136,7 @@ function hardBase(
   const rests = new Set<bigint>();
   for (const n of hard) {
     let rest = n;
-    for (const p of primes) if (rest % BigInt(p) === 0n) rest = valuation(rest, BigInt(p)).unit;
+    for (const p of primes.keys()) if (rest % BigInt(p) === 0n) rest = valuation(rest, BigInt(p)).unit;
     if (rest > 1n) rests.add(rest);
   }
   const elements: BaseElement[] = [];

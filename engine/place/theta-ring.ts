@@ -16,23 +16,34 @@ export interface Theta<E> {
 type Part<E> = ResidueClass<E> | undefined;
 
 /**
+ * An entry remembers how it looked at the place visited last: places are visited one after the other, and a table at every
+ * place would be most of what a decision keeps in memory.
+ */
+export interface Visited {
+  visitor: object | undefined;
+  symbolThere: unknown;
+  angleThere: unknown;
+}
+
+/**
  * The Θ-ring K^MW_*(κ)[ξ] at a discrete valuation with uniformizer π: ξ of degree 1, ξ² = ξ[−1], xξ = εⁿξx for x of degree n.
  * The ring map Θ_π([πⁿu]) = [ū] + ξ·n_ε⟨ū⟩, Θ(η) = η gives Θ_π(α) = s_v^π(α) + ξ·∂_v^π(α)
  * (F. Morel, LNM 2052, Theorem 3.15 and Lemma 3.16, numbers from memory).
  * `local` describes an entry at the place and is asked once for each entry and kind of use.
  */
-export function thetaRing<A extends object, E>(
+export function thetaRing<A extends Visited, E>(
   units: UnitGroup<E>,
   local: (entry: A) => LocalEntry<E>,
 ): GradedRing<A, Theta<E>> {
   return new ThetaRing(units, local);
 }
 
+/** The unit of every Θ-ring: most words have no coefficient and start with it. */
+const one: Theta<never> = { s: { rank: 1, squareClass: 0, unit: undefined }, d: undefined };
+
 /** A class rather than closures: one is made for every place in sight. */
-class ThetaRing<A extends object, E> implements GradedRing<A, Theta<E>> {
+class ThetaRing<A extends Visited, E> implements GradedRing<A, Theta<E>> {
   private readonly kappa: GradedRing<ClassedUnit<E>, ResidueClass<E>>;
-  private readonly symbols = new Map<A, Theta<E> | null>();
-  private angles: Map<A, Theta<E> | null> | undefined;
 
   constructor(
     private readonly units: UnitGroup<E>,
@@ -42,7 +53,7 @@ class ThetaRing<A extends object, E> implements GradedRing<A, Theta<E>> {
   }
 
   integer(n: Int): Theta<E> | undefined {
-    return pair(this.kappa.integer(n), undefined);
+    return n === 1 ? one : pair(this.kappa.integer(n), undefined);
   }
 
   eta(power: number): Theta<E> | undefined {
@@ -50,26 +61,32 @@ class ThetaRing<A extends object, E> implements GradedRing<A, Theta<E>> {
   }
 
   symbol(entry: A): Theta<E> | undefined {
-    let known = this.symbols.get(entry);
-    if (known === undefined) {
+    this.visit(entry);
+    if (entry.symbolThere === undefined) {
       const at = this.local(entry);
-      known = pair(this.kappa.symbol(at), at.valuation === 0 ? undefined : this.epsilonMultiple(at)) ?? null;
-      this.symbols.set(entry, known);
+      entry.symbolThere =
+        pair(this.kappa.symbol(at), at.valuation === 0 ? undefined : this.epsilonMultiple(at)) ?? null;
     }
-    return known ?? undefined;
+    return (entry.symbolThere as Theta<E> | null) ?? undefined;
   }
 
   angle(entry: A): Theta<E> | undefined {
-    this.angles ??= new Map();
-    let known = this.angles.get(entry);
-    if (known === undefined) {
+    this.visit(entry);
+    if (entry.angleThere === undefined) {
       // ⟨πⁿu⟩ = 1 + η[πⁿu]: s is ⟨ū⟩, and η·n_ε⟨ū⟩ is η⟨ū⟩ for n odd, 0 for n even
       const at = this.local(entry);
       const form = this.kappa.angle(at);
-      known = pair(form, isOddInt(at.valuation) ? this.times(-1, this.kappa.eta(1), 0, form) : undefined) ?? null;
-      this.angles.set(entry, known);
+      entry.angleThere =
+        pair(form, isOddInt(at.valuation) ? this.times(-1, this.kappa.eta(1), 0, form) : undefined) ?? null;
     }
-    return known ?? undefined;
+    return (entry.angleThere as Theta<E> | null) ?? undefined;
+  }
+
+  private visit(entry: A): void {
+    if (entry.visitor === this) return;
+    entry.visitor = this;
+    entry.symbolThere = undefined;
+    entry.angleThere = undefined;
   }
 
   add(degree: number, x: Theta<E>, y: Theta<E>): Theta<E> | undefined {
@@ -82,6 +99,7 @@ class ThetaRing<A extends object, E> implements GradedRing<A, Theta<E>> {
 
   /** (s + ξd)(s′ + ξd′) = ss′ + ξ(ds′ + εᵐsd′ + [−1]dd′), m the degree of the left factor. */
   multiply(m: number, x: Theta<E>, n: number, y: Theta<E>): Theta<E> | undefined {
+    if (x === one) return y;
     const s = this.times(m, x.s, n, y.s);
     const left = this.times(m - 1, x.d, n, y.s);
     if (y.d === undefined) return pair(s, left);

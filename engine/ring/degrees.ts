@@ -9,9 +9,10 @@ interface DegreeSet {
 
 /** The degrees of the words a sum of terms multiplies out to, highest first. */
 export function degreesOf<A>(terms: readonly Term<A>[]): readonly number[] {
-  const [only, more] = terms;
-  if (only === undefined) return [];
-  if (more === undefined && only.factors.every(isSymbol)) return [only.factors.length - only.eta];
+  const [first] = terms;
+  if (first === undefined) return [];
+  const degree = first.factors.length - first.eta;
+  if (terms.every((term) => term.factors.length - term.eta === degree && term.factors.every(isSymbol))) return [degree];
   const degrees = new Set<number>();
   const sums: Term<A>[] = [];
   for (const term of terms) {

@@ -15,7 +15,11 @@ const minusOne = negateElement(integerElement(1n));
  */
 export function lower<A>(expression: Expression, read: (entry: Element) => A): readonly Term<A>[] {
   const terms = lowerNode(expression, read);
-  for (const term of terms) for (const bound of degreeRange(term)) checkDegree(bound);
+  for (const term of terms) {
+    const [low, high] = degreeRange(term);
+    checkDegree(low);
+    checkDegree(high);
+  }
   return terms;
 }
 
@@ -25,7 +29,12 @@ function lowerNode<A>(node: Expression, read: (entry: Element) => A): readonly T
       return node.value === 0n ? [] : [constantTerm(boundedCoefficient(toInt(node.value)))];
     case 'symbol':
       return [
-        { ...constantTerm<A>(1), factors: node.entries.map((entry) => ({ kind: 'symbol', entry: read(entry) })) },
+        {
+          coefficient: 1,
+          eta: 0,
+          angles: [],
+          factors: node.entries.map((entry) => ({ kind: 'symbol', entry: read(entry) })),
+        },
       ];
     case 'angle':
       return node.entries.map((entry) => angleTerm(1, read(entry)));

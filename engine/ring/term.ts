@@ -20,7 +20,9 @@ export type Factor<A> =
   | { readonly kind: 'symbol'; readonly entry: A }
   | { readonly kind: 'power'; readonly of: readonly Term<A>[]; readonly exponent: number };
 
-export const constantTerm = <A>(coefficient: Int): Term<A> => ({ coefficient, eta: 0, angles: [], factors: [] });
+const none: readonly never[] = [];
+
+export const constantTerm = <A>(coefficient: Int): Term<A> => ({ coefficient, eta: 0, angles: none, factors: none });
 
 /** The product of terms, in order. */
 export function multiplyAll<A>(terms: readonly Term<A>[]): Term<A> {

@@ -8,6 +8,7 @@ import type { Task } from './engine.worker';
 import { laneSizes, longestQueues, quickSeconds } from './lanes';
 import { type AnswerOf, type BodyOf, type ComputeRequest, declined, type Kind, type Reply } from './request';
 import { Busy, Slots } from './slots';
+import { threadLimits } from './thread-limits';
 import { newStartMark, wallAround } from './wall';
 
 export interface Asking {
@@ -44,7 +45,7 @@ function start(): Engine {
     minThreads: sizes.quick + sizes.slow,
     maxThreads: sizes.quick + sizes.slow,
     concurrentTasksPerWorker: 1,
-    resourceLimits: { maxOldGenerationSizeMb: COMPUTE_MEMORY_MIB, stackSizeMb: 4 },
+    resourceLimits: threadLimits(COMPUTE_MEMORY_MIB),
     // Nothing of the environment, such as the address of the database, reaches the threads.
     env: {},
   });
