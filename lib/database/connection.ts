@@ -2,10 +2,36 @@ import 'server-only';
 import pg from 'pg';
 import { Sequelize } from 'sequelize';
 import { config } from '@/lib/config/config';
+import { initApiToken } from '@/models/api-token';
+import { initAuditEvent } from '@/models/audit-event';
+import { initCheck } from '@/models/check';
+import { initDraft } from '@/models/draft';
+import { initGroup } from '@/models/group';
+import { initIdempotencyKey } from '@/models/idempotency-key';
+import { initIdentity } from '@/models/identity';
+import { initInvitation } from '@/models/invitation';
+import { initMembership } from '@/models/membership';
+import { initPasswordReset } from '@/models/password-reset';
 import { initPermalink } from '@/models/permalink';
+import { initRevision } from '@/models/revision';
+import { initUser } from '@/models/user';
 
 /** Every model, in the order in which one may refer to another. */
-const initialisers = [initPermalink] as const;
+const initialisers = [
+  initPermalink,
+  initUser,
+  initGroup,
+  initMembership,
+  initInvitation,
+  initPasswordReset,
+  initApiToken,
+  initAuditEvent,
+  initDraft,
+  initIdentity,
+  initRevision,
+  initCheck,
+  initIdempotencyKey,
+] as const;
 
 /** Opens a database and binds the models to it. The caller closes it. */
 export function connect(url: string, connections: number): Sequelize {
