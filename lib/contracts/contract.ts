@@ -6,6 +6,9 @@ import type { ProblemCode } from './problem';
 export interface Example {
   readonly name: string;
   readonly summary: string;
+  /** Values of the path and of the query string, where the call has some. */
+  readonly params?: Readonly<Record<string, string>>;
+  readonly query?: Readonly<Record<string, string>>;
   readonly request?: unknown;
   readonly answer: unknown;
 }
@@ -14,9 +17,16 @@ export interface Example {
  * One call of the API: the only source of its validation, its types, its documentation and its tests.
  *
  * @typeParam Request - the schema of the body; `undefined` for a call without one
- * @typeParam Answer - the schema of the body of a success (status 200)
+ * @typeParam Answer - the schema of the body of a success
+ * @typeParam Params - the schema of the parts of the path that stand in braces; each is a text
+ * @typeParam Query - the schema of the query string; every value is a text, a key that is not in it is refused
  */
-export interface Contract<Request extends z.ZodType | undefined, Answer extends z.ZodType> {
+export interface Contract<
+  Request extends z.ZodType | undefined,
+  Answer extends z.ZodType,
+  Params extends z.ZodObject | undefined = undefined,
+  Query extends z.ZodObject | undefined = undefined,
+> {
   readonly method: 'GET' | 'POST';
   readonly path: `/api/v1/${string}`;
   /** Name of the call in the OpenAPI document. */
@@ -25,13 +35,19 @@ export interface Contract<Request extends z.ZodType | undefined, Answer extends 
   readonly description: string;
   readonly permission: PermissionName;
   readonly request: Request;
+  readonly params?: Params;
+  readonly query?: Query;
   readonly answer: Answer;
+  /** The status of a success; 200 unless something is made. */
+  readonly success?: 200 | 201;
+  /** Whether the call takes an `Idempotency-Key`. */
+  readonly idempotent?: boolean;
   /** The problems particular to this call; those of every call (method, quota, …) are added by the document. */
   readonly problems: readonly ProblemCode[];
   readonly examples: readonly Example[];
 }
 
-export type AnyContract = Contract<z.ZodType | undefined, z.ZodType>;
+export type AnyContract = Contract<z.ZodType | undefined, z.ZodType, z.ZodObject | undefined, z.ZodObject | undefined>;
 
 /** Any problem that reading texts and naming a field can raise. */
 export const readingProblems = [

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 
 interface ProblemKind {
-  readonly status: 400 | 403 | 404 | 405 | 413 | 415 | 422 | 429 | 500 | 503;
+  readonly status: 400 | 401 | 403 | 404 | 405 | 409 | 413 | 415 | 422 | 429 | 500 | 503;
   readonly title: string;
   readonly about: string;
 }
@@ -16,8 +16,23 @@ export const problemKinds = {
     title: 'The body is not a JSON object',
     about: 'The body must be one JSON object in UTF-8.',
   },
+  unauthenticated: {
+    status: 401,
+    title: 'A token is needed',
+    about: 'Send `Authorization: Bearer` with a token that is neither expired nor revoked, or sign in.',
+  },
   forbidden: { status: 403, title: 'Not permitted', about: 'The caller lacks the permission that this call needs.' },
-  'not-found': { status: 404, title: 'No such address', about: 'Nothing answers at this address.' },
+  'not-found': { status: 404, title: 'Nothing is there', about: 'Nothing that the caller can see is at this address.' },
+  conflict: {
+    status: 409,
+    title: 'It was changed meanwhile',
+    about: 'The call began from an older revision; `current` has the newest. Begin again from that one.',
+  },
+  'idempotency-key': {
+    status: 422,
+    title: 'The key was used for another request',
+    about: 'An `Idempotency-Key` belongs to one request: 1 to 200 printable characters, a new one for each.',
+  },
   method: {
     status: 405,
     title: 'Another method is needed',
@@ -111,6 +126,7 @@ export const problem = z.object({
     .describe('The key of the request that the problem lies in, such as `left` or `places[1]`.'),
   line: z.int().min(1).optional().describe('Line in that text, from 1.'),
   column: z.int().min(1).optional().describe('Column in characters, from 1.'),
+  current: z.unknown().optional().describe('For a conflict: what is there now.'),
   expected: z.array(z.string()).optional().describe('What could stand there.'),
   excerpt: z.string().optional().describe('The line, and under it a line with a caret at the column.'),
   errors: z

@@ -9,4 +9,4 @@ import { type Handlers, route } from './route';
 export const computeRoute = <K extends Kind>(
   kind: K,
   contract: Contract<z.ZodType<BodyOf[K]>, z.ZodType<AnswerOf[K]>>,
-): Handlers => route(contract, { serve: (body, signal) => compute(kind, body, { signal }), cost: () => 1 });
+): Handlers => route(contract, { serve: ({ body }, signal) => compute(kind, body, { signal }), cost: () => 1 });

@@ -11,29 +11,38 @@ export interface QuotaOutcome {
 }
 
 // Routes are bundled apart; what is remembered in memory about blocked addresses must be one memory.
-const held = globalThis as typeof globalThis & { quadrelQuota?: RateLimiterPostgres };
+const held = globalThis as typeof globalThis & { quadrelQuota?: Map<Counted, RateLimiterPostgres> };
 
-function limiter(points: number): RateLimiterPostgres {
-  held.quadrelQuota ??= new RateLimiterPostgres({
+/** Whose questions are counted together. */
+type Counted = 'address' | 'token';
+
+function limiter(counted: Counted, points: number): RateLimiterPostgres {
+  held.quadrelQuota ??= new Map();
+  const known = held.quadrelQuota.get(counted);
+  if (known !== undefined) return known;
+  const made = new RateLimiterPostgres({
     storeClient: database(),
     storeType: 'sequelize',
     tableName: 'rate_limits',
     tableCreated: true,
-    keyPrefix: 'compute',
+    keyPrefix: counted === 'address' ? 'compute' : 'compute-token',
     points,
     duration: 60,
     // An address that is past its quota is turned away from memory, without asking the database again.
     inMemoryBlockOnConsumed: points + 1,
   });
-  return held.quadrelQuota;
+  held.quadrelQuota.set(counted, made);
+  return made;
 }
 
 /**
- * Counts `cost` computations for an address and says whether it may have them. When the database does not answer nothing is
- * served: a limit that fails open is none.
+ * Counts `cost` computations for a token, or for an address where there is none, and says whether it may have them. When the
+ * database does not answer nothing is served: a limit that fails open is none.
  */
-export async function takeQuota(address: string, cost: number): Promise<QuotaOutcome> {
-  const points = config().COMPUTE_QUOTA_PER_MINUTE;
+export async function takeQuota(address: string, token: string | undefined, cost: number): Promise<QuotaOutcome> {
+  const counted = token === undefined ? 'address' : 'token';
+  const { COMPUTE_QUOTA_PER_MINUTE, TOKEN_QUOTA_PER_MINUTE } = config();
+  const points = counted === 'address' ? COMPUTE_QUOTA_PER_MINUTE : TOKEN_QUOTA_PER_MINUTE;
   if (points === 0) return { headers: {} };
   if (cost > points)
     return {
@@ -44,7 +53,7 @@ export async function takeQuota(address: string, cost: number): Promise<QuotaOut
       ),
     };
   try {
-    const state = await limiter(points).consume(address, cost);
+    const state = await limiter(counted, points).consume(token ?? address, cost);
     return { headers: quotaHeaders(points, state) };
   } catch (state) {
     if (!(state instanceof RateLimiterRes))
@@ -54,7 +63,7 @@ export async function takeQuota(address: string, cost: number): Promise<QuotaOut
       headers: { ...quotaHeaders(points, state), 'RateLimit-Remaining': '0', 'Retry-After': String(wait) },
       problem: problemOf(
         'quota',
-        `Too many questions from this address: ${points} a minute are free. Ask again in ${wait} ${wait === 1 ? 'second' : 'seconds'}.`,
+        `Too many questions from this ${counted}: ${points} a minute are free. Ask again in ${wait} ${wait === 1 ? 'second' : 'seconds'}.`,
       ),
     };
   }
