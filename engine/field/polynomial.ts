@@ -43,6 +43,13 @@ export function multiplyPolynomials<E>(field: Field<E>, f: Polynomial<E>, g: Pol
 export const scalePolynomial = <E>(field: Field<E>, c: E, f: Polynomial<E>): Polynomial<E> =>
   field.isZero(c) ? [] : f.map((a) => field.multiply(c, a));
 
+export function derivativePolynomial<E>(field: Field<E>, f: Polynomial<E>): Polynomial<E> {
+  return trimmed(
+    field,
+    f.slice(1).map((c, i) => field.multiply(field.fromInteger(BigInt(i + 1)), c)),
+  );
+}
+
 /** f divided by its leading coefficient; zero stays zero. */
 export function monic<E>(field: Field<E>, f: Polynomial<E>): Polynomial<E> {
   if (f.length === 0) return f;
