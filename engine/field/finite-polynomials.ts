@@ -46,19 +46,19 @@ export interface Shape<E, P> {
 }
 
 /**
- * Hands the quickest arithmetic for the field to `use`: bits over 𝔽_2, numbers over the prime fields with p < 2^31, the
+ * Hands the quickest arithmetic for the field to `work`: bits over 𝔽_2, numbers over the prime fields with p < 2^31, the
  * operations of the field otherwise. `spend` is called along long operations.
  */
 export function withFinitePolynomials<E, R>(
   field: FiniteField<E>,
   spend: () => void,
-  use: <P>(shape: Shape<E, P>) => R,
+  work: <P>(shape: Shape<E, P>) => R,
 ): R {
   if (field.order !== field.characteristic || field.order >= SMALL_PRIME_BOUND) {
-    return use({ ring: genericPolynomials(field, spend), read: (f) => f, write: (f) => f });
+    return work({ ring: genericPolynomials(field, spend), read: (f) => f, write: (f) => f });
   }
   if (field.order === 2n) {
-    return use({
+    return work({
       ring: binaryPolynomials(spend),
       read(f) {
         const bits = new Uint32Array((f.length + 31) >>> 5);
@@ -73,7 +73,7 @@ export function withFinitePolynomials<E, R>(
       },
     });
   }
-  return use({
+  return work({
     ring: smallPrimePolynomials(Number(field.order), spend),
     read: (f) => Float64Array.from(f, (c) => Number(field.index(c))),
     write: (f) => Array.from(f, (c) => field.element(BigInt(c))),
