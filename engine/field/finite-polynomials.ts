@@ -2,7 +2,7 @@ import type { FiniteField } from './field';
 import { binaryPolynomials } from './binary-polynomials';
 import { genericPolynomials } from './generic-polynomials';
 import type { Polynomial } from './polynomial';
-import { smallPrimePolynomials, SMALL_PRIME_BOUND } from './small-prime-polynomials';
+import { SmallPrimePolynomials, SMALL_PRIME_BOUND } from './small-prime-polynomials';
 
 /**
  * Arithmetic of polynomials in one variable over a finite field 𝔽_q, in the shape P that is quickest for the field. The
@@ -74,8 +74,8 @@ export function withFinitePolynomials<E, R>(
     });
   }
   return work({
-    ring: smallPrimePolynomials(Number(field.order), spend),
-    read: (f) => Float64Array.from(f, (c) => Number(field.index(c))),
-    write: (f) => Array.from(f, (c) => field.element(BigInt(c))),
+    ring: new SmallPrimePolynomials(Number(field.order), spend),
+    read: (f) => f.map((c) => Number(field.index(c))),
+    write: (f) => f.map((c) => field.element(BigInt(c))),
   });
 }

@@ -4,35 +4,38 @@ import type { FinitePolynomials } from './finite-polynomials';
 /** Primes below this have polynomials of numbers. */
 export const SMALL_PRIME_BOUND = 1n << 31n;
 
-/** Above this a factor of a product is taken in two halves, so that many products can be added before they are reduced. */
+/** Above this one factor of every product is taken in two halves, so that many products can be added before they are reduced. */
 const HALVED = 2 ** 25;
 const HALF = 65536;
 
-/** Sums stay below this; a residue may still be added to one. */
+/** Sums of products stay below this. */
 const FULL = 2 ** 53 - 2 ** 33;
 
 /** Multiplications between two calls of `spend`. */
 const STRIDE = 100_000;
 
 /** Coefficients 0 … p−1 from the constant term up, the last one not zero. */
-type Residues = Float64Array;
+type Residues = readonly number[];
 
-/** Polynomials over 𝔽_p for a prime p < 2^31, on exact numbers. */
-export const smallPrimePolynomials = (p: number, spend: () => void): FinitePolynomials<Residues> =>
-  new SmallPrimePolynomials(p, spend);
-
-class SmallPrimePolynomials implements FinitePolynomials<Residues> {
+/**
+ * Polynomials over 𝔽_p for a prime p < 2^31, on exact numbers: products are below 2^51, or below 2^47 with a half, and are
+ * added up to 2^53 in scratch space before they are reduced.
+ */
+export class SmallPrimePolynomials implements FinitePolynomials<Residues> {
   readonly order: bigint;
   readonly characteristic: bigint;
-  readonly one = Float64Array.of(1);
-  readonly x = Float64Array.of(0, 1);
+  readonly one: Residues = [1];
+  readonly x: Residues = [0, 1];
   readonly rowLimit = 1024;
-  /** Only to guess quotients; every remainder is put right and exact. */
+  /** Only guesses quotients, to one: every remainder is put right and exact. */
   private readonly reciprocal: number;
   private readonly halved: boolean;
-  /** So many products (of a half and a residue, if halved) can be added up. */
+  /** So many products can be added to a residue. */
   private readonly run: number;
   private work = 0;
+  private sums = new Float64Array(32);
+  private first = new Float64Array(32);
+  private second = new Float64Array(32);
 
   constructor(
     private readonly p: number,
@@ -41,23 +44,11 @@ class SmallPrimePolynomials implements FinitePolynomials<Residues> {
     this.order = this.characteristic = BigInt(p);
     this.reciprocal = 1 / p;
     this.halved = p > HALVED;
-    this.run = Number(BigInt(FULL) / BigInt(this.halved ? HALF * p : p * p));
+    this.run = Number(BigInt(FULL) / BigInt(this.halved ? HALF * p : p * p)) - 1;
   }
 
   degree(f: Residues): number {
     return f.length - 1;
-  }
-
-  /** The residue of an integer 0 ≤ a < 2^53 with a/p < 2^31. */
-  private reduced(a: number): number {
-    const r = a - ((a * this.reciprocal) | 0) * this.p;
-    return r < 0 ? r + this.p : r >= this.p ? r - this.p : r;
-  }
-
-  private product(a: number, b: number): number {
-    if (!this.halved) return this.reduced(a * b);
-    const low = a & (HALF - 1);
-    return this.reduced(this.reduced((a >>> 16) * b) * HALF + low * b);
   }
 
   add(f: Residues, g: Residues): Residues {
@@ -71,75 +62,43 @@ class SmallPrimePolynomials implements FinitePolynomials<Residues> {
   }
 
   subtract(f: Residues, g: Residues): Residues {
-    const difference = new Float64Array(f.length >= g.length ? f.length : g.length);
-    difference.set(f);
+    const difference = f.slice();
     for (let i = 0; i < g.length; i++) {
-      const c = difference[i]! - g[i]!;
+      const c = (i < f.length ? f[i]! : 0) - g[i]!;
       difference[i] = c < 0 ? c + this.p : c;
     }
     return trimmed(difference);
   }
 
   multiply(f: Residues, g: Residues): Residues {
-    return f.length === 0 || g.length === 0 ? new Float64Array(0) : this.low(f, g, f.length + g.length - 1);
-  }
-
-  /** The coefficients below x^size of fg; f may have zeros at the top. */
-  private low(f: Residues, g: Residues, size: number): Float64Array {
-    const sums = new Float64Array(size);
-    this.count(f.length * g.length);
-    for (let half = this.halved ? 1 : 0; half >= 0; half--) {
-      let added = 1; // what the higher half left counts as one
-      for (let i = 0; i < f.length && i < size; i++) {
-        const c = this.part(f[i]!, half);
-        if (c === 0) continue;
-        const end = g.length < size - i ? g.length : size - i;
-        for (let j = 0; j < end; j++) sums[i + j]! += c * g[j]!;
-        if (++added === this.run) {
-          this.reduceAll(sums);
-          added = 1;
-        }
-      }
-      this.reduceAll(sums);
-      if (half === 1) for (let k = 0; k < size; k++) sums[k]! *= HALF;
-    }
-    return sums;
+    if (f.length === 0 || g.length === 0) return [];
+    const size = f.length + g.length - 1;
+    this.clear(size);
+    this.load(g);
+    this.convolve(f, this.first, g.length, size);
+    return this.taken(size);
   }
 
   combine(f: Residues, rows: readonly Residues[]): Residues {
     let size = 0;
     for (let i = 0; i < f.length; i++) if (rows[i]!.length > size) size = rows[i]!.length;
-    const sums = new Float64Array(size);
-    this.count(f.length * size);
+    this.clear(size);
+    const { sums } = this;
     for (let half = this.halved ? 1 : 0; half >= 0; half--) {
-      let added = 1; // what the higher half left counts as one
+      let added = 0;
       for (let i = 0; i < f.length; i++) {
         const c = this.part(f[i]!, half);
         if (c === 0) continue;
         const row = rows[i]!;
+        this.count(row.length);
         for (let j = 0; j < row.length; j++) sums[j]! += c * row[j]!;
-        if (++added === this.run) {
-          this.reduceAll(sums);
-          added = 1;
-        }
+        if (++added < this.run) continue;
+        this.reduce(size);
+        added = 0;
       }
-      this.reduceAll(sums);
-      if (half === 1) for (let k = 0; k < size; k++) sums[k]! *= HALF;
+      if (half === 1) this.raise(size);
     }
-    return trimmed(sums);
-  }
-
-  private part(c: number, half: number): number {
-    return !this.halved ? c : half === 1 ? c >>> 16 : c & (HALF - 1);
-  }
-
-  private reduceAll(sums: Float64Array): void {
-    const { p, reciprocal } = this;
-    for (let k = 0; k < sums.length; k++) {
-      const a = sums[k]!;
-      const r = a - ((a * reciprocal) | 0) * p;
-      sums[k] = r < 0 ? r + p : r >= p ? r - p : r;
-    }
+    return this.taken(size);
   }
 
   monic(f: Residues): Residues {
@@ -151,49 +110,98 @@ class SmallPrimePolynomials implements FinitePolynomials<Residues> {
 
   divide(f: Residues, g: Residues): { readonly quotient: Residues; readonly remainder: Residues } {
     const n = g.length - 1;
-    if (f.length <= n) return { quotient: new Float64Array(0), remainder: f };
-    const rest = f.slice();
-    const quotient = new Float64Array(f.length - n);
+    if (f.length <= n) return { quotient: [], remainder: f };
+    this.clear(f.length);
+    const { sums, p } = this;
+    for (let i = 0; i < f.length; i++) sums[i] = f[i]!;
+    const below = this.load(g);
+    const quotient = new Array<number>(f.length - n);
     const lead = g[n]!;
-    const inverse = lead === 1 ? 1 : smallInverse(lead, this.p);
-    this.count(n * quotient.length);
+    const inverse = lead === 1 ? 1 : smallInverse(lead, p);
     for (let top = f.length - 1; top >= n; top--) {
-      const head = rest[top]!;
-      if (head === 0) continue;
-      const c = inverse === 1 ? head : this.product(head, inverse);
+      const head = sums[top]!;
+      const c = head === 0 || inverse === 1 ? head : this.product(head, inverse);
       quotient[top - n] = c;
-      this.subtractMultiple(rest, top - n, c, g, n);
+      if (c !== 0) this.addMultiple(sums, top - n, p - c, below, n);
     }
-    return { quotient, remainder: trimmed(rest.subarray(0, n)) };
+    const remainder: number[] = [];
+    for (let i = 0; i < n; i++) remainder.push(sums[i]! | 0);
+    return { quotient, remainder: trimmed(remainder) };
   }
 
-  /** rest −= c·x^shift·g on the coefficients below x^n of g. */
-  private subtractMultiple(rest: Float64Array, shift: number, c: number, g: Residues, n: number): void {
-    const negative = this.p - c;
+  /** target += c·x^shift·g on the coefficients below x^n of g. */
+  private addMultiple(target: Float64Array, shift: number, c: number, g: Float64Array, n: number): void {
+    this.count(n);
     if (this.halved) {
-      const high = negative >>> 16;
-      const low = negative & (HALF - 1);
+      const high = c >>> 16;
+      const low = c & (HALF - 1);
       for (let j = 0; j < n; j++)
-        rest[shift + j] = this.reduced(this.reduced(high * g[j]!) * HALF + low * g[j]! + rest[shift + j]!);
+        target[shift + j] = this.reduced(this.reduced(high * g[j]!) * HALF + low * g[j]! + target[shift + j]!);
     } else {
-      for (let j = 0; j < n; j++) rest[shift + j] = this.reduced(negative * g[j]! + rest[shift + j]!);
+      for (let j = 0; j < n; j++) target[shift + j] = this.reduced(c * g[j]! + target[shift + j]!);
     }
   }
 
+  /** The Euclidean algorithm without divisions: multiples of the remainders, where each is of degree one less, two steps at once. */
   gcd(f: Residues, g: Residues): Residues {
-    let [a, b] = f.length >= g.length ? [f, g] : [g, f];
-    while (b.length > 1) {
-      const rest = this.divide(a, b).remainder;
-      a = b;
-      b = rest;
+    const [long, short] = f.length >= g.length ? [f, g] : [g, f];
+    if (short.length === 0) return long.length === 0 ? long : this.monic(long);
+    this.clear(long.length);
+    let [a, b] = [this.load(long), this.loadSecond(short)];
+    let [m, n] = [long.length - 1, short.length - 1];
+    while (n > 0) {
+      if (m === n + 1) this.fall(a, b, n);
+      else {
+        const lead = b[n]!;
+        for (let top = m; top >= n; top--) {
+          const head = a[top]!;
+          if (head === 0) continue;
+          if (lead !== 1) for (let i = 0; i < top; i++) a[i] = this.product(a[i]!, lead);
+          this.addMultiple(a, top - n, this.p - head, b, n);
+        }
+      }
+      let r = n - 1;
+      while (r >= 0 && a[r] === 0) r--;
+      [a, b, m, n] = [b, a, n, r];
     }
-    if (b.length === 1) return this.one;
-    return a.length === 0 ? a : this.monic(a);
+    if (n === 0) return this.one;
+    const common: number[] = [];
+    for (let i = 0; i <= m; i++) common.push(a[i]! | 0);
+    return this.monic(common);
+  }
+
+  /** a ← lc(b)²·a mod b on the coefficients below x^n, for deg a = n + 1 and deg b = n. */
+  private fall(a: Float64Array, b: Float64Array, n: number): void {
+    this.count(2 * n);
+    const { p } = this;
+    const lead = b[n]!;
+    const scale = this.product(lead, lead);
+    const c1 = p - this.product(a[n + 1]!, lead);
+    const next = this.product(a[n]!, lead) - this.product(a[n + 1]!, b[n - 1]!);
+    const c0 = next > 0 ? p - next : -next;
+    if (!this.halved) {
+      let before = 0;
+      for (let j = 0; j < n; j++) {
+        const here = b[j]!;
+        a[j] = this.reduced(scale * a[j]! + c1 * before + c0 * here);
+        before = here;
+      }
+      return;
+    }
+    const [scaleHigh, c1High, c0High] = [scale >>> 16, c1 >>> 16, c0 >>> 16];
+    const [scaleLow, c1Low, c0Low] = [scale & (HALF - 1), c1 & (HALF - 1), c0 & (HALF - 1)];
+    let before = 0;
+    for (let j = 0; j < n; j++) {
+      const here = b[j]!;
+      const high = this.reduced(scaleHigh * a[j]! + c1High * before + c0High * here);
+      a[j] = this.reduced(high * HALF + scaleLow * a[j]! + c1Low * before + c0Low * here);
+      before = here;
+    }
   }
 
   derivative(f: Residues): Residues {
-    const result = new Float64Array(f.length > 0 ? f.length - 1 : 0);
-    for (let i = 1; i < f.length; i++) result[i - 1] = this.product(i % this.p, f[i]!);
+    const result: number[] = [];
+    for (let i = 1; i < f.length; i++) result.push(this.product(i % this.p, f[i]!));
     return trimmed(result);
   }
 
@@ -202,32 +210,126 @@ class SmallPrimePolynomials implements FinitePolynomials<Residues> {
   }
 
   draw(n: number, stream: () => number): Residues {
-    return trimmed(Float64Array.from({ length: n }, () => (stream() * 4294967296) % this.p));
+    return trimmed(Array.from({ length: n }, () => (stream() * 4294967296) % this.p));
   }
 
+  /** The quotient by m is read off the inverse of the reversed m as a power series, made once. */
   multiplyModulo(m: Residues): (f: Residues, g: Residues) => Residues {
+    const { p } = this;
     const n = m.length - 1;
-    // the quotient of a polynomial of degree ≤ 2n−2 by m is read off the inverse of the reversed m as a power series
-    const reversed = m.slice().reverse();
-    const inverse = new Float64Array(n - 1);
+    const inverse: number[] = [];
     for (let k = 0; k < n - 1; k++) {
       let sum = k === 0 ? 1 : 0;
-      for (let i = 1; i <= k; i++) sum += this.p - this.product(reversed[i]!, inverse[k - i]!);
-      inverse[k] = sum % this.p;
+      for (let i = 1; i <= k; i++) sum += p - this.product(m[n - i]!, inverse[k - i]!);
+      inverse.push(sum % p);
     }
-    const below = m.subarray(0, n);
+    const negative = Float64Array.from(m, (c) => p - c);
+    const quotient: number[] = [];
     return (f, g) => {
-      const whole = this.multiply(f, g);
-      const length = whole.length - n;
-      if (length <= 0) return whole;
-      const quotient = this.low(whole.slice(n).reverse(), inverse, length).reverse();
-      const multiple = this.low(quotient, below, n);
-      for (let k = 0; k < n; k++) {
-        const c = whole[k]! - multiple[k]!;
-        multiple[k] = c < 0 ? c + this.p : c;
-      }
-      return trimmed(multiple);
+      const size = f.length + g.length - 1;
+      if (size <= n) return this.multiply(f, g);
+      this.clear(size);
+      this.load(g);
+      this.convolve(f, this.first, g.length, size);
+      this.reduce(size);
+      const { first, sums } = this;
+      for (let i = 0; i < size; i++) first[i] = sums[i]!;
+      const above = size - n;
+      this.clear(above);
+      this.convolve(inverse, first.subarray(n), above, above, -1);
+      this.reduce(above);
+      for (let i = 0; i < above; i++) quotient[i] = sums[i]! | 0;
+      quotient.length = above;
+      this.clear(n);
+      this.convolve(quotient, negative, n, n);
+      for (let i = 0; i < n; i++) sums[i]! += first[i]!;
+      return this.taken(n);
     };
+  }
+
+  /**
+   * sums[i + j] += f[i]·g[j] below `size`, of residues that were there before nothing is left out; with direction −1
+   * sums[j − i] instead, from 0 up. What is left may still have to be reduced.
+   */
+  private convolve(f: Residues, g: Float64Array, length: number, size: number, direction: 1 | -1 = 1): void {
+    const { sums } = this;
+    for (let half = this.halved ? 1 : 0; half >= 0; half--) {
+      let added = 0;
+      for (let i = 0; i < f.length && i < size; i++) {
+        const c = this.part(f[i]!, half);
+        if (c === 0) continue;
+        if (direction === 1) {
+          const end = length < size - i ? length : size - i;
+          for (let j = 0; j < end; j++) sums[i + j]! += c * g[j]!;
+        } else {
+          for (let j = i; j < length; j++) sums[j - i]! += c * g[j]!;
+        }
+        this.count(length);
+        if (++added < this.run) continue;
+        this.reduce(size);
+        added = 0;
+      }
+      if (half === 1) this.raise(size);
+    }
+  }
+
+  private part(c: number, half: number): number {
+    return !this.halved ? c : half === 1 ? c >>> 16 : c & (HALF - 1);
+  }
+
+  /** The residue of an integer 0 ≤ a < 2^53 with a/p < 2^31. */
+  private reduced(a: number): number {
+    const r = a - ((a * this.reciprocal) | 0) * this.p;
+    return r < 0 ? r + this.p : r >= this.p ? r - this.p : r;
+  }
+
+  private product(a: number, b: number): number {
+    if (!this.halved) return this.reduced(a * b) | 0;
+    return this.reduced(this.reduced((a >>> 16) * b) * HALF + (a & (HALF - 1)) * b) | 0;
+  }
+
+  private reduce(size: number): void {
+    const { sums, p, reciprocal } = this;
+    for (let k = 0; k < size; k++) {
+      const a = sums[k]!;
+      const r = a - ((a * reciprocal) | 0) * p;
+      sums[k] = r < 0 ? r + p : r >= p ? r - p : r;
+    }
+  }
+
+  /** The sums of the higher halves take their place above the lower ones. */
+  private raise(size: number): void {
+    this.reduce(size);
+    for (let k = 0; k < size; k++) this.sums[k]! *= HALF;
+  }
+
+  private taken(size: number): Residues {
+    this.reduce(size);
+    let n = size;
+    while (n > 0 && this.sums[n - 1] === 0) n--;
+    const result: number[] = [];
+    for (let k = 0; k < n; k++) result.push(this.sums[k]! | 0);
+    return result;
+  }
+
+  private clear(size: number): void {
+    if (this.sums.length < size) {
+      this.sums = new Float64Array(2 * size);
+      this.first = new Float64Array(2 * size);
+      this.second = new Float64Array(2 * size);
+    } else this.sums.fill(0, 0, size);
+  }
+
+  private load(f: Residues): Float64Array {
+    const { first } = this;
+    for (let i = 0; i < f.length; i++) first[i] = f[i]!;
+    return first;
+  }
+
+  private loadSecond(f: Residues): Float64Array {
+    const { second } = this;
+    for (let i = 0; i < f.length; i++) second[i] = f[i]!;
+    return second;
   }
 
   private count(products: number): void {
@@ -238,8 +340,7 @@ class SmallPrimePolynomials implements FinitePolynomials<Residues> {
   }
 }
 
-function trimmed(f: Float64Array): Residues {
-  let n = f.length;
-  while (n > 0 && f[n - 1] === 0) n--;
-  return n === f.length ? f : f.slice(0, n);
+function trimmed(f: number[]): Residues {
+  while (f.length > 0 && f[f.length - 1] === 0) f.pop();
+  return f;
 }
