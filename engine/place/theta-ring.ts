@@ -1,19 +1,23 @@
-import { isOddInt, moduloFour, xorInt, type Int } from '../arith/int';
-import type { GradedRing } from '../ring/graded-ring';
+import { isOddInt, type Int } from '../arith/int';
 import { residueClassRing, type ClassedUnit, type ResidueClass, type UnitGroup } from '../ring/residue-class-ring';
+import type { ResidueRing } from '../ring/residue-ring';
 
-/** An entry as a place sees it: a = πⁿu, with the reduction of the unit u. */
-export interface LocalEntry<E> extends ClassedUnit<E> {
+/** An entry as a place sees it: a = πⁿu. */
+export interface Valued {
   readonly valuation: Int;
 }
 
+/** An entry as a place with finite residue field sees it: a = πⁿu, with the reduction of the unit u. */
+export interface LocalEntry<E> extends ClassedUnit<E>, Valued {}
+
 /** Specialisation s (degree n) and residue ∂ (degree n − 1) of a class of degree n; at least one is not zero. */
-export interface Theta<E> {
-  readonly s: ResidueClass<E> | undefined;
-  readonly d: ResidueClass<E> | undefined;
+export interface ThetaPair<H> {
+  readonly s: H | undefined;
+  readonly d: H | undefined;
 }
 
-type Part<E> = ResidueClass<E> | undefined;
+/** `ThetaPair` over a finite residue field. */
+export type Theta<E> = ThetaPair<ResidueClass<E>>;
 
 /**
  * An entry remembers how it looked at the place visited last: places are visited one after the other, and a table at every
@@ -34,43 +38,59 @@ export interface Visited {
 export function thetaRing<A extends Visited, E>(
   units: UnitGroup<E>,
   local: (entry: A) => LocalEntry<E>,
-): GradedRing<A, Theta<E>> {
-  return new ThetaRing(units, local);
+): ResidueRing<A, Theta<E>> {
+  return new ThetaRing<A, LocalEntry<E>, ResidueClass<E>>(residueClassRing(units), local);
 }
 
-/** The unit of every Θ-ring: most words have no coefficient and start with it. */
-const one: Theta<never> = { s: { rank: 1, squareClass: 0, unit: undefined }, d: undefined };
+/**
+ * The Θ-ring over any ring to which K^MW_*(κ) maps: a residue is followed by that map without being written out. `B` is a unit
+ * of κ together with the valuation of the entry it is the unit part of.
+ */
+export function thetaRingOver<A extends Visited, B extends Valued, H>(
+  kappa: ResidueRing<B, H>,
+  local: (entry: A) => B,
+): ResidueRing<A, ThetaPair<H>> {
+  return new ThetaRing(kappa, local);
+}
 
 /** A class rather than closures: one is made for every place in sight. */
-class ThetaRing<A extends Visited, E> implements GradedRing<A, Theta<E>> {
-  private readonly kappa: GradedRing<ClassedUnit<E>, ResidueClass<E>>;
+class ThetaRing<A extends Visited, B extends Valued, H> implements ResidueRing<A, ThetaPair<H>> {
+  /** Most words have no coefficient and start with it. */
+  private one: ThetaPair<H> | undefined;
 
   constructor(
-    private readonly units: UnitGroup<E>,
-    private readonly local: (entry: A) => LocalEntry<E>,
-  ) {
-    this.kappa = residueClassRing(units);
+    private readonly kappa: ResidueRing<B, H>,
+    private readonly local: (entry: A) => B,
+  ) {}
+
+  get minusOne(): ThetaPair<H> | undefined {
+    return pair(this.kappa.minusOne, undefined);
   }
 
-  integer(n: Int): Theta<E> | undefined {
-    return n === 1 ? one : pair(this.kappa.integer(n), undefined);
+  get epsilon(): ThetaPair<H> | undefined {
+    return pair(this.kappa.epsilon, undefined);
   }
 
-  eta(power: number): Theta<E> | undefined {
+  integer(n: Int): ThetaPair<H> | undefined {
+    if (n === 1) return (this.one ??= pair(this.kappa.integer(1), undefined));
+    return pair(this.kappa.integer(n), undefined);
+  }
+
+  eta(power: number): ThetaPair<H> | undefined {
     return pair(this.kappa.eta(power), undefined);
   }
 
-  symbol(entry: A): Theta<E> | undefined {
+  symbol(entry: A): ThetaPair<H> | undefined {
     this.visit(entry);
     if (entry.symbolThere === undefined) {
       const at = this.local(entry);
-      entry.symbolThere =
-        pair(this.kappa.symbol(at), at.valuation === 0 ? undefined : this.epsilonMultiple(at)) ?? null;
+      const n = at.valuation;
+      entry.symbolThere = pair(this.kappa.symbol(at), n === 0 ? undefined : this.kappa.epsilonMultiple(n, at)) ?? null;
     }
-    return (entry.symbolThere as Theta<E> | null) ?? undefined;
+    return (entry.symbolThere as ThetaPair<H> | null) ?? undefined;
   }
 
-  angle(entry: A): Theta<E> | undefined {
+  angle(entry: A): ThetaPair<H> | undefined {
     this.visit(entry);
     if (entry.angleThere === undefined) {
       // ⟨πⁿu⟩ = 1 + η[πⁿu]: s is ⟨ū⟩, and η·n_ε⟨ū⟩ is η⟨ū⟩ for n odd, 0 for n even
@@ -79,7 +99,14 @@ class ThetaRing<A extends Visited, E> implements GradedRing<A, Theta<E>> {
       entry.angleThere =
         pair(form, isOddInt(at.valuation) ? this.times(-1, this.kappa.eta(1), 0, form) : undefined) ?? null;
     }
-    return (entry.angleThere as Theta<E> | null) ?? undefined;
+    return (entry.angleThere as ThetaPair<H> | null) ?? undefined;
+  }
+
+  epsilonMultiple(n: Int, entry?: A): ThetaPair<H> | undefined {
+    const form = pair(this.kappa.epsilonMultiple(n), undefined);
+    const angle = entry && this.angle(entry);
+    if (entry === undefined) return form;
+    return form === undefined || angle === undefined ? undefined : this.multiply(0, form, 0, angle);
   }
 
   private visit(entry: A): void {
@@ -89,57 +116,43 @@ class ThetaRing<A extends Visited, E> implements GradedRing<A, Theta<E>> {
     entry.angleThere = undefined;
   }
 
-  add(degree: number, x: Theta<E>, y: Theta<E>): Theta<E> | undefined {
+  add(degree: number, x: ThetaPair<H>, y: ThetaPair<H>): ThetaPair<H> | undefined {
     return pair(this.plus(degree, x.s, y.s), this.plus(degree - 1, x.d, y.d));
   }
 
-  negate(degree: number, x: Theta<E>): Theta<E> | undefined {
+  negate(degree: number, x: ThetaPair<H>): ThetaPair<H> | undefined {
     return pair(x.s && this.kappa.negate(degree, x.s), x.d && this.kappa.negate(degree - 1, x.d));
   }
 
   /** (s + ξd)(s′ + ξd′) = ss′ + ξ(ds′ + εᵐsd′ + [−1]dd′), m the degree of the left factor. */
-  multiply(m: number, x: Theta<E>, n: number, y: Theta<E>): Theta<E> | undefined {
-    if (x === one) return y;
+  multiply(m: number, x: ThetaPair<H>, n: number, y: ThetaPair<H>): ThetaPair<H> | undefined {
+    if (x === this.one) return y;
     const s = this.times(m, x.s, n, y.s);
     const left = this.times(m - 1, x.d, n, y.s);
     if (y.d === undefined) return pair(s, left);
     const degree = m + n - 1;
     const straight = this.times(m, x.s, n - 1, y.d);
-    const right = m % 2 === 0 ? straight : this.times(0, this.epsilon(), degree, straight);
-    const both = x.d && this.times(1, this.minusOne(), degree - 1, this.times(m - 1, x.d, n - 1, y.d));
+    const right = m % 2 === 0 ? straight : this.times(0, this.kappa.epsilon, degree, straight);
+    const both = x.d && this.times(1, this.kappa.minusOne, degree - 1, this.times(m - 1, x.d, n - 1, y.d));
     return pair(s, this.plus(degree, this.plus(degree, left, right), both));
   }
 
-  equal(degree: number, x: Theta<E>, y: Theta<E>): boolean {
+  equal(degree: number, x: ThetaPair<H>, y: ThetaPair<H>): boolean {
     return this.same(degree, x.s, y.s) && this.same(degree - 1, x.d, y.d);
   }
 
-  private plus(degree: number, x: Part<E>, y: Part<E>): Part<E> {
+  private plus(degree: number, x: H | undefined, y: H | undefined): H | undefined {
     return x === undefined ? y : y === undefined ? x : this.kappa.add(degree, x, y);
   }
 
-  private times(m: number, x: Part<E>, n: number, y: Part<E>): Part<E> {
+  private times(m: number, x: H | undefined, n: number, y: H | undefined): H | undefined {
     return x === undefined || y === undefined ? undefined : this.kappa.multiply(m, x, n, y);
   }
 
-  private same(degree: number, x: Part<E>, y: Part<E>): boolean {
+  private same(degree: number, x: H | undefined, y: H | undefined): boolean {
     return x === undefined || y === undefined ? x === y : this.kappa.equal(degree, x, y);
-  }
-
-  private minusOne(): Part<E> {
-    return this.kappa.symbol({ unit: this.units.minusOne, squareClass: this.units.classOfMinusOne });
-  }
-
-  private epsilon(): Part<E> {
-    return { rank: -1, squareClass: this.units.classOfMinusOne, unit: undefined };
-  }
-
-  /** n_ε⟨ū⟩: n_ε is ⟨1⟩ + ⟨−1⟩ + … with |n| summands, times −⟨−1⟩ for n < 0; the number of signs is odd iff n is 2 or 3 modulo 4. */
-  private epsilonMultiple({ valuation: n, squareClass }: LocalEntry<E>): ResidueClass<E> {
-    const sign = moduloFour(n) > 1 ? this.units.classOfMinusOne : 0;
-    return { rank: n, squareClass: isOddInt(n) ? xorInt(sign, squareClass) : sign, unit: undefined };
   }
 }
 
-const pair = <E>(s: Part<E>, d: Part<E>): Theta<E> | undefined =>
+const pair = <H>(s: H | undefined, d: H | undefined): ThetaPair<H> | undefined =>
   s === undefined && d === undefined ? undefined : { s, d };

@@ -1,6 +1,6 @@
 import { addInt, isOddInt, moduloFour, multiplyInt, negateInt, xorInt, type Int } from '../arith/int';
 import { boundedCoefficient } from './limits';
-import type { GradedRing } from './graded-ring';
+import type { ResidueRing } from './residue-ring';
 
 /**
  * What K^MW of a finite field needs to know of its units: the group, the square class of each unit as a bit mask (multiplied
@@ -45,13 +45,21 @@ export interface ResidueClass<E> {
  * Canonical form in degree < 0: rank in {0, 1} if −1 is a square; else rank in {0, 1, 2, 3} and trivial square class
  * (W(𝔽_q) = ℤ/4 by multiples of ⟨1⟩); if the order is not known modulo 4, the rank is kept as it is.
  */
-export function residueClassRing<E>(units: UnitGroup<E>): GradedRing<ClassedUnit<E>, ResidueClass<E>> {
+export function residueClassRing<E>(units: UnitGroup<E>): ResidueRing<ClassedUnit<E>, ResidueClass<E>> {
   return new ResidueClassRing(units);
 }
 
 /** A class rather than closures: one is made for every place in sight. */
-class ResidueClassRing<E> implements GradedRing<ClassedUnit<E>, ResidueClass<E>> {
+class ResidueClassRing<E> implements ResidueRing<ClassedUnit<E>, ResidueClass<E>> {
   constructor(private readonly units: UnitGroup<E>) {}
+
+  get minusOne(): ResidueClass<E> | undefined {
+    return this.symbolOf(this.units.minusOne, this.units.classOfMinusOne);
+  }
+
+  get epsilon(): ResidueClass<E> {
+    return { rank: -1, squareClass: this.units.classOfMinusOne, unit: undefined };
+  }
 
   integer(n: Int): ResidueClass<E> | undefined {
     return this.form(0, n, 0);
@@ -87,6 +95,13 @@ class ResidueClassRing<E> implements GradedRing<ClassedUnit<E>, ResidueClass<E>>
     if (y.unit !== undefined) return this.act(m, x, y.unit, y.squareClass);
     const squareClass = xorInt(ifOdd(x.rank, y.squareClass), ifOdd(y.rank, x.squareClass));
     return this.form(m + n, boundedCoefficient(multiplyInt(x.rank, y.rank)), squareClass);
+  }
+
+  /** The number of signs among the |n| summands of n_ε is odd iff n is 2 or 3 modulo 4. */
+  epsilonMultiple(n: Int, a?: ClassedUnit<E>): ResidueClass<E> | undefined {
+    const sign = moduloFour(n) > 1 ? this.units.classOfMinusOne : 0;
+    const squareClass = a !== undefined && isOddInt(n) ? xorInt(sign, a.squareClass) : sign;
+    return n === 0 ? undefined : { rank: n, squareClass, unit: undefined };
   }
 
   equal(_degree: number, x: ResidueClass<E>, y: ResidueClass<E>): boolean {

@@ -17,7 +17,10 @@ export interface Monomial {
 export type Words = ReadonlyMap<bigint, SignClass>;
 
 /** More words than this are not kept. */
-const WORD_LIMIT = 5_000;
+export const WORD_LIMIT = 5_000;
+
+export const wordsRefusal = (): Refusal =>
+  new Refusal('size', 'The canonical form has more than 5 000 words. Use entries with fewer letters.');
 
 /**
  * Canonical words in ±monomials of letters: equal elements have the same words, over every field at once. When the letters are
@@ -39,8 +42,7 @@ export function wordRing(char: CharacteristicClass, budget: Budget): GradedRing<
     const reduced = reduceSign(char, degree - countBits(mask), sum);
     if (reduced === undefined) words.delete(mask);
     else words.set(mask, reduced);
-    if (words.size > WORD_LIMIT)
-      throw new Refusal('size', 'The canonical form has more than 5 000 words. Use entries with fewer letters.');
+    if (words.size > WORD_LIMIT) throw wordsRefusal();
   };
   const nonZero = (words: Words): Words | undefined => (words.size === 0 ? undefined : words);
 
@@ -117,7 +119,7 @@ export function lettersOf(mask: bigint): readonly number[] {
 export const countBits = (mask: bigint): number => (mask === 0n ? 0 : lettersOf(mask).length);
 
 /** How many pairs (i in s, j in t) have i > j: the transpositions that sort [p_s][p_t]. */
-function inversions(s: bigint, t: bigint): number {
+export function inversions(s: bigint, t: bigint): number {
   let count = 0;
   for (const j of lettersOf(t)) count += countBits(s >> BigInt(j + 1));
   return count;
