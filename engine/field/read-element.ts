@@ -34,7 +34,15 @@ export function elementReader<E>(field: Field<E>, budget: Budget): (element: Ele
     budget.spend('reading an entry');
     if (parts.length === 1) return value(parts[0]!);
     const middle = parts.length >> 1;
-    return guarded(join(folded(parts.slice(0, middle), join, at), folded(parts.slice(middle), join, at)), at);
+    const [left, right] = [folded(parts.slice(0, middle), join, at), folded(parts.slice(middle), join, at)];
+    try {
+      return guarded(join(left, right), at);
+    } catch (error) {
+      // a field refuses what is too large without knowing where it is written
+      if (error instanceof Refusal && error.code === 'size' && error.at === undefined && at !== undefined)
+        throw new Refusal(error.code, error.message, at);
+      throw error;
+    }
   };
   const value = (e: Element): E => {
     switch (e.kind) {

@@ -14,6 +14,11 @@ const FULL = 2 ** 53 - 2 ** 33;
 /** Multiplications between two calls of `spend`. */
 const STRIDE = 100_000;
 
+/** Scratch space for all: nothing stays in it from one operation to the next. */
+let sums = new Float64Array(256);
+let first = new Float64Array(256);
+let second = new Float64Array(256);
+
 /** Coefficients 0 … p−1 from the constant term up, the last one not zero. */
 type Residues = readonly number[];
 
@@ -33,9 +38,6 @@ export class SmallPrimePolynomials implements FinitePolynomials<Residues> {
   /** So many products can be added to a residue. */
   private readonly run: number;
   private work = 0;
-  private sums = new Float64Array(32);
-  private first = new Float64Array(32);
-  private second = new Float64Array(32);
 
   constructor(
     private readonly p: number,
@@ -75,7 +77,7 @@ export class SmallPrimePolynomials implements FinitePolynomials<Residues> {
     const size = f.length + g.length - 1;
     this.clear(size);
     this.load(g);
-    this.convolve(f, this.first, g.length, size);
+    this.convolve(f, first, g.length, size);
     return this.taken(size);
   }
 
@@ -83,7 +85,6 @@ export class SmallPrimePolynomials implements FinitePolynomials<Residues> {
     let size = 0;
     for (let i = 0; i < f.length; i++) if (rows[i]!.length > size) size = rows[i]!.length;
     this.clear(size);
-    const { sums } = this;
     for (let half = this.halved ? 1 : 0; half >= 0; half--) {
       let added = 0;
       for (let i = 0; i < f.length; i++) {
@@ -112,7 +113,7 @@ export class SmallPrimePolynomials implements FinitePolynomials<Residues> {
     const n = g.length - 1;
     if (f.length <= n) return { quotient: [], remainder: f };
     this.clear(f.length);
-    const { sums, p } = this;
+    const { p } = this;
     for (let i = 0; i < f.length; i++) sums[i] = f[i]!;
     const below = this.load(g);
     const quotient = new Array<number>(f.length - n);
@@ -223,53 +224,65 @@ export class SmallPrimePolynomials implements FinitePolynomials<Residues> {
       for (let i = 1; i <= k; i++) sum += p - this.product(m[n - i]!, inverse[k - i]!);
       inverse.push(sum % p);
     }
-    const negative = Float64Array.from(m, (c) => p - c);
+    const negative = m.map((c) => p - c);
     const quotient: number[] = [];
     return (f, g) => {
       const size = f.length + g.length - 1;
       if (size <= n) return this.multiply(f, g);
       this.clear(size);
       this.load(g);
-      this.convolve(f, this.first, g.length, size);
+      this.convolve(f, first, g.length, size);
       this.reduce(size);
-      const { first, sums } = this;
       for (let i = 0; i < size; i++) first[i] = sums[i]!;
       const above = size - n;
       this.clear(above);
-      this.convolve(inverse, first.subarray(n), above, above, -1);
+      this.convolveDown(inverse, n, above);
       this.reduce(above);
       for (let i = 0; i < above; i++) quotient[i] = sums[i]! | 0;
       quotient.length = above;
       this.clear(n);
-      this.convolve(quotient, negative, n, n);
+      this.loadSecond(negative);
+      this.convolve(quotient, second, n, n);
       for (let i = 0; i < n; i++) sums[i]! += first[i]!;
       return this.taken(n);
     };
   }
 
-  /**
-   * sums[i + j] += f[i]·g[j] below `size`, of residues that were there before nothing is left out; with direction −1
-   * sums[j − i] instead, from 0 up. What is left may still have to be reduced.
-   */
-  private convolve(f: Residues, g: Float64Array, length: number, size: number, direction: 1 | -1 = 1): void {
-    const { sums } = this;
+  /** sums[i + j] += f[i]·g[j] below `size`, where residues stand. The sums have still to be reduced. */
+  private convolve(f: Residues, g: Float64Array, length: number, size: number): void {
+    const target = sums;
     for (let half = this.halved ? 1 : 0; half >= 0; half--) {
       let added = 0;
       for (let i = 0; i < f.length && i < size; i++) {
         const c = this.part(f[i]!, half);
         if (c === 0) continue;
-        if (direction === 1) {
-          const end = length < size - i ? length : size - i;
-          for (let j = 0; j < end; j++) sums[i + j]! += c * g[j]!;
-        } else {
-          for (let j = i; j < length; j++) sums[j - i]! += c * g[j]!;
-        }
-        this.count(length);
+        const end = length < size - i ? length : size - i;
+        for (let j = 0; j < end; j++) target[i + j]! += c * g[j]!;
+        this.count(end);
         if (++added < this.run) continue;
         this.reduce(size);
         added = 0;
       }
       if (half === 1) this.raise(size);
+    }
+  }
+
+  /** sums[j − i] += f[i]·first[shift + j] from 0 up, for j < length. */
+  private convolveDown(f: Residues, shift: number, length: number): void {
+    const target = sums;
+    const g = first;
+    for (let half = this.halved ? 1 : 0; half >= 0; half--) {
+      let added = 0;
+      for (let i = 0; i < f.length && i < length; i++) {
+        const c = this.part(f[i]!, half);
+        if (c === 0) continue;
+        for (let j = i; j < length; j++) target[j - i]! += c * g[shift + j]!;
+        this.count(length - i);
+        if (++added < this.run) continue;
+        this.reduce(length);
+        added = 0;
+      }
+      if (half === 1) this.raise(length);
     }
   }
 
@@ -289,7 +302,7 @@ export class SmallPrimePolynomials implements FinitePolynomials<Residues> {
   }
 
   private reduce(size: number): void {
-    const { sums, p, reciprocal } = this;
+    const { p, reciprocal } = this;
     for (let k = 0; k < size; k++) {
       const a = sums[k]!;
       const r = a - ((a * reciprocal) | 0) * p;
@@ -300,34 +313,32 @@ export class SmallPrimePolynomials implements FinitePolynomials<Residues> {
   /** The sums of the higher halves take their place above the lower ones. */
   private raise(size: number): void {
     this.reduce(size);
-    for (let k = 0; k < size; k++) this.sums[k]! *= HALF;
+    for (let k = 0; k < size; k++) sums[k]! *= HALF;
   }
 
   private taken(size: number): Residues {
     this.reduce(size);
     let n = size;
-    while (n > 0 && this.sums[n - 1] === 0) n--;
+    while (n > 0 && sums[n - 1] === 0) n--;
     const result: number[] = [];
-    for (let k = 0; k < n; k++) result.push(this.sums[k]! | 0);
+    for (let k = 0; k < n; k++) result.push(sums[k]! | 0);
     return result;
   }
 
   private clear(size: number): void {
-    if (this.sums.length < size) {
-      this.sums = new Float64Array(2 * size);
-      this.first = new Float64Array(2 * size);
-      this.second = new Float64Array(2 * size);
-    } else this.sums.fill(0, 0, size);
+    if (sums.length < size) {
+      sums = new Float64Array(2 * size);
+      first = new Float64Array(2 * size);
+      second = new Float64Array(2 * size);
+    } else sums.fill(0, 0, size);
   }
 
   private load(f: Residues): Float64Array {
-    const { first } = this;
     for (let i = 0; i < f.length; i++) first[i] = f[i]!;
     return first;
   }
 
   private loadSecond(f: Residues): Float64Array {
-    const { second } = this;
     for (let i = 0; i < f.length; i++) second[i] = f[i]!;
     return second;
   }

@@ -1,6 +1,7 @@
 import {
   integerElement,
   letterElement,
+  negateElement,
   powerElement,
   productElement,
   sumElement,
@@ -11,7 +12,8 @@ import type { Polynomial } from './polynomial';
 
 /**
  * A polynomial as it is written: a sum from the highest power down, a coefficient in front of its power, coefficients 1 and
- * terms 0 left out. The constant term's own summands stand in the same sum: `y^2+z+1`, `(2*z+1)*y+2`, `2*z*y`.
+ * terms 0 left out. The constant term's own summands stand in the same sum: `y^2+z+1`, `(2*z+1)*y+2`, `2*z*y`. The sign of a
+ * coefficient stands before its term: `t^2-t-1/2`.
  */
 export function writePolynomial<E>(field: Field<E>, f: Polynomial<E>, letter: string): Element {
   const terms: Element[] = [];
@@ -23,9 +25,12 @@ export function writePolynomial<E>(field: Field<E>, f: Polynomial<E>, letter: st
       terms.push(...(coefficient.kind === 'sum' ? coefficient.terms : [coefficient]));
       continue;
     }
+    const negative = coefficient.kind === 'negate';
+    const size = negative ? coefficient.of : coefficient;
     const power = i === 1 ? letterElement(letter) : powerElement(letterElement(letter), i);
-    if (field.equal(c, field.one)) terms.push(power);
-    else terms.push(productElement([...(coefficient.kind === 'product' ? coefficient.factors : [coefficient]), power]));
+    const isOne = size.kind === 'integer' && size.value === 1n;
+    const term = isOne ? power : productElement([...(size.kind === 'product' ? size.factors : [size]), power]);
+    terms.push(negative ? negateElement(term) : term);
   }
   return terms.length === 0 ? integerElement(0n) : terms.length === 1 ? terms[0]! : sumElement(terms);
 }
