@@ -40,11 +40,7 @@ export function normalized(ring: LetterRing, f: MultiPolynomial): Normalized {
 }
 
 /** f / g where g ≠ 0 divides f; `undefined` where it does not. By first terms. */
-export function exactQuotient(
-  ring: LetterRing,
-  f: MultiPolynomial,
-  g: MultiPolynomial,
-): MultiPolynomial | undefined {
+export function exactQuotient(ring: LetterRing, f: MultiPolynomial, g: MultiPolynomial): MultiPolynomial | undefined {
   const divisor = g[0];
   if (divisor === undefined) throw new RangeError('division by the zero polynomial');
   const quotient: MultiTerm[] = [];

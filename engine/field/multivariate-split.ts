@@ -1,11 +1,4 @@
-import {
-  derivativeIn,
-  degreeIn,
-  isConstant,
-  lettersIn,
-  type LetterRing,
-  type MultiPolynomial,
-} from './multivariate';
+import { derivativeIn, degreeIn, isConstant, lettersIn, type LetterRing, type MultiPolynomial } from './multivariate';
 import { coprimeBaseMulti } from './multivariate-base';
 import { exactQuotient } from './multivariate-division';
 import { contentIn, gcdMulti } from './multivariate-gcd';

@@ -53,8 +53,7 @@ export function readLetterFunction(
   };
   const inverse = (e: Element, at: Span | undefined): LetterFunction => {
     const value = read(e);
-    if (isZeroFunction(value))
-      throw new Refusal('division-by-zero', 'The denominator is 0. Change it to a unit.', at);
+    if (isZeroFunction(value)) throw new Refusal('division-by-zero', 'The denominator is 0. Change it to a unit.', at);
     return powerFunction(ring, value, -1n, at);
   };
   return read(element);

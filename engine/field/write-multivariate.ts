@@ -18,7 +18,11 @@ export function writeMultivariate(ring: LetterRing, f: MultiPolynomial): Element
   const degree = ({ exponents }: MultiTerm): number => exponents.reduce((sum, e) => sum + e, 0);
   const terms = constant ? [...f].sort((a, b) => degree(a) - degree(b)) : f;
   const written = terms.map((term) => writeTerm(ring, term));
-  return written.length === 0 ? integerElement(0n) : written.length === 1 && written[0] ? written[0] : sumElement(written);
+  return written.length === 0
+    ? integerElement(0n)
+    : written.length === 1 && written[0]
+      ? written[0]
+      : sumElement(written);
 }
 
 function writeTerm(ring: LetterRing, { exponents, coefficient }: MultiTerm): Element {
