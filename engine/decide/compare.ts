@@ -2,9 +2,9 @@ import type { Budget } from '../arith/budget';
 import type { Expression } from '../expression/expression';
 import type { Condition } from '../expression/statement';
 import { expressionText } from '../expression/to-text';
-import type { DecidableField } from './decidable-field';
+import type { DecidableField, Search } from './decidable-field';
 import type { Finding } from './finding';
-import type { Compared, CompareOutcome, ComparedDegree, MapName, Separating, Verdict } from './outcome';
+import type { Compared, CompareOutcome, ComparedDegree, Evidence, MapName, Separating, Verdict } from './outcome';
 
 /**
  * Decides left = right in K^MW_*(F) by homomorphisms, degree by degree, never by expansion.
@@ -20,8 +20,8 @@ export function compare(
   conditions: readonly Condition[],
   budget: Budget,
 ): CompareOutcome {
-  const { findings, theorem } = field.decide(left, right, conditions, budget);
-  const byDegree = new Map<number, Finding[]>();
+  const { findings, theorem, search } = field.decide(left, right, conditions, budget);
+  const byDegree = new Map<number, Finding[]>([...(search?.verdicts.keys() ?? [])].map((degree) => [degree, []]));
   for (const finding of findings) {
     const here = byDegree.get(finding.degree);
     if (here === undefined) byDegree.set(finding.degree, [finding]);
@@ -29,24 +29,47 @@ export function compare(
   }
   const parts = [...byDegree]
     .sort(([a], [b]) => b - a)
-    .map(([degree, here]): ComparedDegree => ({ degree, verdict: verdictOf(here), compared: here.map(compared) }));
+    .map(([degree, here]): ComparedDegree => ({
+      degree,
+      verdict: search?.verdicts.get(degree) ?? verdictOf(here),
+      compared: here.map(compared),
+    }));
   const separating = firstDifference(findings);
   return {
-    verdict: verdictOf(findings),
+    verdict: overall(parts),
     parts,
     sideConditions: field.sideConditions([left, right], conditions, budget),
     evidence: {
-      kind: 'invariants',
+      kind: search?.counterexample === undefined ? 'invariants' : 'counterexample',
       ...(separating && { separating: describe(separating) }),
       theorem,
-      modEta: findings.every((finding) => finding.sameModEta),
-      modH: findings.every((finding) => finding.sameModH),
+      ...(search === undefined ? quotients(findings) : searched(search)),
     },
   };
 }
 
 const verdictOf = (findings: readonly Finding[]): Verdict =>
   findings.every((finding) => finding.same) ? 'equal' : 'different';
+
+const overall = (parts: readonly ComparedDegree[]): Verdict =>
+  parts.some(({ verdict }) => verdict === 'different')
+    ? 'different'
+    : parts.some(({ verdict }) => verdict === 'undecided')
+      ? 'undecided'
+      : 'equal';
+
+const quotients = (findings: readonly Finding[]): Pick<Evidence, 'modEta' | 'modH'> => ({
+  modEta: findings.every((finding) => finding.sameModEta),
+  modH: findings.every((finding) => finding.sameModH),
+});
+
+const searched = ({ modEta, modH, counterexample, relations, tried }: Search): Partial<Evidence> => ({
+  ...(modEta !== undefined && { modEta }),
+  ...(modH !== undefined && { modH }),
+  ...(counterexample && { counterexample }),
+  ...(relations && { relations }),
+  tried,
+});
 
 function compared(finding: Finding): Compared {
   const left = finding.left();

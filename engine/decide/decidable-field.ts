@@ -4,12 +4,24 @@ import type { Expression } from '../expression/expression';
 import type { Condition } from '../expression/statement';
 import type { DerivationStep } from '../derive/rule';
 import type { Finding } from './finding';
-import type { NormalizedDegree, ResiduesOutcome } from './outcome';
+import type { Counterexample, NormalizedDegree, ResiduesOutcome, SteinbergRelation, Tried, Verdict } from './outcome';
 
 /** What was compared, map by map, and why that is complete: theorem and source. */
 export interface Decision {
   readonly findings: readonly Finding[];
   readonly theorem: string;
+  /** Where maps alone do not decide: what searches for a proof and for a counterexample came to. */
+  readonly search?: Search;
+}
+
+/** The outcome of searches; it says for every degree what is known, and findings are then only what there is to show. */
+export interface Search {
+  readonly verdicts: ReadonlyMap<number, Verdict>;
+  readonly modEta: boolean | undefined;
+  readonly modH: boolean | undefined;
+  readonly counterexample?: Counterexample;
+  readonly relations?: readonly SteinbergRelation[];
+  readonly tried: Tried;
 }
 
 /** What a field offers to whoever decides over it: generic code asks only this. */

@@ -1,106 +1,104 @@
 import type { Budget } from '../arith/budget';
-import { integerElement, type Element } from '../expression/element';
+import type { Element } from '../expression/element';
+import { integerElement } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import { mapEntries } from '../expression/map-entries';
-import { Refusal } from '../expression/refusal';
-import { shownElement } from '../expression/shown';
 import type { Condition } from '../expression/statement';
+import { isZeroFunction, type LetterFunction } from '../field/letter-function';
+import type { LetterRing } from '../field/multivariate';
+import { writeLetterFunction } from '../field/write-letter-function';
 import { lower } from '../ring/lower';
 import type { Term } from '../ring/term';
 import type { Monomial } from '../ring/word-ring';
 import { minusOneElement } from '../ring/write-word';
-import { lettersReader } from './letters-reading';
+import { characteristicOf } from './letters-characteristic';
+import { generated, type Generator } from './letters-generators';
+import { letterValues } from './letters-values';
 import { notAUnit } from './read-unit';
 
-/** Words with entries in letters in kernel form. */
+/** Words with entries in letters in kernel form, over an unspecified field. */
 export interface LettersStatement {
-  /** An expression without letters, its entries replaced by their values. */
-  constant(expression: Expression): Expression;
-  readonly sides: readonly (readonly Term<Monomial>[])[];
+  readonly characteristic: bigint;
+  readonly ring: LetterRing;
+  /** The values of the entries that occur, each once; terms name them by their place here. */
+  readonly entries: readonly LetterFunction[];
+  readonly sides: readonly (readonly Term<number>[])[];
+  readonly generators: readonly Generator[];
+  readonly monomials: readonly Monomial[];
+  /** The letters that are left in the entries once everything has cancelled. */
   readonly letters: readonly string[];
+  /** The letters that conditions solve for, with their values. */
+  readonly solved: ReadonlyMap<string, LetterFunction>;
+  /** The monomial of an entry in the generators. */
+  monomial(entry: Element): Monomial;
+  /** An expression with every entry replaced by its value. */
+  valued(expression: Expression): Expression;
 }
 
-/** Reads entries as ± products of letters, or finds that there are no letters at all. */
+/** Reads the entries of expressions as functions in letters, none of them zero. */
 export function readStatement(
   expressions: readonly Expression[],
-  characteristic: bigint,
   conditions: readonly Condition[],
   budget: Budget,
 ): LettersStatement {
-  const read = lettersReader(characteristic, conditions, budget);
-  const names = new Set<string>();
-  let refused: { readonly entry: Element; readonly constant: boolean } | undefined;
-  interface Named {
-    readonly negative: boolean;
-    readonly exponents: ReadonlyMap<string, bigint>;
-  }
-  const named = expressions.map((expression) =>
-    lower(expression, (entry): Named => {
-      const value = read(entry);
-      if (value.kind === 'zero')
-        throw notAUnit(entry, characteristic === 0n ? 'every field' : `characteristic ${characteristic}`);
-      if (value.kind === 'signed') {
-        for (const name of value.exponents.keys()) names.add(name);
-        return value;
-      }
-      if (refused === undefined || (refused.constant && value.kind === 'other'))
-        refused = { entry, constant: value.kind === 'constant' };
-      return { negative: false, exponents: new Map() };
-    }),
-  );
-  if (refused !== undefined && (names.size > 0 || !refused.constant)) {
-    throw new Refusal(
-      'not-yet',
-      `Over an unspecified field this version decides entries that are products of letters, and ${shownElement(refused.entry)} is none. Use letters only, or choose a field.`,
-      refused.entry.at,
-    );
-  }
-  const constantOf = (entry: Element): Element => {
+  const characteristic = characteristicOf(conditions, budget);
+  const { ring, read, solved } = letterValues(expressions, characteristic, conditions, budget);
+  const entries: LetterFunction[] = [];
+  const places = new Map<string, number>();
+  const place = (entry: Element): number => {
     const value = read(entry);
-    if (value.kind === 'constant') return { ...value.value, at: entry.at };
-    return { ...(value.kind === 'signed' && value.negative ? minusOneElement : integerElement(1n)), at: entry.at };
-  };
-  const letters = [...names].sort(compareLetters);
-  const indexOf = new Map(letters.map((name, i) => [name, i]));
-  const monomials = new Map<Named, Monomial>();
-  const monomial = (value: Named): Monomial => {
-    const known = monomials.get(value);
+    if (isZeroFunction(value))
+      throw notAUnit(entry, characteristic === 0n ? 'every field' : `characteristic ${characteristic}`);
+    const name = nameOf(value);
+    const known = places.get(name);
     if (known !== undefined) return known;
-    const exponents = new Map(
-      [...value.exponents].map(([name, e]) => [indexOf.get(name) ?? 0, e] as const).sort(([a], [b]) => a - b),
-    );
-    const made: Monomial = { negative: value.negative, exponents };
-    monomials.set(value, made);
-    return made;
+    places.set(name, entries.length);
+    entries.push(value);
+    return entries.length - 1;
+  };
+  const sides = expressions.map((expression) => lower(expression, place));
+  const { generators, monomials } = generated(ring, entries);
+  const letters = new Set<string>();
+  for (const generator of generators)
+    if (generator.kind !== 'integer')
+      for (const { exponents } of generator.value)
+        exponents.forEach((e, i) => {
+          if (e !== 0) letters.add(ring.letters[i] ?? 'a');
+        });
+  const written = (entry: Element): Element => {
+    const value = read(entry);
+    const { num, den } = value.constant;
+    const minus = characteristic === 0n ? -1n : characteristic - 1n;
+    if (value.factors.size === 0 && den === 1n && (num === 1n || num === minus))
+      return { ...(num === 1n ? integerElement(1n) : minusOneElement), at: entry.at };
+    return { ...writeLetterFunction(ring, value), at: entry.at };
   };
   return {
-    letters,
-    constant: (expression) => mapEntries(expression, constantOf),
-    sides: named.map((terms) => terms.map((term) => mapTerm(term, monomial))),
+    characteristic,
+    ring,
+    entries,
+    sides,
+    generators,
+    monomials,
+    letters: ring.letters.filter((name) => letters.has(name)),
+    solved,
+    monomial: (entry) => monomialAt(monomials)(place(entry)),
+    valued: (expression) => mapEntries(expression, written),
   };
 }
 
-/** The same term with every entry replaced. */
-function mapTerm<A, B>(term: Term<A>, f: (entry: A) => B): Term<B> {
-  return {
-    ...term,
-    angles: term.angles.map(f),
-    factors: term.factors.map((factor) =>
-      factor.kind === 'symbol'
-        ? { kind: 'symbol', entry: f(factor.entry) }
-        : { ...factor, of: factor.of.map((inner) => mapTerm(inner, f)) },
-    ),
+/** The monomials of entries by their places. */
+export const monomialAt =
+  (monomials: readonly Monomial[]) =>
+  (place: number): Monomial => {
+    const found = monomials[place];
+    if (found === undefined) throw new RangeError('an entry that was not read');
+    return found;
   };
-}
 
-/** The order of letters: by name, then by index as a number, then by primes. */
-function compareLetters(a: string, b: string): number {
-  const parts = (name: string): readonly [string, bigint, number] => {
-    const digits = /[0-9]+/.exec(name)?.[0];
-    return [name.charAt(0), digits === undefined ? -1n : BigInt(digits), name.length];
-  };
-  const [x, y] = [parts(a), parts(b)];
-  if (x[0] !== y[0]) return x[0] < y[0] ? -1 : 1;
-  if (x[1] !== y[1]) return x[1] < y[1] ? -1 : 1;
-  return x[2] - y[2] || (a < b ? -1 : a > b ? 1 : 0);
-}
+/** Equal names for functions that are written alike. */
+const nameOf = ({ constant, factors }: LetterFunction): string =>
+  `${constant.num}/${constant.den} ${[...factors]
+    .map(([key, { exponent }]) => `(${key})^${exponent}`)
+    .sort()
+    .join(' ')}`;

@@ -1,4 +1,4 @@
-import { letterElement } from '../expression/element';
+import { integerElement, type Element } from '../expression/element';
 import { symbol, type Expression } from '../expression/expression';
 import { isZeroModEta, isZeroModH, type CharacteristicClass, type SignClass } from '../ring/sign-ring';
 import { countBits, lettersOf, type Words } from '../ring/word-ring';
@@ -8,7 +8,7 @@ import type { Finding } from './finding';
 /** The coefficients of every canonical word of one degree, compared. */
 export function wordFindings(
   char: CharacteristicClass,
-  letters: readonly string[],
+  letters: readonly Element[],
   degree: number,
   left: Words | undefined,
   right: Words | undefined,
@@ -61,7 +61,7 @@ function sortMasks(masks: Iterable<bigint>): readonly bigint[] {
 }
 
 /** The canonical form of the words of one degree. */
-export function writeWords(letters: readonly string[], degree: number, words: Words): Expression {
+export function writeWords(letters: readonly Element[], degree: number, words: Words): Expression {
   return total(
     sortMasks(words.keys()).flatMap((mask) =>
       writeWord(letters, degree - countBits(mask), mask, words.get(mask) ?? { x: 0n, y: 0n }),
@@ -71,12 +71,12 @@ export function writeWords(letters: readonly string[], degree: number, words: Wo
 
 /** b·[p_S] for a coefficient b of degree `own`. */
 export function writeWord(
-  letters: readonly string[],
+  letters: readonly Element[],
   own: number,
   mask: bigint,
   { x, y }: SignClass,
 ): readonly Expression[] {
-  const tail = lettersOf(mask).map((i) => symbol([letterElement(letters[i] ?? 'a')]));
+  const tail = lettersOf(mask).map((i) => symbol([letters[i] ?? integerElement(1n)]));
   const plain =
     x === 0n
       ? []

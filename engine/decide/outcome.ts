@@ -1,7 +1,7 @@
 import type { DerivationStep } from '../derive/rule';
 import type { Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
-import type { Condition } from '../expression/statement';
+import type { Condition, Statement } from '../expression/statement';
 
 export type Verdict = 'equal' | 'different' | 'undecided';
 
@@ -48,15 +48,63 @@ export interface Separating {
   readonly sentence: string;
 }
 
+/** A field as answers name it. */
+export interface NamedField {
+  readonly name: string;
+  readonly tex: string;
+}
+
+/** Values at which a statement about every field fails. */
+export interface Counterexample {
+  readonly field: NamedField;
+  /** The letters that got a value; those left out stand for themselves. */
+  readonly values: readonly { readonly letter: string; readonly value: Element }[];
+  /** The statement with the values put in, as it can be asked over the field. */
+  readonly statement: Statement;
+}
+
+/** A Steinberg relation [left][right] = 0, left + right = 1. */
+export interface SteinbergRelation {
+  readonly left: Element;
+  readonly right: Element;
+}
+
+/** A field in which values were tried. */
+export interface TriedField {
+  readonly field: NamedField;
+  /** How many lawful values there did not separate the sides. */
+  readonly values: number;
+}
+
+/** What the two searches over an unspecified field looked at. */
+export interface Tried {
+  readonly fields: readonly TriedField[];
+  readonly proof: {
+    /** The units of which all entries are products. */
+    readonly generators: readonly Element[];
+    /** How many Steinberg pairs x + y = 1 there are among their products. */
+    readonly pairs: number;
+    /** How many multiples of Steinberg relations were combined. */
+    readonly relations: number;
+    /** How many chains of residues and specialisations were followed to their ends. */
+    readonly chains: number;
+  };
+}
+
 export interface Evidence {
+  /** By maps over the field itself, or by values at which the statement fails; then what is compared belongs to these. */
   readonly kind: 'invariants' | 'certificate' | 'counterexample';
   readonly separating?: Separating;
   /** Why the compared maps see everything: the theorem and its published source. */
   readonly theorem: string;
-  /** Equal modulo η, that is in Milnor K-theory. */
-  readonly modEta: boolean;
-  /** Equal modulo h, that is in the Witt ring. */
-  readonly modH: boolean;
+  /** Equal modulo η, that is in Milnor K-theory; left out where that is not known. */
+  readonly modEta?: boolean;
+  /** Equal modulo h, that is in the Witt ring; left out where that is not known. */
+  readonly modH?: boolean;
+  readonly counterexample?: Counterexample;
+  /** The Steinberg relations of which the difference of the sides is a combination. */
+  readonly relations?: readonly SteinbergRelation[];
+  readonly tried?: Tried;
 }
 
 export interface CompareOutcome {

@@ -1,11 +1,11 @@
 import type { Budget } from '@/engine/arith/budget';
 import { compare } from '@/engine/decide/compare';
-import type { Compared, CompareOutcome, ComparedDegree, Evidence, Verdict } from '@/engine/decide/outcome';
+import type { Compared, CompareOutcome, ComparedDegree, Verdict } from '@/engine/decide/outcome';
 import type { DecidableField } from '@/engine/decide/decidable-field';
 import type { Expression } from '@/engine/expression/expression';
 import type { Statement } from '@/engine/expression/statement';
 import { engineVersion } from '@/engine/version';
-import type { CompareAnswer, CompareRequest, ComparedMap, ComparedPart, EvidenceAnswer } from '@/lib/contracts/compare';
+import type { CompareAnswer, CompareRequest, ComparedMap, ComparedPart } from '@/lib/contracts/compare';
 import { problemOf } from '@/lib/contracts/problem';
 import type { Typeset } from '@/lib/contracts/typeset';
 import { Declined } from './declined';
@@ -13,6 +13,7 @@ import { fieldOf } from './fields';
 import { type FormsByDegree, formsOf } from './forms-of-sides';
 import type { Reader } from './read';
 import { showCondition, showExpression, showField, showGroup, showStatement } from './show';
+import { showEvidence } from './show-evidence';
 
 interface Judged {
   readonly left: Expression;
@@ -122,19 +123,6 @@ const showCompared = ({ left, right, ...rest }: Compared): ComparedMap => ({
   ...rest,
   left: showExpression(left),
   right: showExpression(right),
-});
-
-const showEvidence = ({ separating, ...rest }: Evidence): EvidenceAnswer => ({
-  ...rest,
-  ...(separating === undefined
-    ? {}
-    : {
-        separating: {
-          ...separating,
-          left: showExpression(separating.left),
-          right: showExpression(separating.right),
-        },
-      }),
 });
 
 const withoutRepetition = (conditions: readonly Typeset[]): Typeset[] => [

@@ -1,3 +1,4 @@
+import type { Element } from '@/engine/expression/element';
 import type { Expression } from '@/engine/expression/expression';
 import type { Condition, Statement } from '@/engine/expression/statement';
 import { conditionTex, elementTex, expressionTex, statementTex } from '@/engine/expression/to-tex';
@@ -9,6 +10,8 @@ export const showExpression = (expression: Expression): Typeset => ({
   text: expressionText(expression),
   tex: expressionTex(expression),
 });
+
+export const showElement = (element: Element): Typeset => ({ text: elementText(element), tex: elementTex(element) });
 
 export const showCondition = (condition: Condition): Typeset => ({
   text: conditionText(condition),

@@ -76,6 +76,28 @@ export const comparedPart = z.object({
 });
 export type ComparedPart = z.infer<typeof comparedPart>;
 
+export const counterexample = z.object({
+  field: typeset.describe('A field one can type.'),
+  values: z
+    .array(z.object({ letter: z.string(), ...typeset.shape }))
+    .describe('The letters that got a value; those left out stand for themselves.'),
+  statement: typeset.describe('The statement with these values, to be asked over the field.'),
+});
+export type CounterexampleAnswer = z.infer<typeof counterexample>;
+
+export const tried = z.object({
+  fields: z
+    .array(z.object({ field: typeset, values: z.int().min(0) }))
+    .describe('The fields in which letters got values, and how many lawful ones did not separate the sides.'),
+  proof: z.object({
+    generators: z.array(typeset).describe('The units of which all entries are products.'),
+    pairs: z.int().min(0).describe('How many Steinberg pairs x + y = 1 there are among their products.'),
+    relations: z.int().min(0).describe('How many multiples of Steinberg relations were combined.'),
+    chains: z.int().min(0).describe('How many chains of residues and specialisations were followed to their ends.'),
+  }),
+});
+export type TriedAnswer = z.infer<typeof tried>;
+
 export const evidence = z.object({
   kind: z.enum(['invariants', 'certificate', 'counterexample']),
   separating: z
@@ -90,8 +112,21 @@ export const evidence = z.object({
     .optional()
     .describe('The first invariant that takes two values; only when the sides differ.'),
   theorem: z.string().describe('Why the compared maps see everything: the theorem and its source.'),
-  modEta: z.boolean().describe('Equal modulo η, that is in Milnor K-theory.'),
-  modH: z.boolean().describe('Equal modulo h, that is in the Witt ring.'),
+  modEta: z
+    .boolean()
+    .optional()
+    .describe('Equal modulo η, that is in Milnor K-theory; left out where it is not known.'),
+  modH: z.boolean().optional().describe('Equal modulo h, that is in the Witt ring; left out where it is not known.'),
+  counterexample: counterexample
+    .optional()
+    .describe('Over `any`: values at which the statement fails. What is compared then belongs to that field.'),
+  relations: z
+    .array(z.object({ left: typeset, right: typeset }))
+    .optional()
+    .describe(
+      'Over `any`: Steinberg relations [left][right] = 0 of which the difference of the sides is a combination.',
+    ),
+  tried: tried.optional().describe('Over `any`: how far the searches for a proof and for a counterexample went.'),
 });
 export type EvidenceAnswer = z.infer<typeof evidence>;
 

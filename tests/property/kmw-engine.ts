@@ -40,30 +40,37 @@ export function expectVerdict(expected: Verdict, ...question: Parameters<typeof 
   expect(verdict(...question), statement).toBe(expected);
 }
 
-/** The canonical form as text by degree, highest first: `1: [2] + …`. */
-export function canonicalText(
+/** The normal form as text by degree, highest first: `1: [2] + …`, and whether it is canonical. */
+export function normalText(
   name: string,
   expression: Expression | string,
   conditions: readonly Condition[] = [],
-): string {
+): { readonly text: string; readonly canonical: boolean } {
   const { parts } = normalize(field(name), tree(expression), { conditions }, unlimited);
-  expect(parts.every(({ canonical }) => canonical)).toBe(true);
-  return parts.map(({ degree, normalForm }) => `${degree}: ${expressionText(normalForm)}`).join('\n');
+  const text = parts.map(({ degree, normalForm }) => `${degree}: ${expressionText(normalForm)}`).join('\n');
+  return { text, canonical: parts.every(({ canonical }) => canonical) };
 }
 
-/** The canonical form read back as one expression. */
-export const canonicalForm = (
-  name: string,
-  expression: Expression | string,
-  conditions: readonly Condition[] = [],
-): Expression =>
+/** A normal form as text, of a class whose normal form is canonical. */
+export function canonicalText(...question: Parameters<typeof normalText>): string {
+  const { text, canonical } = normalText(...question);
+  expect(canonical).toBe(true);
+  return text;
+}
+
+/** The text of a normal form read back as one expression. */
+export const readForm = (text: string): Expression =>
   readExpression(
-    canonicalText(name, expression, conditions)
+    text
       .split('\n')
       .map((line) => line.replace(/^-?[0-9]+: /, ''))
-      .filter((text) => text !== '')
+      .filter((part) => part !== '')
       .join(' + ') || '0',
   );
+
+/** The canonical form read back as one expression. */
+export const canonicalForm = (...question: Parameters<typeof normalText>): Expression =>
+  readForm(canonicalText(...question));
 
 /** Runs a question that an entry may make meaningless: `undefined` when an entry, or what it is divided by, turns out to be zero. */
 export function whereDefined<T>(question: () => T): T | undefined {

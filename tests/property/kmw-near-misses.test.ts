@@ -1,10 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { Element } from '@/engine/expression/element';
-import { Refusal } from '@/engine/expression/refusal';
 import { readElement } from '@/grammar/read';
 import { decidePrimeField, decideRational } from '../oracle/pull-back';
-import { expectVerdict, judge, verdict } from './kmw-engine';
+import { expectVerdict, judge } from './kmw-engine';
 import { fieldRow, fieldRows, rationalUnit } from './kmw-fields';
 import { nearMisses, sideOf, type NearMiss } from './kmw-identities';
 import { substitute } from './kmw-words';
@@ -101,12 +100,5 @@ describe('three symbols turned round', () => {
         { numRuns: 5 },
       );
     }
-  });
-});
-
-describe('entries that are no products of letters, over an unspecified field', () => {
-  it.each(['[a][1-a]', '<a> + <b> - <a+b> - <ab(a+b)>', '[2a]', '[2][a]'])('%s is not decided', (text) => {
-    expect(() => verdict('any', text, '0')).toThrow(Refusal);
-    expect(() => verdict('any', text, '0')).toThrow(/this version decides entries that are products of letters/);
   });
 });

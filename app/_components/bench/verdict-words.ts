@@ -53,10 +53,10 @@ function differentPhrase(answer: CompareAnswer): Phrase {
   ];
 }
 
-/** What is left of a difference modulo η and modulo h; nothing when neither quotient sees the sides agree. */
-export function quotientWords(modEta: boolean, modH: boolean): string {
-  if (modEta && !modH) return 'Modulo η, in Milnor K-theory, the sides agree; in the Witt ring they do not.';
-  if (modH && !modEta) return 'In the Witt ring the sides agree; modulo η, in Milnor K-theory, they do not.';
+/** What is left of a difference modulo η and modulo h; nothing when neither quotient is known to see the sides agree. */
+export function quotientWords(modEta: boolean | undefined, modH: boolean | undefined): string {
+  if (modEta && modH === false) return 'Modulo η, in Milnor K-theory, the sides agree; in the Witt ring they do not.';
+  if (modH && modEta === false) return 'In the Witt ring the sides agree; modulo η, in Milnor K-theory, they do not.';
   return '';
 }
 

@@ -1,0 +1,176 @@
+import type { Budget } from '../arith/budget';
+import { unlessExhausted } from '../arith/limited-budget';
+import { negateElement, sumElement, type Element } from '../expression/element';
+import type { Expression } from '../expression/expression';
+import type { FieldName } from '../expression/field-name';
+import { mapEntries } from '../expression/map-entries';
+import { Refusal } from '../expression/refusal';
+import type { Condition } from '../expression/statement';
+import { substituteLetters } from '../expression/substitute';
+import { writeLetterFunction } from '../field/write-letter-function';
+import type { DecidableField } from './decidable-field';
+import type { Finding } from './finding';
+import type { LettersStatement } from './letters-statement';
+import { freeTargets } from './letters-free-targets';
+import { concreteTargets, type Assignment, type Target } from './letters-targets';
+import type { Counterexample, TriedField } from './outcome';
+
+/** What a search for a counterexample came to. */
+export interface Refutation {
+  readonly counterexample?: Counterexample;
+  /** What differs there: the findings in the degrees that were asked about. */
+  readonly findings: readonly Finding[];
+  readonly theorem?: string;
+  readonly tried: readonly TriedField[];
+}
+
+interface Question {
+  readonly left: Expression;
+  readonly right: Expression;
+  readonly conditions: readonly Condition[];
+  readonly statement: LettersStatement;
+  /** The degrees in which a difference is looked for. */
+  readonly degrees: ReadonlySet<number>;
+  /** How many times longer than usual to look: a difference may be known to be there. */
+  readonly patience: number;
+}
+
+/** Decides over the field of a name; the letters that are left free stand for themselves in `any`. */
+export type DecideOver = (name: FieldName) => Pick<DecidableField, 'name' | 'tex' | 'decide'>;
+
+/**
+ * Looks for values of the letters at which the sides differ: with some letters left free, so that canonical words decide in every
+ * degree, then over finite fields, ℚ, ℚ(t) and 𝔽_p(t), small values first. Values are lawful when all entries are units and the
+ * conditions hold. The order is fixed and every field has a fixed number of values.
+ */
+export function searchCounterexample(question: Question, decideOver: DecideOver, budget: Budget): Refutation {
+  const { conditions, statement, patience } = question;
+  const excluded = new Set(conditions.flatMap((c) => (c.kind === 'characteristic' && !c.is ? [c.prime] : [])));
+  const tried: TriedField[] = [];
+  const free = [...freeTargets(statement, patience, budget)];
+  const concrete = concreteTargets(statement.characteristic, excluded, patience, budget);
+  // symbols of degree ≥ 3 have little or nothing left of them over finite fields, Q and F_p(t)
+  const high = Math.min(...question.degrees) > 2;
+  const functions = concrete.filter(({ name }) => name.kind === 'functions');
+  const small = concrete.filter(({ name }) => name.kind !== 'functions');
+  const targets = high ? [...free, ...small, ...functions] : [...small, ...free, ...functions];
+  for (const target of targets) {
+    const found = unlessExhausted<Found | 'exhausted' | undefined>(
+      () => searchIn(target, question, decideOver, budget),
+      () => 'exhausted',
+    );
+    if (found === 'exhausted') break;
+    if (found === undefined) continue;
+    const { field, values, counterexample, findings, theorem } = found;
+    const known = tried.findIndex((entry) => entry.field.name === field.name);
+    const entry = { field, values: values + (tried[known]?.values ?? 0) };
+    if (known >= 0) tried[known] = entry;
+    else tried.push(entry);
+    if (counterexample !== undefined)
+      return { counterexample, findings, ...(theorem !== undefined && { theorem }), tried };
+  }
+  return { findings: [], tried };
+}
+
+interface Found {
+  readonly field: { readonly name: string; readonly tex: string };
+  /** How many lawful values gave no difference. */
+  readonly values: number;
+  readonly counterexample?: Counterexample;
+  readonly findings: readonly Finding[];
+  readonly theorem?: string;
+}
+
+/** The search in one field; `undefined` where the field is not decided. */
+function searchIn(target: Target, question: Question, decideOver: DecideOver, budget: Budget): Found | undefined {
+  const { statement, conditions } = question;
+  const assigned = statement.ring.letters.filter((name) => !statement.solved.has(name));
+  let values = 0;
+  let field: ReturnType<DecideOver>;
+  try {
+    field = decideOver(target.name);
+  } catch (error) {
+    if (isPassedOver(error)) return undefined;
+    throw error;
+  }
+  const named = { name: field.name, tex: field.tex };
+  for (const assignment of target.assignments(assigned)) {
+    budget.spend('looking for a counterexample');
+    const lawful = valuesAt(target, question, assignment);
+    if (lawful === undefined) continue;
+    try {
+      const kept = conditions.filter((c) => target.name.kind === 'any' && c.kind === 'characteristic');
+      const { findings, theorem } = field.decide(lawful.left, lawful.right, kept, budget);
+      const apart = findings.filter(({ same, degree }) => !same && question.degrees.has(degree));
+      if (apart.length === 0) {
+        values += 1;
+        continue;
+      }
+      const degrees = new Set(apart.map(({ degree }) => degree));
+      return {
+        field: named,
+        values,
+        counterexample: {
+          field: named,
+          values: lawful.values,
+          statement: { sides: [lawful.left, lawful.right], conditions: kept },
+        },
+        findings: findings.filter(({ degree }) => degrees.has(degree)),
+        theorem,
+      };
+    } catch (error) {
+      if (!isPassedOver(error)) throw error;
+      if (error.code === 'not-yet' && target.name.kind === 'functions' && values === 0) return undefined;
+    }
+  }
+  return { field: named, values, findings: [] };
+}
+
+const isPassedOver = (error: unknown): error is Refusal =>
+  error instanceof Refusal && (error.code === 'not-yet' || error.code === 'size');
+
+interface Lawful {
+  readonly left: Expression;
+  readonly right: Expression;
+  readonly values: Counterexample['values'];
+}
+
+/** Both sides with values for their letters, `undefined` where an entry is no unit or a condition fails. */
+function valuesAt(
+  target: Target,
+  { left, right, conditions, statement }: Question,
+  chosen: Assignment,
+): Lawful | undefined {
+  const { ring, solved } = statement;
+  const all = new Map(chosen);
+  try {
+    for (const [name, value] of solved) {
+      const element = target.value(substituteLetters(writeLetterFunction(ring, value), chosen));
+      if (element === 'zero') return undefined;
+      all.set(name, element);
+    }
+    const at = (element: Element): Element => {
+      const value = target.value(substituteLetters(element, all));
+      if (value === 'zero') throw new Unlawful();
+      return value;
+    };
+    for (const condition of conditions)
+      if (condition.kind === 'unequal') at(sumElement([condition.left, negateElement(condition.right)]));
+    const sides = [mapEntries(left, at), mapEntries(right, at)] as const;
+    const values = ring.letters.flatMap((letter) => {
+      const value = all.get(letter);
+      return value === undefined || isItself(value, letter) ? [] : [{ letter, value }];
+    });
+    return { left: sides[0], right: sides[1], values };
+  } catch (error) {
+    if (error instanceof Unlawful) return undefined;
+    const meaningless = error instanceof Refusal && ['division-by-zero', 'not-a-unit', 'size'].includes(error.code);
+    if (meaningless) return undefined;
+    throw error;
+  }
+}
+
+/** Values at which an entry is 0 or a condition fails. */
+class Unlawful extends Error {}
+
+const isItself = (value: Element, letter: string): boolean => value.kind === 'letter' && value.name === letter;

@@ -1,0 +1,155 @@
+import type { Budget } from '../arith/budget';
+import { IntegerLattice, type SparseVector } from '../arith/integer-lattice';
+import type { CharacteristicClass } from '../ring/sign-ring';
+import { countBits, lettersOf, wordRing, type Monomial, type Words } from '../ring/word-ring';
+import type { SteinbergPair } from './steinberg-pairs';
+
+/** A multiple of a Steinberg relation: coefficient · word · [x][y], the word in canonical words of generators. */
+export interface UsedRelation {
+  readonly coefficient: bigint;
+  readonly word: Words;
+  readonly wordDegree: number;
+  readonly pair: SteinbergPair;
+}
+
+/** What a search for a proof came to. */
+export interface ProofSearch {
+  /** The multiples of Steinberg relations that add up to the class; absent when none were found. */
+  readonly proof?: readonly UsedRelation[];
+  /** How many multiples were looked at. */
+  readonly relations: number;
+}
+
+/** At most this many multiples of relations enter the linear system of one degree. */
+const RELATION_LIMIT = 2_500;
+
+/**
+ * Looks for a class of canonical words, in one degree, among the integer combinations of multiples of Steinberg relations
+ * [x][y] = 0, x + y = 1. Words in −1, η and the generators commute up to ε, so that multiples on one side are all: they are
+ * taken by every canonical word of the degree that is missing, smallest first, and the integer linear system is solved.
+ *
+ * `hulls` are sets of generators, as bit masks, in whose unions the proof is looked for first: those of the terms.
+ */
+export function searchProof(
+  char: CharacteristicClass,
+  degree: number,
+  target: Words,
+  pairs: readonly SteinbergPair[],
+  hulls: readonly bigint[],
+  budget: Budget,
+): ProofSearch {
+  const ring = wordRing(char, budget);
+  const rows = new Rows(char, degree);
+  const lattice = new IntegerLattice();
+  const used: Omit<UsedRelation, 'coefficient'>[] = [];
+  const goal = rows.vector(target, lattice);
+  const tried = new Set<string>();
+  const relators = pairs.flatMap((pair, index) => {
+    const [x, y] = [ring.symbol(pair.x), ring.symbol(pair.y)];
+    const value = x && y && ring.multiply(1, x, 1, y);
+    return value === undefined ? [] : [{ pair, index, value, support: supportOf(pair.x) | supportOf(pair.y) }];
+  });
+  for (const hull of growing(hulls)) {
+    let added = false;
+    for (const { pair, index, value, support } of relators) {
+      if ((support & ~hull) !== 0n) continue;
+      for (const mask of subsets(hull)) {
+        if (used.length >= RELATION_LIMIT) break;
+        const name = `${index}:${mask}`;
+        if (tried.has(name)) continue;
+        tried.add(name);
+        budget.spend('solving for Steinberg relations');
+        for (const word of wordsOf(char, degree - 2, mask)) {
+          const multiple = ring.multiply(degree - 2, word, 2, value);
+          if (multiple === undefined) continue;
+          lattice.insert(rows.vector(multiple, lattice), used.length);
+          used.push({ word, wordDegree: degree - 2, pair });
+          added = true;
+        }
+      }
+    }
+    const found = added ? lattice.express(goal) : undefined;
+    if (found !== undefined)
+      return {
+        relations: used.length,
+        proof: found.flatMap(([label, coefficient]) => {
+          const relation = used[label];
+          return relation === undefined ? [] : [{ ...relation, coefficient }];
+        }),
+      };
+    if (used.length >= RELATION_LIMIT) break;
+  }
+  return { relations: used.length };
+}
+
+/** The coordinates of words of one degree: one for each coefficient; torsion enters the lattice with the first use of a row. */
+class Rows {
+  private readonly places = new Map<string, number>();
+
+  constructor(
+    private readonly char: CharacteristicClass,
+    private readonly degree: number,
+  ) {}
+
+  vector(words: Words, lattice: IntegerLattice): SparseVector {
+    const entries: (readonly [number, bigint])[] = [];
+    for (const [mask, { x, y }] of words) {
+      if (x !== 0n) entries.push([this.place(mask, 'x', lattice), x]);
+      if (y !== 0n) entries.push([this.place(mask, 'y', lattice), y]);
+    }
+    return entries.sort(([a], [b]) => a - b);
+  }
+
+  private place(mask: bigint, coordinate: 'x' | 'y', lattice: IntegerLattice): number {
+    const name = `${mask}${coordinate}`;
+    const known = this.places.get(name);
+    if (known !== undefined) return known;
+    const place = this.places.size;
+    this.places.set(name, place);
+    const order = orderOf(this.char, this.degree - countBits(mask), coordinate);
+    if (order !== 0n) lattice.insert([[place, order]]);
+    return place;
+  }
+}
+
+/** The order of a coefficient of B_* in a degree, 0 for infinite order (see `SignClass`). */
+function orderOf(char: CharacteristicClass, degree: number, coordinate: 'x' | 'y'): bigint {
+  if (char === 'zero') return 0n;
+  if (coordinate === 'y') return char === 'three-mod-four' ? 2n : 1n;
+  if (degree === 0) return 0n;
+  if (degree < 0) return char === 'three-mod-four' ? 4n : 2n;
+  return degree === 1 && char !== 'two' ? 2n : 1n;
+}
+
+/** The canonical words with these generators in a degree: one coefficient spans them, in its degree 0 two do. */
+function wordsOf(char: CharacteristicClass, degree: number, mask: bigint): readonly Words[] {
+  const own = degree - countBits(mask);
+  const plain = orderOf(char, own, 'x') === 1n ? [] : [{ x: 1n, y: 0n }];
+  const twisted = own === 0 && orderOf(char, own, 'y') !== 1n ? [{ x: 0n, y: 1n }] : [];
+  return [...plain, ...twisted].map((b) => new Map([[mask, b]]));
+}
+
+const supportOf = ({ exponents }: Monomial): bigint =>
+  [...exponents.keys()].reduce((mask, i) => mask | (1n << BigInt(i)), 0n);
+
+/** The maximal hulls, then the unions of two, then the union of all; each once. */
+function growing(hulls: readonly bigint[]): readonly bigint[] {
+  const all = hulls.reduce((union, hull) => union | hull, 0n);
+  const unions = hulls.flatMap((a, i) => hulls.slice(i + 1).map((b) => a | b));
+  const ordered = [...hulls, ...unions].sort((a, b) => countBits(a) - countBits(b));
+  return [...new Set([...ordered, all])];
+}
+
+/** The subsets of a mask, small ones first; of a large mask only the small ones. */
+function subsets(mask: bigint): readonly bigint[] {
+  const bits = lettersOf(mask).map((i) => 1n << BigInt(i));
+  let layer: readonly { readonly mask: bigint; readonly next: number }[] = [{ mask: 0n, next: 0 }];
+  const all: bigint[] = [];
+  while (layer.length > 0 && all.length < RELATION_LIMIT) {
+    all.push(...layer.map((subset) => subset.mask));
+    layer = layer.flatMap(({ mask: subset, next }) =>
+      bits.slice(next).map((bit, i) => ({ mask: subset | bit, next: next + i + 1 })),
+    );
+  }
+  return all;
+}
