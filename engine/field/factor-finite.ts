@@ -32,7 +32,8 @@ export function factorOverFinite<E>(
   return { unit: f[f.length - 1]!, factors };
 }
 
-function factored<P>(
+/** The irreducible factors of a monic f with their exponents, multiplied back, in no particular order. */
+export function factored<P>(
   ring: FinitePolynomials<P>,
   f: P,
   spend: () => void,
