@@ -3,6 +3,7 @@ import type { Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import type { Condition } from '../expression/statement';
 import type { DerivationStep } from '../derive/rule';
+import type { AskedPlace } from './asked-place';
 import type { Finding } from './finding';
 import type { Counterexample, NormalizedDegree, ResiduesOutcome, SteinbergRelation, Tried, Verdict } from './outcome';
 
@@ -48,7 +49,7 @@ export interface DecidableField {
   /** Residues; absent for a field that has no discrete valuation the engine knows. */
   readonly residues?: (
     expression: Expression,
-    places: readonly string[] | undefined,
+    places: readonly AskedPlace[] | undefined,
     uniformizer: Element | undefined,
     budget: Budget,
   ) => ResiduesOutcome;

@@ -1,5 +1,4 @@
 import type { Budget } from '../arith/budget';
-import { addInt, moduloFour, negateInt, xorInt } from '../arith/int';
 import type { Word } from '../derive/combination';
 import { derivation } from '../derive/derivation';
 import { finiteRules, unitAtoms } from '../derive/finite-rules';
@@ -8,16 +7,14 @@ import type { FiniteField } from '../field/field';
 import { degreesOf } from '../ring/degrees';
 import { evaluate } from '../ring/evaluate';
 import { classedUnit, fieldUnits } from '../ring/field-units';
-import type { GradedRing } from '../ring/graded-ring';
 import { lower } from '../ring/lower';
-import { residueClassRing, type ClassedUnit, type ResidueClass } from '../ring/residue-class-ring';
+import { residueClassRing, type ClassedUnit } from '../ring/residue-class-ring';
 import type { Term } from '../ring/term';
 import { writeResidueClass } from '../ring/write-residue-class';
 import type { DecidableField } from './decidable-field';
-import type { Finding } from './finding';
 import { checkConcreteConditions } from './concrete-conditions';
 import { unitReader } from './read-unit';
-import { residueReason } from './residue-reason';
+import { ResidueClassFinding } from './residue-class-finding';
 
 const THEOREM =
   'Over a finite field K^MW_n is 0 for n ≥ 2, the units for n = 1, and forms are classified by rank and discriminant ' +
@@ -42,8 +39,9 @@ export function decidableFiniteField<E>(field: FiniteField<E>): DecidableField {
       checkConcreteConditions(field, conditions, budget);
       const sides = [read(left, budget), read(right, budget)] as const;
       const [l, r] = [evaluate(sides[0], ring, budget), evaluate(sides[1], ring, budget)];
-      const findings = degreesOf([...sides[0], ...sides[1]]).map((degree) =>
-        finding(field, ring, degree, l.get(degree), r.get(degree)),
+      const origin = { map: 'class', field, units, where: `in ${field.name}` } as const;
+      const findings = degreesOf([...sides[0], ...sides[1]]).map(
+        (degree) => new ResidueClassFinding(origin, degree, degree, l.get(degree), r.get(degree)),
       );
       return { findings, theorem: THEOREM };
     },
@@ -73,42 +71,3 @@ export function decidableFiniteField<E>(field: FiniteField<E>): DecidableField {
 
 const degreeOf = (word: Word<unknown>): number =>
   word.letters.reduce((sum, letter) => sum + (letter.kind === 'eta' ? -1 : 1), 0);
-
-function finding<E>(
-  field: FiniteField<E>,
-  ring: GradedRing<ClassedUnit<E>, ResidueClass<E>>,
-  degree: number,
-  left: ResidueClass<E> | undefined,
-  right: ResidueClass<E> | undefined,
-): Finding {
-  const same = left === undefined || right === undefined ? left === right : ring.equal(degree, left, right);
-  return {
-    map: 'class',
-    degree,
-    same,
-    zero: left === undefined && right === undefined,
-    sameModEta: same || degree < 0 || (degree === 0 && (left?.rank ?? 0) === (right?.rank ?? 0)),
-    sameModH: same || sameWittClass(field, left, right),
-    left: () => writeResidueClass(field, degree, left),
-    right: () => writeResidueClass(field, degree, right),
-    target: () =>
-      degree > 1
-        ? '0'
-        : degree === 1
-          ? `${field.tex}^{\\times}`
-          : `\\mathrm{${degree === 0 ? 'GW' : 'W'}}(${field.tex})`,
-    reason: () => residueReason(degree, left, right, `in ${field.name}`),
-  };
-}
-
-/** Whether two classes have the same image in W(𝔽_q): even difference of ranks and the same signed discriminant. */
-function sameWittClass<E>(
-  field: FiniteField<E>,
-  left: ResidueClass<E> | undefined,
-  right: ResidueClass<E> | undefined,
-): boolean {
-  const rank = moduloFour(addInt(left?.rank ?? 0, negateInt(right?.rank ?? 0)));
-  const twist = rank === 2 ? fieldUnits(field).classOfMinusOne : 0;
-  const squareClass = xorInt(left?.squareClass ?? 0, right?.squareClass ?? 0);
-  return rank % 2 === 0 && xorInt(squareClass, twist) === 0;
-}

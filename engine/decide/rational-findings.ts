@@ -1,6 +1,6 @@
 import type { Budget } from '../arith/budget';
 import { integerElement } from '../expression/element';
-import { moduloFour, xorInt, type Int } from '../arith/int';
+import type { Int } from '../arith/int';
 import { angle, symbol, type Expression } from '../expression/expression';
 import { primeResidueField } from '../place/prime-residue-field';
 import { maskedProduct, rationalPlace, unsplitZeroTest, type ZeroTest } from '../place/rational-place';
@@ -10,7 +10,8 @@ import { thetaRing, type Theta } from '../place/theta-ring';
 import { degreesOf } from '../ring/degrees';
 import { evaluate } from '../ring/evaluate';
 import type { GradedRing } from '../ring/graded-ring';
-import { residueClassRing, type ResidueClass, type UnitGroup } from '../ring/residue-class-ring';
+import { differenceIn, zeroModEta, zeroModH } from '../ring/residue-class-quotients';
+import { residueClassRing, type ResidueClass } from '../ring/residue-class-ring';
 import { writeResidueClass } from '../ring/write-residue-class';
 import { etaFactors, multiple, total, zeroExpression } from '../ring/write-word';
 import type { Finding } from './finding';
@@ -67,22 +68,11 @@ function residueFindings({ base, terms, entries }: Incidence, budget: Budget): r
     const r = right.length === 0 ? undefined : evaluate(right, ring, budget);
     for (const degree of degreesOf(left.length === 0 ? right : right.length === 0 ? left : [...left, ...right])) {
       const [x, y] = [l?.get(degree)?.d, r?.get(degree)?.d];
-      const difference = y === undefined ? x : subtract(units, degree - 1, x, y);
+      const difference = y === undefined ? x : differenceIn(residueClassRing(units), degree - 1, x, y);
       findings.push(new ResidueFinding(base, entries, element, degree, x, y, difference, units.classOfMinusOne));
     }
   });
   return findings;
-}
-
-function subtract(
-  units: UnitGroup<Int>,
-  degree: number,
-  x: ResidueClass<Int> | undefined,
-  y: ResidueClass<Int>,
-): ResidueClass<Int> | undefined {
-  const kappa = residueClassRing(units);
-  const minus = kappa.negate(degree, y);
-  return x === undefined || minus === undefined ? (x ?? minus) : kappa.add(degree, x, minus);
 }
 
 /** The residues of both sides at one element of the base; a class, so that what is only shown is worked out on demand. */
@@ -127,7 +117,7 @@ class ResidueFinding implements Finding {
   }
   get outcomeModH(): ZeroTest {
     if (this.same) return 'zero';
-    if (this.element.prime) return zeroModH(this.difference, this.classOfMinusOne);
+    if (this.element.prime) return zeroModH(this.difference, this.classOfMinusOne) ? 'zero' : 'nonzero';
     const asForm = this.difference && { ...this.difference, unit: undefined };
     return unsplitZeroTest(this.sight, this.entries, this.base, -1, asForm);
   }
@@ -149,17 +139,6 @@ class ResidueFinding implements Finding {
       ? writeResidueClass(primeResidueField(this.base), this.degree - 1, value)
       : writeUnsplit(this.sight, this.base, this.degree - 1, value);
   }
-}
-
-/** Whether a class of K^MW_m of a residue field is zero in Milnor K-theory. */
-const zeroModEta = (degree: number, x: ResidueClass<Int> | undefined): boolean =>
-  x === undefined || (x.unit === undefined && (degree < 0 || x.rank === 0));
-
-/** Whether a class of K^MW_m of a residue field is zero in the Witt ring: even rank and trivial signed discriminant. */
-function zeroModH(x: ResidueClass<Int> | undefined, classOfMinusOne: Int): 'zero' | 'nonzero' {
-  if (x === undefined) return 'zero';
-  const rank = moduloFour(x.rank);
-  return rank % 2 === 0 && xorInt(x.squareClass, rank === 2 ? classOfMinusOne : 0) === 0 ? 'zero' : 'nonzero';
 }
 
 /** A residue at an unsplit composite: its rank, and its discriminant as a residue modulo the composite. */

@@ -17,6 +17,7 @@ import { evaluate } from '../ring/evaluate';
 import type { Graded } from '../ring/graded-ring';
 import { writeResidueClass } from '../ring/write-residue-class';
 import { total } from '../ring/write-word';
+import { isInfinity, type AskedPlace } from './asked-place';
 import type { Residue, ResiduesOutcome } from './outcome';
 import { incidence, rationalStatement } from './rational-statement';
 import { unitReader } from './read-unit';
@@ -28,11 +29,11 @@ import { unitReader } from './read-unit';
  */
 export function rationalResidues(
   expression: Expression,
-  places: readonly string[] | undefined,
+  places: readonly AskedPlace[] | undefined,
   uniformizer: Element | undefined,
   budget: Budget,
 ): ResiduesOutcome {
-  const asked = places?.map((text) => readPrime(text, budget));
+  const asked = places?.map(({ text }) => readPrime(text, budget));
   const typed = uniformizer && readUniformizer(uniformizer, asked, budget);
   const statement = rationalStatement([expression], budget);
   const [terms = []] = statement.sides;
@@ -49,7 +50,7 @@ export function rationalResidues(
       p,
       value,
       parameter === undefined ? integerElement(p) : rationals.write(parameter),
-      Math.max(0, ...degreesOf(terms)),
+      degreesOf(terms)[0] ?? 0,
     );
   };
 
@@ -93,7 +94,7 @@ function against(
 
 function readPrime(text: string, budget: Budget): bigint {
   const trimmed = text.trim();
-  if (/^(real|infinity|inf|oo|∞)$/i.test(trimmed))
+  if (/^real$/i.test(trimmed) || isInfinity(trimmed))
     throw new Refusal('place', 'The real place of Q has no residue. Name a prime, such as 7.');
   if (!/^[0-9]{1,2000}$/.test(trimmed) || !isPrime(BigInt(trimmed), budget))
     throw new Refusal('place', `${shown(trimmed)} is no place of Q. Name a prime, such as 7.`);

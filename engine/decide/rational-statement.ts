@@ -1,11 +1,12 @@
 import type { Budget } from '../arith/budget';
 import type { Expression } from '../expression/expression';
 import { rationals } from '../field/rational';
-import { forEachExponent, rationalEntries, type RationalEntry } from '../place/rational-entry';
+import { rationalEntries, type RationalEntry } from '../place/rational-entry';
 import { see, type BaseElement, type Splitting } from '../place/sight';
 import { lower } from '../ring/lower';
-import { forEachEntry, type Term } from '../ring/term';
+import type { Term } from '../ring/term';
 import { unitReader } from './read-unit';
+import { termsByIndex } from './terms-by-index';
 
 /** Words with rational entries in kernel form, and all entries that occur in them. */
 export interface RationalStatement {
@@ -34,33 +35,4 @@ export function incidence({ sides, entries }: RationalStatement, split: Splittin
   const base = see(entries, split, budget);
   const bySide = sides.map((side) => termsByIndex(side, base.length));
   return { base, entries, terms: (side, index) => bySide[side]?.(index) ?? [] };
-}
-
-/** Sorts terms by the base elements at which they ramify: counted first, so that one list holds them all. */
-function termsByIndex(
-  side: readonly Term<RationalEntry>[],
-  size: number,
-): (index: number) => readonly Term<RationalEntry>[] {
-  const forEachRamified = (visit: (term: Term<RationalEntry>, index: number) => void): void => {
-    const last = new Array<Term<RationalEntry> | undefined>(size).fill(undefined);
-    let term: Term<RationalEntry>;
-    const atIndex = (index: number): void => {
-      if (last[index] !== term) visit(term, index);
-      last[index] = term;
-    };
-    const atEntry = (entry: RationalEntry): void => forEachExponent(entry, atIndex);
-    for (term of side) forEachEntry(term, atEntry);
-  };
-  // where the terms of an index begin and end; while they are counted, shifted by one
-  const starts = new Uint32Array(size + 1);
-  forEachRamified((_, index) => (starts[index + 1] = (starts[index + 1] ?? 0) + 1));
-  for (let i = 1; i <= size; i += 1) starts[i] = (starts[i] ?? 0) + (starts[i - 1] ?? 0);
-  const sorted = new Array<Term<RationalEntry>>(starts[size] ?? 0);
-  const next = starts.slice();
-  forEachRamified((term, index) => {
-    const at = next[index] ?? 0;
-    next[index] = at + 1;
-    sorted[at] = term;
-  });
-  return (index) => sorted.slice(starts[index], starts[index + 1]);
 }

@@ -3,10 +3,12 @@ import { isPrime } from '../arith/prime';
 import type { FieldName } from '../expression/field-name';
 import { Refusal } from '../expression/refusal';
 import { fieldNameText } from '../expression/to-text';
+import type { FiniteField } from '../field/field';
 import { resolveFiniteField } from '../field/resolve-finite';
 import { complexField, realField } from './archimedean-fields';
 import type { DecidableField } from './decidable-field';
 import { decidableFiniteField } from './finite-field';
+import { finiteFunctionField } from './finite-function-field';
 import { lettersField } from './letters-field';
 import { padicField } from './padic-field';
 import { rationalField } from './rational-field';
@@ -37,7 +39,7 @@ export function resolveField(name: FieldName, budget: Budget): DecidableField {
       if (bottom(name).kind === 'finite') return decidableFiniteField(resolveFiniteField(name, budget));
       throw notYet(name, 'Number fields');
     case 'functions':
-      if (bottom(name).kind === 'finite') checkLetter(name, budget);
+      if (isFiniteTower(name.base)) return finiteFunctionField(constantsOf(name, budget), name.letter);
       throw notYet(name, 'Fields of rational functions');
     case 'any':
       return lettersField(resolveField);
@@ -49,22 +51,26 @@ function bottom(name: FieldName): FieldName {
   return name.kind === 'extension' || name.kind === 'functions' ? bottom(name.base) : name;
 }
 
-/** A function field over a finite field: its constants must be a field, and its letter a new one. */
-function checkLetter(name: FieldName & { kind: 'functions' }, budget: Budget): void {
-  if (name.base.kind === 'functions') return;
+/** Whether a name is that of a finite field, if it is one at all: extensions of 𝔽_q only. */
+function isFiniteTower(name: FieldName): boolean {
+  return name.kind === 'extension' ? isFiniteTower(name.base) : name.kind === 'finite';
+}
+
+/** The finite constants of a field of rational functions, whose letter must be a new one. */
+function constantsOf(name: FieldName & { kind: 'functions' }, budget: Budget): FiniteField<unknown> {
   const base = resolveFiniteField(name.base, budget);
-  if (base.letter(name.letter) !== undefined)
-    throw new Refusal(
-      'field',
-      `${fieldNameText(name)} uses the letter ${name.letter} twice: it already stands for an element of ${base.name}. Choose another letter.`,
-      name.at,
-    );
+  if (base.letter(name.letter) === undefined) return base;
+  throw new Refusal(
+    'field',
+    `${fieldNameText(name)} uses the letter ${name.letter} twice: it already stands for an element of ${base.name}. Choose another letter.`,
+    name.at,
+  );
 }
 
 function notYet(name: FieldName, kind: string): Refusal {
   return new Refusal(
     'not-yet',
-    `${kind} such as ${fieldNameText(name)} are read but not decided yet. Decided now: Q, R, C, Q_p, F_q and any.`,
+    `${kind} such as ${fieldNameText(name)} are read but not decided yet. Decided now: Q, R, C, Q_p, F_q, F_q(t) and any.`,
     name.at,
   );
 }

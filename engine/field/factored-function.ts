@@ -19,6 +19,12 @@ export interface FunctionPower<E> {
   readonly exponent: Int;
 }
 
+/** The field of functions as they are written. */
+export interface FactoredFunctions<E> extends Field<FactoredFunction<E>> {
+  /** The same function in lowest terms. Refused (`size`) when it is too large to be multiplied out. */
+  expand(a: FactoredFunction<E>): RationalFunction<E>;
+}
+
 /** Sums are not multiplied out past this degree. */
 const DEGREE_LIMIT = 10_000;
 
@@ -30,7 +36,7 @@ const TOTAL_LIMIT = 1 << 28;
  * apart again. Only sums are multiplied out, after their degree and their coefficients have been measured; past degree 10 000 they
  * are refused (`size`).
  */
-export function factoredFunctions<E>(functions: FunctionField<E>): Field<FactoredFunction<E>> {
+export function factoredFunctions<E>(functions: FunctionField<E>): FactoredFunctions<E> {
   type F = FactoredFunction<E>;
   const { base, tools } = functions;
   const one: Polynomial<E> = [base.one];
@@ -100,7 +106,8 @@ export function factoredFunctions<E>(functions: FunctionField<E>): Field<Factore
     return result;
   };
 
-  return Object.freeze<Field<F>>({
+  return Object.freeze<FactoredFunctions<E>>({
+    expand,
     name: functions.name,
     tex: functions.tex,
     characteristic: functions.characteristic,

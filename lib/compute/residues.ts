@@ -16,7 +16,8 @@ export function answerResidues(body: ResiduesRequest, reader: Reader, budget: Bu
   const uniformizer = body.uniformizer === undefined ? undefined : reader.element('uniformizer', body.uniformizer);
   const resolved = fieldOf(reader.fieldName(body.field), budget);
   const { field } = resolved;
-  const outcome = residues(field, expression, { places: body.places, uniformizer }, budget);
+  const places = body.places?.map((text, index) => ({ text, element: () => reader.element(`places[${index}]`, text) }));
+  const outcome = residues(field, expression, { places, uniformizer }, budget);
   return {
     engine: engineVersion,
     field: showField(resolved),

@@ -20,7 +20,8 @@ export function residuesOf(
   uniformizer?: Element,
 ): ResiduesOutcome {
   const tree = typeof expression === 'string' ? readExpression(expression) : expression;
-  return residues(field('Q'), tree, { places, uniformizer }, unlimited);
+  const asked = places?.map((text) => ({ text, element: () => readElement(text) }));
+  return residues(field('Q'), tree, { places: asked, uniformizer }, unlimited);
 }
 
 export function at(p: number, expression: Expression | string, uniformizer?: string): AtPrime {
