@@ -19,6 +19,7 @@ import { productClasses, productFinding, productValue } from './product-finding'
 import { rationalDerivation } from './rational-derivation';
 import { integerFinding, rankFinding, realFindings } from './real-findings';
 import { constantPart } from './rational-normal-form';
+import { wordClasses } from './rational-classes';
 import { rationalStatement, type RationalStatement } from './rational-statement';
 
 const TORSION =
@@ -38,7 +39,10 @@ export const realField: DecidableField = {
     const statement = read([left, right], conditions, budget);
     const [l = [], r = []] = statement.sides;
     return {
-      findings: [...realFindings(l, r, budget), ...productFindings(statement, '\\mathbb{R}^{\\times}', budget)],
+      findings: [
+        ...realFindings(wordClasses(statement), budget),
+        ...productFindings(statement, '\\mathbb{R}^{\\times}', budget),
+      ],
       theorem: `Forms over R are classified by rank and signature (Sylvester). ${TORSION}${PULL_BACK}`,
     };
   },

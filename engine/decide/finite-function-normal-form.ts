@@ -12,7 +12,7 @@ import { residueWords } from '../ring/residue-words';
 import type { Term } from '../ring/term';
 import { writeResidueClass, type WrittenField } from '../ring/write-residue-class';
 import { isZero, total } from '../ring/write-word';
-import { comparePlaces, type FiniteFunctionStatement } from './finite-function-statement';
+import type { FiniteFunctionStatement } from './finite-function-statement';
 import type { NormalizedDegree } from './outcome';
 
 /**
@@ -55,7 +55,7 @@ function* tower<E>(statement: FiniteFunctionStatement<E>, budget: Budget): Gener
     for (let index = pending.length; index < sight.places.length; index += 1) {
       pending.push([]);
       let at = queue.length;
-      while (at > 0 && comparePlaces(base, sight.places, queue[at - 1] ?? 0, index) > 0) at -= 1;
+      while (at > 0 && statement.compare(queue[at - 1] ?? 0, index) > 0) at -= 1;
       queue.splice(at, 0, index);
     }
   };

@@ -1,6 +1,7 @@
 import { rationals } from '../field/rational';
 import { checkConcreteConditions } from './concrete-conditions';
 import type { DecidableField } from './decidable-field';
+import { wordClasses } from './rational-classes';
 import { rationalDerivation } from './rational-derivation';
 import { rationalFindings } from './rational-findings';
 import { rationalNormalForm } from './rational-normal-form';
@@ -13,11 +14,14 @@ export const rationalField: DecidableField = {
   tex: rationals.tex,
   decide(left, right, conditions, budget) {
     checkConcreteConditions(rationals, conditions, budget);
-    return { findings: rationalFindings(rationalStatement([left, right], budget), budget), theorem: THEOREM };
+    return {
+      findings: rationalFindings(wordClasses(rationalStatement([left, right], budget)), budget),
+      theorem: THEOREM,
+    };
   },
   normalForm(expression, conditions, budget) {
     checkConcreteConditions(rationals, conditions, budget);
-    return rationalNormalForm(rationalStatement([expression], budget), budget);
+    return rationalNormalForm(wordClasses(rationalStatement([expression], budget)), 0, budget);
   },
   derivation: (expression, form, _conditions, budget) =>
     rationalDerivation(

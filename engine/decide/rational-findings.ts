@@ -5,17 +5,15 @@ import { angle, symbol, type Expression } from '../expression/expression';
 import { primeResidueField } from '../place/prime-residue-field';
 import { maskedProduct, rationalPlace, unsplitZeroTest, type ZeroTest } from '../place/rational-place';
 import type { RationalEntry } from '../place/rational-entry';
-import type { BaseElement } from '../place/sight';
-import { thetaRing, type Theta } from '../place/theta-ring';
-import { degreesOf } from '../ring/degrees';
-import { evaluate } from '../ring/evaluate';
-import type { GradedRing } from '../ring/graded-ring';
+import type { BaseElement, Splitting } from '../place/sight';
+import { thetaRing, type Visited } from '../place/theta-ring';
 import { differenceIn, zeroModEta, zeroModH } from '../ring/residue-class-quotients';
 import { residueClassRing, type ResidueClass } from '../ring/residue-class-ring';
 import { writeResidueClass } from '../ring/write-residue-class';
 import { etaFactors, multiple, total, zeroExpression } from '../ring/write-word';
 import type { Finding } from './finding';
-import { incidence, type Incidence, type RationalStatement } from './rational-statement';
+import type { RationalClasses } from './rational-classes';
+import { incidence } from './rational-statement';
 import { realFindings } from './real-findings';
 import { residueReason } from './residue-reason';
 
@@ -27,12 +25,14 @@ import { residueReason } from './residue-reason';
  *
  * A composite that was not split into primes is compared as a whole; it is split only if that does not settle it.
  */
-export function rationalFindings(statement: RationalStatement, budget: Budget): readonly Finding[] {
-  const [left = [], right = []] = statement.sides;
-  const real = realFindings(left, right, budget);
+export function rationalFindings<A, B extends Visited>(
+  classes: RationalClasses<A, B>,
+  budget: Budget,
+): readonly Finding[] {
+  const real = realFindings(classes, budget);
   const split = new Set<bigint>();
   for (;;) {
-    const residues = residueFindings(incidence(statement, split.size === 0 ? 'none' : split, budget), budget);
+    const residues = residueFindings(classes, split.size === 0 ? 'none' : split, budget);
     const open = unsettled(real, residues);
     if (open.length === 0) return [...real, ...residues.filter(({ outcome }) => outcome !== 'unknown')];
     for (const { base } of open) split.add(base);
@@ -58,15 +58,21 @@ function unsettled(real: readonly Finding[], residues: readonly ResidueFinding[]
 const isUnknownModH = (finding: Finding): boolean =>
   finding instanceof ResidueFinding && finding.outcomeModH === 'unknown';
 
-function residueFindings({ base, terms, entries }: Incidence, budget: Budget): readonly ResidueFinding[] {
+function residueFindings<A, B extends Visited>(
+  classes: RationalClasses<A, B>,
+  split: Splitting,
+  budget: Budget,
+): readonly ResidueFinding[] {
+  const { base, terms } = incidence(classes, split, budget);
+  const { entries, rational, image, degrees } = classes;
   const findings: ResidueFinding[] = [];
   base.forEach((element, index) => {
     const { units, local } = rationalPlace(base, index);
-    const ring: GradedRing<RationalEntry, Theta<Int>> = thetaRing(units, local);
+    const ring = thetaRing<B, Int>(units, (unit) => local(rational(unit)));
     const [left, right] = [terms(0, index), terms(1, index)];
-    const l = left.length === 0 ? undefined : evaluate(left, ring, budget);
-    const r = right.length === 0 ? undefined : evaluate(right, ring, budget);
-    for (const degree of degreesOf(left.length === 0 ? right : right.length === 0 ? left : [...left, ...right])) {
+    const l = left.length === 0 ? undefined : image(left, ring, budget);
+    const r = right.length === 0 ? undefined : image(right, ring, budget);
+    for (const degree of degrees(left.length === 0 ? right : right.length === 0 ? left : [...left, ...right])) {
       const [x, y] = [l?.get(degree)?.d, r?.get(degree)?.d];
       const difference = y === undefined ? x : differenceIn(residueClassRing(units), degree - 1, x, y);
       findings.push(new ResidueFinding(base, entries, element, degree, x, y, difference, units.classOfMinusOne));

@@ -1,22 +1,24 @@
 import type { Budget } from '../arith/budget';
 import { factor } from '../arith/factor';
-import { toInt } from '../arith/int';
+import { toInt, type Int } from '../arith/int';
 import { integerElement } from '../expression/element';
 import { symbol, type Expression } from '../expression/expression';
 import { primeResidueField } from '../place/prime-residue-field';
 import { forEachExponent, rationalEntry, type RationalEntry } from '../place/rational-entry';
 import { rationalPlace } from '../place/rational-place';
 import type { BaseElement } from '../place/sight';
-import { thetaRing } from '../place/theta-ring';
-import { evaluate } from '../ring/evaluate';
+import { thetaRing, type Visited } from '../place/theta-ring';
+import { accumulate, evaluate } from '../ring/evaluate';
 import { orderModFour } from '../ring/field-units';
+import { residueRing } from '../ring/residue-ring';
 import { residueWords } from '../ring/residue-words';
 import { rankRing, signatureRing } from '../ring/signature-ring';
 import type { Term } from '../ring/term';
 import { writeResidueClass } from '../ring/write-residue-class';
 import { etaFactors, isZero, minusOneElement, multiple, symbolFactors, total } from '../ring/write-word';
 import type { NormalizedDegree } from './outcome';
-import { incidence, type RationalStatement } from './rational-statement';
+import type { RationalClasses } from './rational-classes';
+import { incidence } from './rational-statement';
 
 /**
  * The tower normal form over ℚ: α = b + Σ_p [p]·r̃_p, unique, so that two classes are equal iff their forms are identical.
@@ -26,7 +28,11 @@ import { incidence, type RationalStatement } from './rational-statement';
  * constants B_n, seen by signature and rank: c[−1]ⁿ for n ≥ 1 with signature (−2)ⁿc, x + yη[−1] for n = 0, cη⁻ⁿ for n < 0
  * (the filtration of J. Milnor, Introduction to Algebraic K-Theory, §11, after Tate, lifted along the pull-back theorem).
  */
-export function rationalNormalForm(statement: RationalStatement, budget: Budget): readonly NormalizedDegree[] {
+export function rationalNormalForm<A, B extends Visited>(
+  classes: RationalClasses<A, B>,
+  side: number,
+  budget: Budget,
+): readonly NormalizedDegree[] {
   const parts = new Map<number, Expression[]>();
   const put = (degree: number, word: Expression): void => {
     if (isZero(word)) return;
@@ -34,14 +40,15 @@ export function rationalNormalForm(statement: RationalStatement, budget: Budget)
     if (words === undefined) parts.set(degree, [word]);
     else words.push(word);
   };
-  for (const [degree, word] of tower(statement, budget)) put(degree, word);
-  const [terms = []] = statement.sides;
-  const rank = BigInt(evaluate(terms, rankRing, budget).get(0) ?? 0);
-  const signatures = evaluate(
-    terms,
-    signatureRing<RationalEntry>((entry) => entry.negative),
-    budget,
+  for (const [degree, word] of tower(classes, side, budget)) put(degree, word);
+  const { rational, minusOne } = classes;
+  const terms = classes.sides[side] ?? [];
+  const rank = BigInt(classes.image(terms, residueRing<B, Int>(rankRing, minusOne), budget).get(0) ?? 0);
+  const ring = residueRing(
+    signatureRing<B>((unit) => rational(unit).negative),
+    minusOne,
   );
+  const signatures = classes.image(terms, ring, budget);
   for (const degree of new Set([...signatures.keys(), 0]))
     put(degree, constantPart(degree, BigInt(signatures.get(degree) ?? 0), rank));
   return [...parts]
@@ -62,11 +69,16 @@ export function constantPart(degree: number, signature: bigint, rank: bigint): E
 }
 
 /** The products [p]·r̃_p with their degree, largest prime first. */
-function* tower(statement: RationalStatement, budget: Budget): Generator<readonly [number, Expression]> {
-  const sight = incidence(statement, 'all', budget);
+function* tower<A, B extends Visited>(
+  classes: RationalClasses<A, B>,
+  side: number,
+  budget: Budget,
+): Generator<readonly [number, Expression]> {
+  const { rational, image } = classes;
+  const sight = incidence(classes, 'all', budget);
   const base: BaseElement[] = [...sight.base];
   const indexOf = new Map(base.map(({ value }, index) => [value, index]));
-  const pending = base.map((_, index) => [...sight.terms(0, index)]);
+  const pending = base.map((): Term<RationalEntry>[] => []); // what lifts have brought
   const queue = [...base.map(({ value }) => value)]; // ascending; the next prime is the last
 
   const indexOfPrime = (p: bigint): number => {
@@ -95,7 +107,14 @@ function* tower(statement: RationalStatement, budget: Budget): Generator<readonl
     const index = indexOfPrime(p);
     const field = primeResidueField(p);
     const { units, local } = rationalPlace(base, index);
-    const residues = evaluate(pending[index] ?? [], thetaRing(units, local), budget);
+    const ring = thetaRing<RationalEntry, Int>(units, local);
+    const residues = evaluate(pending[index] ?? [], ring, budget);
+    const own = image(
+      index < sight.base.length ? sight.terms(side, index) : [],
+      thetaRing<B, Int>(units, (unit) => local(rational(unit))),
+      budget,
+    );
+    for (const [degree, value] of own) accumulate(residues, degree, value, ring);
     for (const [degree, { d }] of residues) {
       if (d === undefined) continue;
       const prefix = [symbol([integerElement(p)])];

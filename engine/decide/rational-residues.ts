@@ -19,6 +19,7 @@ import { writeResidueClass } from '../ring/write-residue-class';
 import { total } from '../ring/write-word';
 import { isInfinity, type AskedPlace } from './asked-place';
 import type { Residue, ResiduesOutcome } from './outcome';
+import { wordClasses } from './rational-classes';
 import { incidence, rationalStatement } from './rational-statement';
 import { unitReader } from './read-unit';
 
@@ -37,7 +38,7 @@ export function rationalResidues(
   const typed = uniformizer && readUniformizer(uniformizer, asked, budget);
   const statement = rationalStatement([expression], budget);
   const [terms = []] = statement.sides;
-  const sight = incidence(statement, 'all', budget);
+  const sight = incidence(wordClasses(statement), 'all', budget);
   const indexOf = new Map(sight.base.map(({ value }, index) => [value, index]));
 
   const at = (p: bigint, parameter?: Rational): Residue => {

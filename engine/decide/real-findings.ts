@@ -1,35 +1,48 @@
 import type { Budget } from '../arith/budget';
 import type { Expression } from '../expression/expression';
-import { degreesOf } from '../ring/degrees';
+import type { Int } from '../arith/int';
+import type { Visited } from '../place/theta-ring';
 import { evaluate } from '../ring/evaluate';
+import { residueRing } from '../ring/residue-ring';
 import { rankRing, signatureRing } from '../ring/signature-ring';
 import type { Term } from '../ring/term';
 import { multiple, zeroExpression } from '../ring/write-word';
 import type { Finding } from './finding';
+import type { RationalClasses } from './rational-classes';
 
-/** The rank in degree 0, and in every degree of the words the signature at the real place. */
-export function realFindings<A extends { readonly negative: boolean }>(
-  left: readonly Term<A>[],
-  right: readonly Term<A>[],
-  budget: Budget,
-): readonly Finding[] {
-  const ring = signatureRing<A>((entry) => entry.negative);
-  const [l, r] = [evaluate(left, ring, budget), evaluate(right, ring, budget)];
-  return degreesOf([...left, ...right]).flatMap((degree): readonly Finding[] => {
+/** The rank in degree 0, and in every degree the signature at the real place. */
+export function realFindings<A, B extends Visited>(classes: RationalClasses<A, B>, budget: Budget): readonly Finding[] {
+  const { sides, minusOne, rational } = classes;
+  const [left = [], right = []] = sides;
+  const signatures = residueRing(
+    signatureRing<B>((unit) => rational(unit).negative),
+    minusOne,
+  );
+  const [l, r] = [classes.image(left, signatures, budget), classes.image(right, signatures, budget)];
+  return classes.degrees([...left, ...right]).flatMap((degree): readonly Finding[] => {
     const values = [BigInt(l.get(degree) ?? 0), BigInt(r.get(degree) ?? 0)] as const;
     // in degree n ≥ 1 the signature is a multiple of 2ⁿ, and Milnor K-theory sees that multiple modulo 2
     const sameModEta = degree < 1 || (values[0] - values[1]) % 2n ** BigInt(degree + 1) === 0n;
     const signature = integerFinding('signature', degree, values, sameModEta, values[0] === values[1]);
-    return [...(degree === 0 ? [rankFinding(left, right, budget)] : []), { ...signature, place: 'real' }];
+    return [...(degree === 0 ? [rankOfClasses(classes, budget)] : []), { ...signature, place: 'real' }];
   });
+}
+
+function rankOfClasses<A, B extends Visited>(classes: RationalClasses<A, B>, budget: Budget): Finding {
+  const [left = [], right = []] = classes.sides;
+  const ranks = residueRing<B, Int>(rankRing, classes.minusOne);
+  const rank = (terms: readonly Term<A>[]): bigint => BigInt(classes.image(terms, ranks, budget).get(0) ?? 0);
+  return ranksFinding([rank(left), rank(right)]);
 }
 
 /** The ranks of the parts of degree 0. */
 export function rankFinding<A>(left: readonly Term<A>[], right: readonly Term<A>[], budget: Budget): Finding {
   const rank = (terms: readonly Term<A>[]): bigint => BigInt(evaluate(terms, rankRing, budget).get(0) ?? 0);
-  const values = [rank(left), rank(right)] as const;
-  return integerFinding('rank', 0, values, values[0] === values[1], (values[0] - values[1]) % 2n === 0n);
+  return ranksFinding([rank(left), rank(right)]);
 }
+
+const ranksFinding = (values: readonly [bigint, bigint]): Finding =>
+  integerFinding('rank', 0, values, values[0] === values[1], (values[0] - values[1]) % 2n === 0n);
 
 /** Two integers compared. */
 export function integerFinding(

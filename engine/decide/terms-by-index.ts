@@ -1,23 +1,20 @@
 import type { Int } from '../arith/int';
 import { forEachEntry, type Term } from '../ring/term';
 
-/** An entry that has been taken apart: the index of a place and the exponent there, in turn. */
-export interface Factored {
-  readonly exponents: readonly Int[];
-}
-
 /**
  * Sorts terms by the places, `size` of them, at which they ramify: counted first, so that one list holds them all. Places past these
- * have none.
+ * have none. `exponentsOf` gives the index of a place and the exponent of an entry there, in turn.
  */
-export function termsByIndex<A extends Factored>(
+export function termsByIndex<A>(
   side: readonly Term<A>[],
   size: number,
+  exponentsOf: (entry: A) => readonly Int[],
 ): (index: number) => readonly Term<A>[] {
   const forEachRamified = (visit: (term: Term<A>, index: number) => void): void => {
     const last = new Array<Term<A> | undefined>(size).fill(undefined);
     let term: Term<A>;
-    const atEntry = ({ exponents }: A): void => {
+    const atEntry = (entry: A): void => {
+      const exponents = exponentsOf(entry);
       for (let i = 0; i < exponents.length; i += 2) {
         const index = Number(exponents[i]);
         if (last[index] !== term) visit(term, index);
