@@ -15,14 +15,14 @@ interface Known {
 export class IntegerLattice {
   private readonly pivots = new Map<number, Known>();
 
-  get rank(): number {
-    return this.pivots.size;
-  }
+  /** `spend` is called for every combination of two vectors. */
+  constructor(private readonly spend: () => void = () => undefined) {}
 
   /** Adds a generator. */
   insert(vector: SparseVector, label?: number): void {
     let rest: Known = { vector, combination: label === undefined ? [] : [[label, 1n]] };
     for (let head = rest.vector[0]; head !== undefined; head = rest.vector[0]) {
+      this.spend();
       const [place, a] = head;
       const pivot = this.pivots.get(place);
       if (pivot === undefined) {

@@ -142,13 +142,16 @@ function valuesAt(
   chosen: Assignment,
 ): Lawful | undefined {
   const { ring, solved } = statement;
-  const all = new Map(chosen);
+  const all = new Map<string, Element>();
   try {
-    for (const [name, value] of solved) {
-      const element = target.value(substituteLetters(writeLetterFunction(ring, value), chosen));
-      if (element === 'zero') return undefined;
-      all.set(name, element);
-    }
+    // letters are units, whether they stand alone or not
+    const give = (name: string, element: Element): void => {
+      const value = target.value(element);
+      if (value === 'zero') throw new Unlawful();
+      all.set(name, value);
+    };
+    for (const [name, element] of chosen) give(name, element);
+    for (const [name, value] of solved) give(name, substituteLetters(writeLetterFunction(ring, value), chosen));
     const at = (element: Element): Element => {
       const value = target.value(substituteLetters(element, all));
       if (value === 'zero') throw new Unlawful();

@@ -58,6 +58,9 @@ const FUNCTION_VALUES: readonly Element[] = [
 
 const FINITE_ORDERS = [2, 3, 4, 5, 7, 8, 9, 11, 13] as const;
 
+/** In a given characteristic p finite fields 𝔽_q with more elements are left out, but for 𝔽_p. */
+const LARGEST_EXTENSION = 130n;
+
 /** How many values are tried in each kind of field. */
 const FINITE_ASSIGNMENTS = 12;
 const RATIONAL_ASSIGNMENTS = 60;
@@ -70,7 +73,10 @@ export function concreteTargets(
   patience: number,
   budget: Budget,
 ): readonly Target[] {
-  const orders = characteristic === 0n ? FINITE_ORDERS.map(BigInt) : [characteristic, characteristic ** 2n];
+  const orders =
+    characteristic === 0n
+      ? FINITE_ORDERS.map(BigInt)
+      : [1n, 2n, 3n, 4n].map((d) => characteristic ** d).filter((q, i) => i === 0 || q <= LARGEST_EXTENSION);
   const finite = orders
     .filter((q) => !excluded.has(primePower(q, budget)?.prime ?? q))
     .map((q) => finiteTarget(q, FINITE_ASSIGNMENTS * patience, budget));

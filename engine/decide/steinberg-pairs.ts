@@ -1,51 +1,64 @@
 import type { Budget } from '../arith/budget';
+import { unlessExhausted } from '../arith/limited-budget';
 import { seeded } from '../arith/seeded';
+import { Refusal } from '../expression/refusal';
 import {
   addMulti,
   constantPolynomial,
   keyOf,
   multiplyMulti,
   negateMulti,
-  powerMulti,
-  scaleMulti,
   type LetterRing,
   type MultiPolynomial,
 } from '../field/multivariate';
 import type { Monomial } from '../ring/word-ring';
 import type { Generator } from './letters-generators';
-
-/** x + y = 1 for two ± monomials in generators, so that [x][y] = 0. `weight` counts the generators in it, with repetitions. */
-export interface SteinbergPair {
-  readonly x: Monomial;
-  readonly y: Monomial;
-  readonly weight: number;
-}
+import {
+  isCoprime,
+  nameOfTriple,
+  pairOf,
+  polynomialOf,
+  productOf,
+  weightOf,
+  type Product,
+  type SteinbergPair,
+  type Triple,
+} from './steinberg-triples';
 
 /** Products of at most this many generators are looked at, and at most that many of them. */
 const WEIGHT_LIMIT = 4;
 const MONOMIAL_LIMIT = 420;
 /** Where values at a point say little, over a small field, polynomials are added instead; that takes longer. */
 const MONOMIAL_LIMIT_EXACT = 130;
-
-/** A product of generators by their exponents, with its weight. */
-interface Product {
-  readonly exponents: readonly number[];
-  readonly weight: number;
-}
+/** So many entries, of so many generators at most, are looked at with their quotients. */
+const ENTRY_LIMIT = 24;
+const ENTRY_WEIGHT = 16;
 
 /**
- * The pairs x + y = 1 among ± monomials in pairwise coprime generators: all m₁ ± m₂ = ±m₃ for coprime products m₁, m₂ of
- * few generators, one pair for each, lightest first. Found by values at a point, and tested as polynomials.
+ * The pairs x + y = 1 among ± monomials in pairwise coprime generators, lightest first, one for each sum m₁ ± m₂ = ±m₃ of coprime
+ * products: those of few generators, found by values at a point and tested as polynomials, and those in which an entry of the
+ * statement, or a quotient of two, is x. With a limited budget it gives those that were found.
  */
 export function steinbergPairs(
   ring: LetterRing,
   generators: readonly Generator[],
+  entries: readonly Monomial[],
   budget: Budget,
 ): readonly SteinbergPair[] {
   const p = ring.characteristic;
-  return p === 0n || (p > 1_000_000n && p < 1n << 26n)
-    ? find(ring, generators, pointValues(ring, generators), MONOMIAL_LIMIT, budget)
-    : find(ring, generators, polynomialValues(ring, generators), MONOMIAL_LIMIT_EXACT, budget);
+  const triples = new Map<string, Triple>();
+  const limited = { ...ring, budget };
+  unlessExhausted(
+    () => {
+      entryTriples(limited, generators, entries, triples, budget);
+      if (p === 0n || (p > 1_000_000n && p < 1n << 26n))
+        lightTriples(limited, generators, pointValues(ring, generators), MONOMIAL_LIMIT, triples, budget);
+      else
+        lightTriples(limited, generators, polynomialValues(limited, generators), MONOMIAL_LIMIT_EXACT, triples, budget);
+    },
+    () => undefined, // what was found is there
+  );
+  return [...triples.values()].map(pairOf).sort((a, b) => a.weight - b.weight);
 }
 
 /** A ring in which generators have values, those of different polynomials different as a rule. */
@@ -95,114 +108,123 @@ function polynomialValues(ring: LetterRing, generators: readonly Generator[]): V
   };
 }
 
-function find<V>(
+/** Adds the sums of light products. */
+function lightTriples<V>(
   ring: LetterRing,
   generators: readonly Generator[],
   values: Values<V>,
   limit: number,
+  triples: Map<string, Triple>,
   budget: Budget,
-): readonly SteinbergPair[] {
-  const products = lightProducts(generators.length, limit);
-  const valueOf = ({ exponents }: Product): V =>
-    exponents.reduce((value, e, i) => {
+): void {
+  const valueOf = (product: Product): V =>
+    product.reduce((value, e, i) => {
       let result = value;
       for (let k = 0; k < e; k += 1) result = values.multiply(result, values.generators[i] ?? values.one);
       return result;
     }, values.one);
-  const list = products.map((product) => ({ product, value: valueOf(product) }));
+  const list = lightProducts(generators.length, limit).map((product) => ({
+    product,
+    value: valueOf(product),
+    support: product.reduce((bits, e, i) => (e > 0 ? bits | (1 << (i & 31)) : bits), 0),
+  }));
   const byKey = new Map(list.map((entry) => [values.key(entry.value), entry.product] as const));
-  const pairs = new Map<string, SteinbergPair>();
+  const isZero = (triple: Triple): boolean =>
+    triple.reduce<MultiPolynomial>((sum, m) => addMulti(ring, sum, polynomialOf(ring, generators, m)), []).length === 0;
   for (const [i, first] of list.entries()) {
     budget.spend('looking for Steinberg relations');
     for (let j = i + 1; j < list.length; j += 1) {
       const second = list[j];
-      if (second === undefined || !coprime(first.product, second.product)) continue;
-      for (const sign of [1, -1] as const) {
-        const sum = values.add(first.value, sign === 1 ? second.value : values.negate(second.value));
-        for (const turned of [1, -1] as const) {
-          const third = byKey.get(values.key(turned === 1 ? sum : values.negate(sum)));
+      // bits say at once that most are not coprime; those of more than 32 generators only that they may not be
+      if (second === undefined || ((first.support & second.support) !== 0 && generators.length <= 32)) continue;
+      if (generators.length > 32 && !isCoprime(first.product, second.product)) continue;
+      for (const minus of [false, true]) {
+        const sum = values.add(first.value, minus ? values.negate(second.value) : second.value);
+        for (const turned of [false, true]) {
+          const third = byKey.get(values.key(turned ? values.negate(sum) : sum));
           if (third === undefined) continue;
-          const name = [first.product, second.product, third].map(({ exponents }) => exponents.join()).sort();
-          if (pairs.has(name.join(';'))) continue;
-          if (!isSum(ring, generators, first.product, sign, second.product, turned, third)) continue;
-          pairs.set(name.join(';'), pairOf(first.product, sign, second.product, turned, third));
+          const name = nameOfTriple([first.product, second.product, third]);
+          const triple: Triple = [
+            { negative: false, product: first.product },
+            { negative: minus, product: second.product },
+            { negative: !turned, product: third },
+          ];
+          if (!triples.has(name) && isZero(triple)) triples.set(name, triple);
         }
       }
     }
   }
-  return [...pairs.values()].sort((a, b) => a.weight - b.weight);
 }
 
 /** Products of generators by rising weight, 1 among them, as many as there may be. */
 function lightProducts(count: number, limit: number): readonly Product[] {
   const all: Product[] = [];
-  let layer: readonly Product[] = [{ exponents: new Array<number>(count).fill(0), weight: 0 }];
+  let layer: readonly Product[] = [new Array<number>(count).fill(0)];
   for (let weight = 0; weight <= WEIGHT_LIMIT && all.length + layer.length <= limit; weight += 1) {
     all.push(...layer);
     layer = layer.flatMap((product) => {
-      const last = product.exponents.findLastIndex((e) => e > 0);
-      return product.exponents.flatMap((_, i) =>
-        i < last
-          ? []
-          : [{ exponents: product.exponents.map((e, k) => (k === i ? e + 1 : e)), weight: product.weight + 1 }],
-      );
+      const last = product.findLastIndex((e) => e > 0);
+      return product.flatMap((_, i) => (i < last ? [] : [product.map((e, k) => (k === i ? e + 1 : e))]));
     });
   }
   return all;
 }
 
-const coprime = (a: Product, b: Product): boolean => a.exponents.every((e, i) => e === 0 || b.exponents[i] === 0);
-
-/** Whether a + sign·b = turned·c as polynomials. */
-function isSum(
+/** Adds the sums 1 − x for x an entry or a quotient of two, up to sign, as far as they are products again. */
+function entryTriples(
   ring: LetterRing,
   generators: readonly Generator[],
-  a: Product,
-  sign: 1 | -1,
-  b: Product,
-  turned: 1 | -1,
-  c: Product,
-): boolean {
-  const polynomial = ({ exponents }: Product): MultiPolynomial =>
-    exponents.reduce(
-      (product, e, i) => {
-        const g = generators[i];
-        if (e === 0 || g === undefined) return product;
-        const value = g.kind === 'integer' ? constantPolynomial(ring, g.value) : g.value;
-        return multiplyMulti(ring, product, powerMulti(ring, value, e));
-      },
-      constantPolynomial(ring, 1n),
-    );
-  const left = addMulti(ring, polynomial(a), scaleMulti(ring, BigInt(sign), polynomial(b)));
-  return keyOf(left) === keyOf(scaleMulti(ring, BigInt(turned), polynomial(c)));
+  entries: readonly Monomial[],
+  triples: Map<string, Triple>,
+  budget: Budget,
+): void {
+  const few = entries.slice(0, ENTRY_LIMIT);
+  const candidates = [...few, ...few.flatMap((a, i) => few.slice(i + 1).map((b) => quotient(a, b)))];
+  const seen = new Set<string>();
+  for (const candidate of candidates) {
+    const [above, below] = [side(generators, candidate, 1n), side(generators, candidate, -1n)];
+    if (above === undefined || below === undefined) continue;
+    const name = nameOfTriple([above, below]);
+    if (seen.has(name)) continue;
+    seen.add(name);
+    budget.spend('looking for Steinberg relations');
+    for (const negative of [false, true]) {
+      const [first, second] = [
+        { negative: false, product: below },
+        { negative, product: above },
+      ];
+      const third = withoutLimit(() => {
+        const sum = addMulti(ring, polynomialOf(ring, generators, first), polynomialOf(ring, generators, second));
+        return sum.length === 0 ? undefined : productOf(ring, generators, sum);
+      });
+      if (third === undefined) continue;
+      const whole = nameOfTriple([below, above, third.product]);
+      if (!triples.has(whole)) triples.set(whole, [first, second, { ...third, negative: !third.negative }]);
+    }
+  }
 }
 
-/** From a + sign·b = turned·c the pair over 1, or else over the product with the last generator. */
-function pairOf(a: Product, sign: 1 | -1, b: Product, turned: 1 | -1, c: Product): SteinbergPair {
-  // as a signed sum s₁m₁ + s₂m₂ + s₃m₃ = 0
-  const signed = [
-    { product: a, sign: 1 },
-    { product: b, sign },
-    { product: c, sign: -turned },
-  ];
-  const last = ({ exponents }: Product): number => exponents.findLastIndex((e) => e > 0);
-  const rank = ({ product }: (typeof signed)[number]): number => (product.weight === 0 ? Infinity : last(product));
-  const [below, ...others] = [...signed].sort((x, y) => rank(y) - rank(x));
-  if (below === undefined) throw new RangeError('no pair');
-  const [x, y] = others.map((above): Monomial => quotient(above, below));
-  if (x === undefined || y === undefined) throw new RangeError('no pair');
-  return { x, y, weight: a.weight + b.weight + c.weight };
-}
-
-/** −above/below. */
-function quotient(
-  above: { readonly product: Product; readonly sign: number },
-  below: { readonly product: Product; readonly sign: number },
-): Monomial {
-  const exponents = new Map<number, bigint>();
-  above.product.exponents.forEach((e, i) => {
-    const difference = e - (below.product.exponents[i] ?? 0);
-    if (difference !== 0) exponents.set(i, BigInt(difference));
+/** The numerator (1) or the denominator (−1) of a monomial; `undefined` where it is too heavy to multiply out. */
+function side(generators: readonly Generator[], { exponents }: Monomial, sign: 1n | -1n): Product | undefined {
+  const product = generators.map((_, i) => {
+    const e = (exponents.get(i) ?? 0n) * sign;
+    return e > 0n ? Number(e) : 0;
   });
-  return { negative: above.sign === below.sign, exponents };
+  return weightOf(product) > ENTRY_WEIGHT ? undefined : product;
+}
+
+function quotient(a: Monomial, b: Monomial): Monomial {
+  const exponents = new Map(a.exponents);
+  for (const [i, e] of b.exponents) exponents.set(i, (exponents.get(i) ?? 0n) - e);
+  return { negative: a.negative !== b.negative, exponents };
+}
+
+/** Sums that are too long to multiply out are left out. */
+function withoutLimit<T>(work: () => T): T | undefined {
+  try {
+    return work();
+  } catch (error) {
+    if (error instanceof Refusal && error.code === 'size') return undefined;
+    throw error;
+  }
 }

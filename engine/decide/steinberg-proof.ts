@@ -2,7 +2,7 @@ import type { Budget } from '../arith/budget';
 import { IntegerLattice, type SparseVector } from '../arith/integer-lattice';
 import type { CharacteristicClass } from '../ring/sign-ring';
 import { countBits, lettersOf, wordRing, type Monomial, type Words } from '../ring/word-ring';
-import type { SteinbergPair } from './steinberg-pairs';
+import type { SteinbergPair } from './steinberg-triples';
 
 /** A multiple of a Steinberg relation: coefficient · word · [x][y], the word in canonical words of generators. */
 export interface UsedRelation {
@@ -22,6 +22,8 @@ export interface ProofSearch {
 
 /** At most this many multiples of relations enter the linear system of one degree. */
 const RELATION_LIMIT = 2_500;
+/** … and so many sets of generators are looked at. */
+const HULL_LIMIT = 48;
 
 /**
  * Looks for a class of canonical words, in one degree, among the integer combinations of multiples of Steinberg relations
@@ -38,27 +40,28 @@ export function searchProof(
   hulls: readonly bigint[],
   budget: Budget,
 ): ProofSearch {
+  const spend = (): void => budget.spend('solving for Steinberg relations');
   const ring = wordRing(char, budget);
   const rows = new Rows(char, degree);
-  const lattice = new IntegerLattice();
+  const lattice = new IntegerLattice(spend);
   const used: Omit<UsedRelation, 'coefficient'>[] = [];
   const goal = rows.vector(target, lattice);
-  const tried = new Set<string>();
-  const relators = pairs.flatMap((pair, index) => {
+  const relators = pairs.flatMap((pair) => {
     const [x, y] = [ring.symbol(pair.x), ring.symbol(pair.y)];
     const value = x && y && ring.multiply(1, x, 1, y);
-    return value === undefined ? [] : [{ pair, index, value, support: supportOf(pair.x) | supportOf(pair.y) }];
+    const support = supportOf(pair.x) | supportOf(pair.y);
+    return value === undefined ? [] : [{ pair, value, support, tried: new Set<bigint>() }];
   });
-  for (const hull of growing(hulls)) {
+  const supports = relators.map(({ support }) => support);
+  for (const hull of growing(hulls, supports).slice(0, HULL_LIMIT)) {
     let added = false;
-    for (const { pair, index, value, support } of relators) {
-      if ((support & ~hull) !== 0n) continue;
+    for (const { pair, value, support, tried } of relators) {
+      if ((support & ~hull) !== 0n || used.length >= RELATION_LIMIT) continue;
       for (const mask of subsets(hull)) {
+        if (tried.has(mask)) continue;
         if (used.length >= RELATION_LIMIT) break;
-        const name = `${index}:${mask}`;
-        if (tried.has(name)) continue;
-        tried.add(name);
-        budget.spend('solving for Steinberg relations');
+        tried.add(mask);
+        spend();
         for (const word of wordsOf(char, degree - 2, mask)) {
           const multiple = ring.multiply(degree - 2, word, 2, value);
           if (multiple === undefined) continue;
@@ -132,12 +135,13 @@ function wordsOf(char: CharacteristicClass, degree: number, mask: bigint): reado
 const supportOf = ({ exponents }: Monomial): bigint =>
   [...exponents.keys()].reduce((mask, i) => mask | (1n << BigInt(i)), 0n);
 
-/** The maximal hulls, then the unions of two, then the union of all; each once. */
-function growing(hulls: readonly bigint[]): readonly bigint[] {
-  const all = hulls.reduce((union, hull) => union | hull, 0n);
-  const unions = hulls.flatMap((a, i) => hulls.slice(i + 1).map((b) => a | b));
-  const ordered = [...hulls, ...unions].sort((a, b) => countBits(a) - countBits(b));
-  return [...new Set([...ordered, all])];
+/** The hulls and the unions of two, of one with the generators of a pair, then of all; small ones first, each once. */
+function growing(hulls: readonly bigint[], supports: readonly bigint[]): readonly bigint[] {
+  const union = (masks: readonly bigint[]): bigint => masks.reduce((all, mask) => all | mask, 0n);
+  const two = hulls.flatMap((a, i) => hulls.slice(i + 1).map((b) => a | b));
+  const withPair = hulls.flatMap((a) => supports.map((b) => a | b));
+  const ordered = [...hulls, ...two, ...withPair, union(hulls)].sort((a, b) => countBits(a) - countBits(b));
+  return [...new Set([...ordered, union([...hulls, ...supports])])];
 }
 
 /** The subsets of a mask, small ones first; of a large mask only the small ones. */

@@ -1,15 +1,34 @@
-import { derivativeIn, degreeIn, isConstant, lettersIn, type LetterRing, type MultiPolynomial } from './multivariate';
+import {
+  derivativeIn,
+  degreeIn,
+  isConstant,
+  keyOf,
+  lettersIn,
+  type LetterRing,
+  type MultiPolynomial,
+} from './multivariate';
 import { coprimeBaseMulti } from './multivariate-base';
 import { exactQuotient } from './multivariate-division';
+import { factorsOf } from './multivariate-factor';
 import { contentIn, gcdMulti } from './multivariate-gcd';
 
 /**
- * A finer coprime base: every member is primitive in each of its letters and, where that can be told by derivatives, without a
- * repeated factor; so a member of degree 1 in some letter is irreducible.
+ * A finer coprime base: every member is primitive in each of its letters, so that one of degree 1 in some letter is irreducible;
+ * repeated factors, as far as derivatives show them, and factors that are found at little cost are taken apart.
  */
 export function splitBase(ring: LetterRing, polynomials: Iterable<MultiPolynomial>): readonly MultiPolynomial[] {
-  return coprimeBaseMulti(ring, polynomials).flatMap((f) => split(ring, f));
+  const done = known.get(ring.letters) ?? new Map<string, readonly MultiPolynomial[]>();
+  known.set(ring.letters, done);
+  return coprimeBaseMulti(ring, polynomials).flatMap((f) => {
+    const key = `${ring.characteristic} ${keyOf(f)}`;
+    const parts = done.get(key) ?? split(ring, f);
+    done.set(key, parts);
+    return parts;
+  });
 }
+
+/** What was split before, by the letters of a question: the same polynomials come up at many places. */
+const known = new WeakMap<readonly string[], Map<string, readonly MultiPolynomial[]>>();
 
 function split(ring: LetterRing, f: MultiPolynomial): readonly MultiPolynomial[] {
   const letters = lettersIn(ring, f);
@@ -25,7 +44,8 @@ function split(ring: LetterRing, f: MultiPolynomial): readonly MultiPolynomial[]
     if (!isConstant(repeated)) return parted(ring, f, repeated);
     break;
   }
-  return [f];
+  const parts = factorsOf(ring, f);
+  return parts.length === 1 ? parts : parts.flatMap((part) => split(ring, part));
 }
 
 /** f split along a divisor. */

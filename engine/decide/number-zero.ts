@@ -1,0 +1,61 @@
+import { wittInvariants, type WittSymbols } from '../ring/witt-symbol-ring';
+import type { NumberArithmetic } from './number-arithmetic';
+import type { NumberUnit } from './number-classes';
+import type { NumberValue } from './number-value';
+
+/** What is known of a class of K^MW_n of a number field; `undefined` stands for what is not. */
+export interface ZeroTest {
+  readonly zero: boolean | undefined;
+  /** Whether it is zero in Milnor K-theory. */
+  readonly modEta: boolean | undefined;
+  /** Whether it is zero in the Witt ring. */
+  readonly modH: boolean | undefined;
+}
+
+/**
+ * Whether the part of degree n of a class over a number field L is zero. By the pull-back theorem (F. Morel, Comment. Math. Helv. 79, 2004)
+ * it is, iff it is zero in K^M_n(L) and in W(L).
+ *
+ * W(L): iff the rank is even, the signed discriminant a square, all signatures are 0 and the Hasse invariant is that of hyperbolic planes at
+ * every finite place (Hasse–Minkowski: T. Y. Lam, Introduction to Quadratic Forms over Fields, VI.3, number from memory). K^M_1 = L^×. For n ≥ 3
+ * the signatures see both: K^M_n(L) is a sum of groups ℤ/2, one for each real place (H. Bass, J. Tate, The Milnor ring of a global field,
+ * Theorem II.2.1, number from memory), and Iⁿ(L) has no torsion. For n = 2 what W(L) and the tame symbols do not see is left open, unless
+ * the class is zero formally.
+ */
+export function zeroTest<A, B extends NumberUnit>(
+  value: NumberValue<A, B>,
+  degree: number,
+  arithmetic: NumberArithmetic,
+): ZeroTest {
+  const signatures = value.signatures(degree);
+  const flat = signatures.every((s) => s === 0n);
+  if (degree >= 3) {
+    const modEta = signatures.every((s) => s % 2n ** BigInt(degree + 1) === 0n);
+    return { zero: flat, modEta, modH: flat };
+  }
+  const witt = value.witt(degree);
+  const graded = !flat ? false : isZeroModCube(witt, arithmetic);
+  if (degree === 2) return symbolTest(value, graded, flat, arithmetic, signatures, witt);
+  const modEta = degree < 0 || (degree === 0 ? value.rank() === 0n : arithmetic.isOne(value.unit()));
+  return { zero: modEta && graded, modEta, modH: graded };
+}
+
+function symbolTest<A, B extends NumberUnit>(
+  value: NumberValue<A, B>,
+  modH: boolean,
+  flat: boolean,
+  arithmetic: NumberArithmetic,
+  signatures: readonly bigint[],
+  witt: WittSymbols | undefined,
+): ZeroTest {
+  if (modH && value.words(2) === undefined) return { zero: true, modEta: true, modH };
+  const seenModTwo = !signatures.every((s) => s % 8n === 0n) || !(flat ? modH : isZeroModCube(witt, arithmetic));
+  const modEta = seenModTwo || !arithmetic.hasTrivialTameSymbols(value.tame()) ? false : undefined;
+  return { zero: !modH || modEta === false ? false : undefined, modEta, modH };
+}
+
+/** Whether a Witt class is zero modulo I³ at all finite places. */
+export function isZeroModCube(value: WittSymbols | undefined, arithmetic: NumberArithmetic): boolean {
+  const { rank, determinant, symbols } = wittInvariants(value);
+  return rank === 0 && arithmetic.isSquare(determinant) && arithmetic.splits(symbols);
+}
