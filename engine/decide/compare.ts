@@ -2,7 +2,7 @@ import type { Budget } from '../arith/budget';
 import type { Expression } from '../expression/expression';
 import type { Condition } from '../expression/statement';
 import { expressionText } from '../expression/to-text';
-import type { DecidableField, Search } from './decidable-field';
+import type { DecidableField, Open, Search } from './decidable-field';
 import type { Finding } from './finding';
 import type { Compared, CompareOutcome, ComparedDegree, Evidence, MapName, Separating, Verdict } from './outcome';
 
@@ -20,8 +20,9 @@ export function compare(
   conditions: readonly Condition[],
   budget: Budget,
 ): CompareOutcome {
-  const { findings, theorem, search } = field.decide(left, right, conditions, budget);
-  const byDegree = new Map<number, Finding[]>([...(search?.verdicts.keys() ?? [])].map((degree) => [degree, []]));
+  const { findings, theorem, open = [], search } = field.decide(left, right, conditions, budget);
+  const unseen = [...(search?.verdicts.keys() ?? []), ...open.map(({ degree }) => degree)];
+  const byDegree = new Map<number, Finding[]>(unseen.map((degree) => [degree, []]));
   for (const finding of findings) {
     const here = byDegree.get(finding.degree);
     if (here === undefined) byDegree.set(finding.degree, [finding]);
@@ -31,7 +32,7 @@ export function compare(
     .sort(([a], [b]) => b - a)
     .map(([degree, here]): ComparedDegree => ({
       degree,
-      verdict: search?.verdicts.get(degree) ?? verdictOf(here),
+      verdict: search?.verdicts.get(degree) ?? verdictOf(here, isOpen(open, degree)),
       compared: here.map(compared),
     }));
   const separating = firstDifference(findings);
@@ -42,14 +43,23 @@ export function compare(
     evidence: {
       kind: search?.counterexample === undefined ? 'invariants' : 'counterexample',
       ...(separating && { separating: describe(separating) }),
-      theorem,
-      ...(search === undefined ? quotients(findings) : searched(search)),
+      theorem: withOpen(theorem, open),
+      ...(search === undefined ? quotients(findings, open) : searched(search)),
     },
   };
 }
 
-const verdictOf = (findings: readonly Finding[]): Verdict =>
-  findings.every((finding) => finding.same) ? 'equal' : 'different';
+const verdictOf = (findings: readonly Finding[], open: boolean): Verdict =>
+  findings.some((finding) => !finding.same) ? 'different' : open ? 'undecided' : 'equal';
+
+const isOpen = (open: readonly Open[], degree: number): boolean =>
+  open.some((part) => part.verdict && part.degree === degree);
+
+/** The theorem, and what the maps do not see. */
+function withOpen(theorem: string, open: readonly Open[]): string {
+  const missing = new Set(open.filter(({ verdict }) => verdict).map((part) => part.missing));
+  return missing.size === 0 ? theorem : `${theorem} Not settled: ${[...missing].join('; ')}.`;
+}
 
 const overall = (parts: readonly ComparedDegree[]): Verdict =>
   parts.some(({ verdict }) => verdict === 'different')
@@ -58,10 +68,15 @@ const overall = (parts: readonly ComparedDegree[]): Verdict =>
       ? 'undecided'
       : 'equal';
 
-const quotients = (findings: readonly Finding[]): Pick<Evidence, 'modEta' | 'modH'> => ({
-  modEta: findings.every((finding) => finding.sameModEta),
-  modH: findings.every((finding) => finding.sameModH),
-});
+/** What is known modulo η and modulo h; what is open stays out. */
+function quotients(findings: readonly Finding[], open: readonly Open[]): Pick<Evidence, 'modEta' | 'modH'> {
+  const modEta = findings.every((finding) => finding.sameModEta);
+  const modH = findings.every((finding) => finding.sameModH);
+  return {
+    ...(!(modEta && open.some((part) => part.modEta)) && { modEta }),
+    ...(!(modH && open.some((part) => part.modH)) && { modH }),
+  };
+}
 
 const searched = ({ modEta, modH, counterexample, relations, tried }: Search): Partial<Evidence> => ({
   ...(modEta !== undefined && { modEta }),

@@ -11,8 +11,21 @@ import type { Counterexample, NormalizedDegree, ResiduesOutcome, SteinbergRelati
 export interface Decision {
   readonly findings: readonly Finding[];
   readonly theorem: string;
+  /** What the maps compared leave open, absent when they see everything. */
+  readonly open?: readonly Open[];
   /** Where maps alone do not decide: what searches for a proof and for a counterexample came to. */
   readonly search?: Search;
+}
+
+/** A degree in which the maps compared do not see everything; the findings there are true for what they are. */
+export interface Open {
+  readonly degree: number;
+  /** Whether the verdict is open where no finding differs; otherwise only what is true modulo η or modulo h is. */
+  readonly verdict: boolean;
+  readonly modEta: boolean;
+  readonly modH: boolean;
+  /** The group that is not seen in full, as it is named in a sentence. */
+  readonly missing: string;
 }
 
 /** The outcome of searches; it says for every degree what is known, and findings are then only what there is to show. */

@@ -45,11 +45,13 @@ export function numberPlaces({ sight, functions }: FunctionStatement<Rational>, 
   const letter = residueLetter(functions.base);
   const leads = rationalEntries();
   for (const { lead } of sight.entries) leads.intern(lead);
-  const base = see(leads.all(), 'none', budget);
+  const seen = new Set(leads.all());
+  const base = see([...seen], 'none', budget);
 
   /** What an entry is made of, without the place itself: −1 as −1, primes of constants, other places after these. */
   const exponentsAt = (entry: FunctionEntry<Rational>, index: number): readonly (readonly [number, Int])[] => {
     const lead = leads.intern(entry.lead);
+    if (!seen.has(lead)) throw new RangeError('an entry that was read later');
     const found: (readonly [number, Int])[] = lead.negative ? [[-1, 1]] : [];
     forEachExponent(lead, (i, e) => void found.push([i, e]));
     for (let i = 0; i < entry.exponents.length; i += 2) {

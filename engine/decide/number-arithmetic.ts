@@ -5,6 +5,7 @@ import type { NumberField, NumberFieldElement } from '../field/number-field';
 import { isSquareInNumberField } from '../field/number-field-squares';
 import { SIZE_LIMIT, tooLarge } from '../field/read-element';
 import { realRoots, type RealRoot } from '../field/real-roots';
+import { splitsAtFinitePlaces } from '../place/number-symbols';
 import { unitPower } from '../place/unit-power';
 import { bitsOf, symbolPairs } from '../ring/witt-symbol-ring';
 
@@ -50,7 +51,7 @@ export class NumberArithmetic {
     return found;
   }
 
-  /** Whether a formal sum of symbols is zero in the Brauer group at all finite places. */
+  /** Whether a formal sum of symbols is zero in the Brauer group, at all finite places. */
   splits(symbols: bigint): boolean {
     const partners = new Map<number, bigint>();
     for (const [i, j] of symbolPairs(symbols)) partners.set(j, (partners.get(j) ?? 0n) ^ (1n << BigInt(i)));

@@ -27,6 +27,7 @@ export function zeroTest<A, B extends NumberUnit>(
   degree: number,
   arithmetic: NumberArithmetic,
 ): ZeroTest {
+  if (value.words(degree) === undefined) return { zero: true, modEta: true, modH: true };
   const signatures = value.signatures(degree);
   const flat = signatures.every((s) => s === 0n);
   if (degree >= 3) {
@@ -35,22 +36,20 @@ export function zeroTest<A, B extends NumberUnit>(
   }
   const witt = value.witt(degree);
   const graded = !flat ? false : isZeroModCube(witt, arithmetic);
-  if (degree === 2) return symbolTest(value, graded, flat, arithmetic, signatures, witt);
+  if (degree === 2) return symbolTest(graded, flat, arithmetic, signatures, witt);
   const modEta = degree < 0 || (degree === 0 ? value.rank() === 0n : arithmetic.isOne(value.unit()));
   return { zero: modEta && graded, modEta, modH: graded };
 }
 
-function symbolTest<A, B extends NumberUnit>(
-  value: NumberValue<A, B>,
+function symbolTest(
   modH: boolean,
   flat: boolean,
   arithmetic: NumberArithmetic,
   signatures: readonly bigint[],
   witt: WittSymbols | undefined,
 ): ZeroTest {
-  if (modH && value.words(2) === undefined) return { zero: true, modEta: true, modH };
   const seenModTwo = !signatures.every((s) => s % 8n === 0n) || !(flat ? modH : isZeroModCube(witt, arithmetic));
-  const modEta = seenModTwo || !arithmetic.hasTrivialTameSymbols(value.tame()) ? false : undefined;
+  const modEta = seenModTwo ? false : undefined;
   return { zero: !modH || modEta === false ? false : undefined, modEta, modH };
 }
 

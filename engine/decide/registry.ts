@@ -12,6 +12,7 @@ import { finiteFunctionField } from './finite-function-field';
 import { lettersField } from './letters-field';
 import { padicField } from './padic-field';
 import { rationalField } from './rational-field';
+import { rationalFunctionField } from './rational-function-field';
 
 /**
  * The field with a written name. Refuses names that are no fields (`field`, with the reason) and fields that are not decided in
@@ -40,6 +41,7 @@ export function resolveField(name: FieldName, budget: Budget): DecidableField {
       throw notYet(name, 'Number fields');
     case 'functions':
       if (isFiniteTower(name.base)) return finiteFunctionField(constantsOf(name, budget), name.letter);
+      if (name.base.kind === 'rationals') return rationalFunctionField(name.letter);
       throw notYet(name, 'Fields of rational functions');
     case 'any':
       return lettersField(resolveField);
@@ -70,7 +72,7 @@ function constantsOf(name: FieldName & { kind: 'functions' }, budget: Budget): F
 function notYet(name: FieldName, kind: string): Refusal {
   return new Refusal(
     'not-yet',
-    `${kind} such as ${fieldNameText(name)} are read but not decided yet. Decided now: Q, R, C, Q_p, F_q, F_q(t) and any.`,
+    `${kind} such as ${fieldNameText(name)} are read but not decided yet. Decided now: Q, R, C, Q_p, F_q, F_q(t), Q(t) and any.`,
     name.at,
   );
 }

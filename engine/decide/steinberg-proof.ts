@@ -1,15 +1,15 @@
 import type { Budget } from '../arith/budget';
 import { IntegerLattice, type SparseVector } from '../arith/integer-lattice';
-import type { CharacteristicClass } from '../ring/sign-ring';
-import { countBits, lettersOf, wordRing, type Monomial, type Words } from '../ring/word-ring';
+import { multiplySign, type CharacteristicClass, type SignClass } from '../ring/sign-ring';
+import { countBits, inversions, lettersOf, wordRing, type Monomial, type Words } from '../ring/word-ring';
 import type { SteinbergPair } from './steinberg-triples';
 
-/** A multiple of a Steinberg relation: coefficient · word · [x][y], the word in canonical words of generators. */
+/** A multiple of a Steinberg relation: coefficient · word · [x][y] · [p_S], with S the generators that no relation has. */
 export interface UsedRelation {
   readonly coefficient: bigint;
   readonly word: Words;
-  readonly wordDegree: number;
   readonly pair: SteinbergPair;
+  readonly beside: bigint;
 }
 
 /** What a search for a proof came to. */
@@ -29,6 +29,7 @@ const HULL_LIMIT = 48;
  * Looks for a class of canonical words, in one degree, among the integer combinations of multiples of Steinberg relations
  * [x][y] = 0, x + y = 1. Words in −1, η and the generators commute up to ε, so that multiples on one side are all: they are
  * taken by every canonical word of the degree that is missing, smallest first, and the integer linear system is solved.
+ * Generators that no relation has are coordinates by themselves: the words beside each product of them are looked at apart.
  *
  * `hulls` are sets of generators, as bit masks, in whose unions the proof is looked for first: those of the terms.
  */
@@ -40,11 +41,46 @@ export function searchProof(
   hulls: readonly bigint[],
   budget: Budget,
 ): ProofSearch {
+  const inner = pairs.reduce((mask, { x, y }) => mask | supportOf(x) | supportOf(y), 0n);
+  const insideHulls = [...new Set(hulls.map((hull) => hull & inner))];
+  const proof: UsedRelation[] = [];
+  let relations = 0;
+  for (const [beside, words] of besideOthers(target, degree, inner)) {
+    const found = solve(char, degree - countBits(beside), words, pairs, insideHulls, budget);
+    relations += found.relations;
+    if (found.proof === undefined) return { relations };
+    for (const relation of found.proof) proof.push({ ...relation, beside });
+  }
+  return { proof, relations };
+}
+
+/** A class as Σ words·[p_S] over the sets S of generators outside of `inner`; the words hold generators of `inner` only. */
+function besideOthers(target: Words, degree: number, inner: bigint): ReadonlyMap<bigint, Words> {
+  const groups = new Map<bigint, Map<bigint, SignClass>>();
+  for (const [mask, b] of target) {
+    const [own, beside] = [mask & inner, mask & ~inner];
+    const group = groups.get(beside) ?? new Map<bigint, SignClass>();
+    groups.set(beside, group);
+    // [p_own][p_beside] is ε^k times the sorted word
+    const odd = inversions(own, beside) % 2 === 1;
+    group.set(own, odd ? multiplySign(0, { x: -1n, y: -1n }, degree - countBits(mask), b) : b);
+  }
+  return groups;
+}
+
+function solve(
+  char: CharacteristicClass,
+  degree: number,
+  target: Words,
+  pairs: readonly SteinbergPair[],
+  hulls: readonly bigint[],
+  budget: Budget,
+): { readonly proof?: readonly Omit<UsedRelation, 'beside'>[]; readonly relations: number } {
   const spend = (): void => budget.spend('solving for Steinberg relations');
   const ring = wordRing(char, budget);
   const rows = new Rows(char, degree);
   const lattice = new IntegerLattice(spend);
-  const used: Omit<UsedRelation, 'coefficient'>[] = [];
+  const used: Pick<UsedRelation, 'word' | 'pair'>[] = [];
   const goal = rows.vector(target, lattice);
   const relators = pairs.flatMap((pair) => {
     const [x, y] = [ring.symbol(pair.x), ring.symbol(pair.y)];
@@ -66,7 +102,7 @@ export function searchProof(
           const multiple = ring.multiply(degree - 2, word, 2, value);
           if (multiple === undefined) continue;
           lattice.insert(rows.vector(multiple, lattice), used.length);
-          used.push({ word, wordDegree: degree - 2, pair });
+          used.push({ word, pair });
           added = true;
         }
       }

@@ -1,13 +1,25 @@
+import { bitLength } from '../arith/bits';
 import { factorOverFinite } from './factor-finite';
 import { factorPrimitive } from './factor-rational';
-import { multiplyIntegers, type IntegerPolynomial } from './integer-polynomial';
-import { collected, degreeIn, isConstant, lettersIn, type LetterRing, type MultiPolynomial } from './multivariate';
+import { multiplyIntegers, primitivePart, type IntegerPolynomial } from './integer-polynomial';
+import {
+  coefficientsIn,
+  collected,
+  degreeIn,
+  isConstant,
+  lettersIn,
+  type LetterRing,
+  type MultiPolynomial,
+} from './multivariate';
 import { exactQuotient, normalized } from './multivariate-division';
+import { contentIn } from './multivariate-gcd';
 import { primeField } from './prime-field';
 
 /** Images in one letter up to this degree are factored, and so many factors of an image are combined. */
-const IMAGE_DEGREE = 48;
+const IMAGE_DEGREE = 160;
 const IMAGE_FACTORS = 12;
+/** Numbers that stand for coefficients in other letters have at most this many digits to their large base. */
+const DIGITS = 64;
 
 /** Values that are put for all letters but one, to see that a polynomial is irreducible. */
 const TRIAL_VALUES: readonly (readonly bigint[])[] = [
@@ -20,17 +32,96 @@ const TRIAL_VALUES: readonly (readonly bigint[])[] = [
  * The irreducible factors of a normalized polynomial that has no repeated factor and is primitive in each of its letters, as far as
  * they are found at little cost: otherwise the polynomial itself.
  *
- * In one letter by factoring; in more by L. Kronecker's substitution x_i ↦ z^(D_i), under which polynomials of bounded degree keep
- * all their terms: a factor is seen as a product of factors of the image, and tested by division (D. Knuth, The Art of
- * Computer Programming 2, section 4.6.2). That a polynomial is irreducible is mostly seen sooner, at an image in one letter
- * of the same degree.
+ * All letters but one are replaced so that no term is lost: over ℤ by powers of a large number, over 𝔽_p by powers of the one letter
+ * (L. Kronecker's substitution: D. Knuth, The Art of Computer Programming 2, section 4.6.2). A factor is seen as a product of
+ * factors of this image, written back, and tested by division. That a polynomial is irreducible is mostly seen sooner, at
+ * an image in one letter of the same degree.
  */
 export function factorsOf(ring: LetterRing, f: MultiPolynomial): readonly MultiPolynomial[] {
   const letters = lettersIn(ring, f);
+  if (letters.length > 1 && isSeenIrreducible(ring, f, letters)) return [f];
+  const image = ring.characteristic === 0n ? numberImage(ring, f, letters) : letterImage(ring, f, letters);
+  if (image === undefined) return [f];
+  let pieces = factorImage(ring, image.of);
+  if (pieces.length > IMAGE_FACTORS) return [f];
+  const found: MultiPolynomial[] = [];
+  let rest = f;
+  for (let size = 1; 2 * size <= pieces.length;) {
+    const divisor = firstDivisor(ring, rest, image, pieces, size);
+    if (divisor === undefined) {
+      size += 1;
+      continue;
+    }
+    found.push(divisor.factor);
+    rest = divisor.quotient;
+    pieces = pieces.filter((_, i) => !divisor.used.includes(i));
+  }
+  return isConstant(rest) ? found : [...found, normalized(ring, rest).primitive];
+}
+
+/** An image in one letter, and what a product of its factors comes from if it comes from a factor. */
+interface Image {
+  readonly of: IntegerPolynomial;
+  preimage(product: IntegerPolynomial): MultiPolynomial | undefined;
+}
+
+/** Over 𝔽_p: all letters are powers of one. */
+function letterImage(ring: LetterRing, f: MultiPolynomial, letters: readonly number[]): Image | undefined {
   const places = packed(letters.map((letter) => ({ letter, room: degreeIn(f, letter) + 1 })));
-  if (places.size - 1 > IMAGE_DEGREE) return [f];
-  if (letters.length === 1) return factorImage(ring, imageOf(places, f)).map((g) => preimage(ring, places, g));
-  return isSeenIrreducible(ring, f, letters) ? [f] : combined(ring, f, places);
+  if (places.size - 1 > IMAGE_DEGREE) return undefined;
+  return { of: imageOf(places, f), preimage: (product) => unpacked(ring, places, product) };
+}
+
+/**
+ * Over ℤ: a letter of least degree is kept, the others are powers of a number so large that coefficients are read off as its digits.
+ * A factor g of f = gh is found as lc(h)·g, of which the image is known up to nothing: lc(f) over the leading coefficient of
+ * the product, times the product.
+ */
+function numberImage(ring: LetterRing, f: MultiPolynomial, letters: readonly number[]): Image | undefined {
+  const kept = letters.reduce((best, next) => (degreeIn(f, next) < degreeIn(f, best) ? next : best));
+  const others = letters.filter((letter) => letter !== kept);
+  const places = packed(others.map((letter) => ({ letter, room: degreeIn(f, letter) + 1 })));
+  if (degreeIn(f, kept) > IMAGE_DEGREE || places.size > DIGITS) return undefined;
+  const longest = f.reduce((most, { coefficient }) => Math.max(most, bitLength(coefficient)), 0);
+  const base = 1n << BigInt(4 * longest + 8 * letters.length * degreeIn(f, kept) + 24);
+  const image = [...coefficientsIn(f, kept)].reduce<bigint[]>(
+    (list, [e, coefficient]) => {
+      list[e] = imageOf(places, coefficient).reduceRight((value, digit) => value * base + digit, 0n);
+      return list;
+    },
+    new Array<bigint>(degreeIn(f, kept) + 1).fill(0n),
+  );
+  const lead = image.at(-1) ?? 1n;
+  const of = primitivePart(image);
+  return {
+    of,
+    preimage(product) {
+      const own = product.at(-1) ?? 1n;
+      if (product.some((c) => (c * lead) % own !== 0n)) return undefined;
+      const terms = product.flatMap((c, e) =>
+        unpacked(ring, places, digitsOf((c * lead) / own, base)).map(({ exponents, coefficient }) => ({
+          exponents: exponents.map((x, i) => (i === kept ? e : x)),
+          coefficient,
+        })),
+      );
+      const whole = collected(ring, terms);
+      if (whole.length === 0) return undefined;
+      const primitive = normalized(ring, whole).primitive;
+      return exactQuotient(ring, primitive, contentIn(ring, primitive, kept));
+    },
+  };
+}
+
+/** The digits of a number to a base, of least size: −base/2 < digit ≤ base/2; from the lowest up. */
+function digitsOf(n: bigint, base: bigint): readonly bigint[] {
+  const digits: bigint[] = [];
+  for (let rest = n; rest !== 0n;) {
+    let digit = ((rest % base) + base) % base;
+    if (2n * digit > base) digit -= base;
+    digits.push(digit);
+    rest = (rest - digit) / base;
+  }
+  return digits;
 }
 
 /** Where the monomials of bounded degrees go under Kronecker's substitution: mixed radix numbers. */
@@ -56,7 +147,7 @@ function imageOf({ letters, size }: Places, f: MultiPolynomial): IntegerPolynomi
   return withoutZeros(image);
 }
 
-const preimage = (ring: LetterRing, { letters }: Places, image: IntegerPolynomial): MultiPolynomial =>
+const unpacked = (ring: LetterRing, { letters }: Places, image: readonly bigint[]): MultiPolynomial =>
   collected(
     ring,
     image.map((coefficient, at) => {
@@ -80,7 +171,7 @@ function factorImage(ring: LetterRing, image: IntegerPolynomial): readonly Integ
   const doing = 'factoring a polynomial in several letters';
   const powers =
     ring.characteristic === 0n
-      ? factorPrimitive(image.at(-1)! < 0n ? image.map((c) => -c) : image, ring.budget, doing)
+      ? factorPrimitive(image, ring.budget, doing)
       : factorOverFinite(primeField(ring.characteristic), image, ring.budget, doing).factors;
   return powers.flatMap(({ factor, exponent }) => new Array<IntegerPolynomial>(exponent).fill(factor));
 }
@@ -101,27 +192,8 @@ function isSeenIrreducible(ring: LetterRing, f: MultiPolynomial, letters: readon
     );
     if (degreeIn(image, letter) !== degreeIn(f, letter)) return false;
     const places = packed([{ letter, room: degreeIn(f, letter) + 1 }]);
-    return factorImage(ring, imageOf(places, normalized(ring, image).primitive)).length === 1;
+    return factorImage(ring, primitivePart(imageOf(places, image))).length === 1;
   });
-}
-
-/** Factors found as products of factors of the image, products of few first. */
-function combined(ring: LetterRing, f: MultiPolynomial, places: Places): readonly MultiPolynomial[] {
-  let pieces = factorImage(ring, imageOf(places, f));
-  if (pieces.length > IMAGE_FACTORS) return [f];
-  const found: MultiPolynomial[] = [];
-  let rest = f;
-  for (let size = 1; 2 * size <= pieces.length;) {
-    const divisor = firstDivisor(ring, rest, places, pieces, size);
-    if (divisor === undefined) {
-      size += 1;
-      continue;
-    }
-    found.push(divisor.factor);
-    rest = divisor.quotient;
-    pieces = pieces.filter((_, i) => !divisor.used.includes(i));
-  }
-  return isConstant(rest) ? found : [...found, normalized(ring, rest).primitive];
 }
 
 interface Divisor {
@@ -133,15 +205,14 @@ interface Divisor {
 function firstDivisor(
   ring: LetterRing,
   f: MultiPolynomial,
-  places: Places,
+  image: Image,
   pieces: readonly IntegerPolynomial[],
   size: number,
 ): Divisor | undefined {
   for (const used of choices(pieces.length, size)) {
     ring.budget.spend('factoring a polynomial in several letters');
-    const image = used.map((i) => pieces[i] ?? [1n]).reduce(multiplyIntegers);
-    const candidate = preimage(ring, places, image);
-    if (isConstant(candidate)) continue;
+    const candidate = image.preimage(used.map((i) => pieces[i] ?? [1n]).reduce(multiplyIntegers));
+    if (candidate === undefined || isConstant(candidate)) continue;
     const factor = normalized(ring, candidate).primitive;
     const quotient = exactQuotient(ring, f, factor);
     if (quotient !== undefined && !isConstant(quotient)) return { factor, quotient, used };

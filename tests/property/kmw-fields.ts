@@ -20,6 +20,10 @@ export interface FieldRow {
   readonly sums: boolean;
   /** More than one unit, so that a and 1 − a can both be units. */
   readonly steinberg: boolean;
+  /** Normal forms are canonical. */
+  readonly canonical: boolean;
+  /** The degree in which a verdict may stay open. */
+  readonly open?: number;
   readonly label: string;
 }
 
@@ -83,6 +87,30 @@ function extensionUnit(
     );
 }
 
+/** Rational functions of low degree in t with constants of the field below: polynomials, quotients and powers. */
+export function functionUnit(constant: fc.Arbitrary<Element>): fc.Arbitrary<Element> {
+  const t = letterElement('t');
+  const coefficient = fc.oneof({ weight: 1, arbitrary: fc.constant(undefined) }, { weight: 2, arbitrary: constant });
+  const polynomial = fc
+    .tuple(constant, fc.array(coefficient, { minLength: 1, maxLength: 2 }))
+    .map(([lead, lower]) =>
+      sumElement([
+        productElement([lead, lower.length === 1 ? t : powerElement(t, lower.length)]),
+        ...lower.flatMap((c, i) => (c === undefined ? [] : [i === 0 ? c : productElement([c, t])])),
+      ]),
+    );
+  const linear = constant.map((c) => sumElement([t, c]));
+  const low = fc.oneof({ weight: 2, arbitrary: linear }, { weight: 1, arbitrary: fc.constant(t) });
+  return fc.oneof(
+    { weight: 4, arbitrary: low },
+    { weight: 2, arbitrary: polynomial },
+    { weight: 2, arbitrary: constant },
+    { weight: 1, arbitrary: fc.tuple(low, fc.integer({ min: -2, max: 3 })).map(([f, n]) => powerElement(f, n)) },
+    { weight: 1, arbitrary: fc.tuple(polynomial, low).map(([f, g]) => quotientElement(f, g)) },
+    { weight: 1, arbitrary: fc.tuple(constant, low, low).map((factors) => productElement(factors)) },
+  );
+}
+
 /** ± products of letters. */
 export function monomialUnit(letters: readonly string[] = ['a', 'b', 'x', 'y']): fc.Arbitrary<Element> {
   const power_ = fc
@@ -100,6 +128,7 @@ const row = (name: string, unit: fc.Arbitrary<Element>, more: Partial<FieldRow> 
   conditions: [],
   sums: true,
   steinberg: true,
+  canonical: true,
   label: name,
   ...more,
 });
@@ -114,6 +143,11 @@ const letters = (characteristic: number): FieldRow =>
 
 const prime = (p: number): FieldRow => row(`F_${p}`, primeFieldUnit(p), { steinberg: p > 2 });
 const extension = (p: number, d: number): FieldRow => row(`F_${p ** d}`, extensionUnit(p, [['z', d]]));
+
+const smallRational = fc.oneof(
+  { weight: 3, arbitrary: fc.constantFrom(1, -1, 2, -2, 3, 5).map(integer) },
+  { weight: 1, arbitrary: fc.constantFrom(2, 3).map((n) => quotientElement(integer(1), integer(n))) },
+);
 
 /** Every kind of field the engine decides over. */
 export const fieldRows: readonly FieldRow[] = [
@@ -136,6 +170,9 @@ export const fieldRows: readonly FieldRow[] = [
       ['y', 2],
     ]),
   ),
+  ...[2, 7].map((p) => row(`F_${p}(t)`, functionUnit(primeFieldUnit(p)))),
+  ...([2, 3] as const).map((p) => row(`F_${p * p}(t)`, functionUnit(extensionUnit(p, [['z', 2]])))),
+  row('Q(t)', functionUnit(smallRational), { canonical: false, open: 3 }),
   ...[0, 2, 3, 5].map(letters),
 ];
 

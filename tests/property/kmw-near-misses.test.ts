@@ -86,7 +86,9 @@ describe('values at which a near miss is true', () => {
 describe('three symbols turned round', () => {
   it('differ in letters, though over every finite field and over Q_p nothing is left of them', () => {
     expectVerdict('different', 'any', '[a][b][c]', '[b][a][c]');
-    for (const { name, unit, sums } of fieldRows.filter((row) => row.sums && !['Q', 'R', 'C'].includes(row.name))) {
+    for (const { name, unit, sums } of fieldRows.filter(
+      (row) => row.sums && !['Q', 'R', 'C', 'Q(t)'].includes(row.name),
+    )) {
       expect(sums).toBe(true);
       fc.assert(
         fc.property(unit, unit, unit, (a, b, c) => {

@@ -7,23 +7,23 @@ import { fits, identities, integers, relations, sideOf } from './kmw-identities'
 import { difference, substitute, word } from './kmw-words';
 
 describe.each(fieldRows.map((row) => [row.label, row] as const))('canonical forms over %s', (_, row) => {
-  const { name, unit, conditions } = row;
+  const { name, unit, conditions, canonical } = row;
   const small = word(unit, { terms: 3, factors: 3, nested: false });
   const rows = [...relations, ...identities].filter((identity) => fits(identity, row));
 
-  it('read back as the same element, and are their own canonical form', () => {
+  it('read back as the same element, and are their own canonical form where that is promised', () => {
     fc.assert(
       fc.property(word(unit), (u) => {
         const text = canonicalText(name, u, conditions);
         const form = canonicalForm(name, u, conditions);
         expectVerdict('equal', name, u, form, conditions);
-        expect(canonicalText(name, form, conditions)).toBe(text);
+        if (canonical) expect(canonicalText(name, form, conditions)).toBe(text);
       }),
       { numRuns: 30 },
     );
   });
 
-  it('agree after a relation or an identity was used inside a word', () => {
+  it.runIf(canonical)('agree after a relation or an identity was used inside a word', () => {
     const instance = fc.record({
       identity: fc.constantFrom(...rows),
       numbers: integers,
@@ -51,7 +51,7 @@ describe.each(fieldRows.map((row) => [row.label, row] as const))('canonical form
     );
   });
 
-  it('are the same texts exactly where the words are equal', () => {
+  it.runIf(canonical)('are the same texts exactly where the words are equal', () => {
     const rather = word(unit, { terms: 1, factors: 2, nested: false });
     const verdicts = { equal: 0, different: 0, undecided: 0 };
     fc.assert(
@@ -67,7 +67,7 @@ describe.each(fieldRows.map((row) => [row.label, row] as const))('canonical form
     expect(verdicts.different).toBeGreaterThan(10);
   });
 
-  it('of a sum, a product and a difference are those of the canonical forms', () => {
+  it.runIf(canonical)('of a sum, a product and a difference are those of the canonical forms', () => {
     fc.assert(
       fc.property(small, small, (u, v) => {
         const [x, y] = [canonicalForm(name, u, conditions), canonicalForm(name, v, conditions)];
