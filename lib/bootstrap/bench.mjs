@@ -1,5 +1,6 @@
 // npm run bench [name …]: runs tests/bench/<name>.ts, all of them when none is named, each in a process of its own. Those
 // whose name begins with "rest" find a built and running server's address in QUADREL_URL.
+import { randomBytes } from 'node:crypto';
 import fs from 'node:fs';
 import path from 'node:path';
 import { ensureBuild, nextEnvironment, nextProgram } from './build.mjs';
@@ -18,7 +19,15 @@ async function serve(run) {
   const port = await freePort();
   const url = `http://127.0.0.1:${port}`;
   const databaseUrl = adminUrl.replace(/\/postgres$/, `/${template}`);
-  const settings = { PORT: String(port), DATABASE_URL: databaseUrl, COMPUTE_QUOTA_PER_MINUTE: '0' };
+  const settings = {
+    PORT: String(port),
+    DATABASE_URL: databaseUrl,
+    NEXTAUTH_SECRET: randomBytes(32).toString('base64url'),
+    NEXTAUTH_URL: url,
+    PUBLIC_URL: url,
+    COMPUTE_QUOTA_PER_MINUTE: '0',
+    TOKEN_QUOTA_PER_MINUTE: '0',
+  };
   const server = run.start(process.execPath, [nextProgram, 'start', '-H', '127.0.0.1', '-p', String(port)], {
     stdio: ['ignore', 'ignore', 'inherit'],
     env: { ...process.env, ...nextEnvironment, NODE_ENV: 'production', ...settings },

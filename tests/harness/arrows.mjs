@@ -18,7 +18,7 @@ export const rooms = [
   { room: 'models', rooms: [], packages: ['sequelize'] },
   { room: 'migrations', rooms: [], packages: ['sequelize'] },
   { room: 'seeders', rooms: [], packages: ['sequelize'] },
-  { room: 'lib/contracts', rooms: [], packages: ['zod'] },
+  { room: 'lib/contracts', rooms: ['models/identity-words'], packages: ['zod'] },
   {
     room: 'lib/compute',
     rooms: ['engine', 'grammar', 'lib/contracts', 'lib/config'],
@@ -28,9 +28,14 @@ export const rooms = [
   {
     room: 'lib/database',
     rooms: ['lib/config', 'models'],
-    packages: ['sequelize', 'pg', 'umzug', 'server-only', 'node'],
+    packages: ['sequelize', 'pg', 'umzug', 'graphile-worker', 'server-only', 'node'],
   },
-  { room: 'lib/bootstrap', rooms: ['lib/database'], packages: ['esbuild', 'pg', 'node'] },
+  { room: 'lib/bootstrap', rooms: ['lib/database'], packages: ['esbuild', 'pg', 'smtp-server', 'node'] },
+  {
+    room: 'lib/register',
+    rooms: ['lib', 'models', 'grammar', 'engine/expression'],
+    packages: ['sequelize', 'server-only', 'node'],
+  },
   { room: 'lib', rooms: ['lib', 'models', 'engine/version'], packages: 'any' },
   { room: 'app', rooms: ['lib', 'grammar', 'engine/expression', 'engine/version', 'package.json'], packages: 'any' },
   { room: 'package.json', rooms: [], packages: [] },
