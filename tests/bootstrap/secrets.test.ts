@@ -4,11 +4,11 @@ import path from 'node:path';
 import { describe, expect, test } from 'vitest';
 import { makeStateFolder } from './launcher';
 
-const module = path.resolve(import.meta.dirname, '../../lib/bootstrap/secrets.mjs');
+const program = path.resolve(import.meta.dirname, '../../lib/bootstrap/secrets.mjs');
 
 /** The secrets as a launcher of its own process gets them, for the folder is chosen when a process begins. */
 const secretsIn = (state: string): Record<string, string> => {
-  const script = `import(${JSON.stringify(module)}).then(({ secrets }) => console.log(JSON.stringify(secrets())))`;
+  const script = `import(${JSON.stringify(program)}).then(({ secrets }) => console.log(JSON.stringify(secrets())))`;
   const options = { encoding: 'utf8', env: { ...process.env, QUADREL_STATE_FOLDER: state } } as const;
   return JSON.parse(execFileSync(process.execPath, ['-e', script], options)) as Record<string, string>;
 };
