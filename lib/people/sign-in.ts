@@ -2,7 +2,7 @@ import 'server-only';
 import { database } from '@/lib/database/connection';
 import { User } from '@/models/user';
 import { isPassword } from './passwords';
-import { attempt, forgive } from './throttle';
+import { attempt, forgive, giveBack } from './throttle';
 
 export type SignedIn =
   | { readonly outcome: 'right'; readonly id: string; readonly version: number }
@@ -18,6 +18,7 @@ export async function checkPassword(email: string, password: string, address: st
   database();
   const user = await User.findOne({ where: { email: account } });
   if (!(await isPassword(password, user?.passwordHash)) || user === null) return { outcome: 'wrong' };
-  await forgive('sign-in-account', account);
+  // A whole institute may come from one address: what is right does not count against the others.
+  await Promise.all([forgive('sign-in-account', account), giveBack('sign-in-address', address)]);
   return { outcome: 'right', id: user.id, version: user.sessionVersion };
 }
