@@ -13,10 +13,11 @@ const tasks: TaskList = Object.fromEntries(
   Object.keys(jobs).map((name) => [name, (payload, { abortSignal }) => perform(name, payload, abortSignal)]),
 );
 
-/** What went wrong goes to the errors, what was done to the log; what is merely going on is not written down. */
+const tell = (text: string): void => void process.stdout.write(`${text}\n`);
+
+/** What went wrong is said where a person sees it, what was done stands in the log. */
 const logger = new Logger(() => (level, message) => {
   if (level === 'error' || level === 'warning') process.stderr.write(`Jobs: ${message}\n`);
-  else if (level === 'info') process.stdout.write(`${message}\n`);
 });
 
 async function work(): Promise<void> {
@@ -47,6 +48,7 @@ async function work(): Promise<void> {
       ],
     },
   });
+  runner.events.on('job:success', ({ job }) => tell(`Done: ${job.task_identifier}, job ${job.id}.`));
   const release = releaser();
   const look = setInterval(() => void release().catch(() => undefined), betweenLooks);
   let ending = false;
@@ -55,7 +57,7 @@ async function work(): Promise<void> {
     ending = true;
   };
   for (const signal of ['SIGINT', 'SIGTERM'] as const) process.on(signal, end);
-  process.stdout.write('Jobs are being done.\n');
+  tell('Jobs are being done.');
   await runner.promise;
   clearInterval(look);
   for (const shown of present.values()) await (await shown)();
