@@ -3,11 +3,13 @@ import type { Transaction } from 'sequelize';
 import { record } from '@/lib/audit/record';
 import { database } from '@/lib/database/connection';
 import { slugsNear } from '@/lib/contracts/slug';
+import { waitWords } from '@/lib/contracts/wait';
 import { Group } from '@/models/group';
 import { Membership } from '@/models/membership';
 import { User } from '@/models/user';
 import { hashPassword } from './passwords';
 import { type Refused, refuse } from './refused';
+import { attempt } from './throttle';
 import { brokenConstraint } from './unique';
 
 /** Who starts a group: someone with an account, or someone who makes one with it. */
@@ -21,11 +23,17 @@ export interface Started {
   readonly slug: string;
 }
 
-/** Starts a group: the account if there is none yet, the group, and its first steward, all of them or nothing. */
+/**
+ * Starts a group: the account if there is none yet, the group, and its first steward, all of them or nothing. Starts are
+ * counted by the address of the network they come from.
+ */
 export async function startGroup(
   wanted: { readonly name: string; readonly slug: string },
   founder: Founder,
+  address: string,
 ): Promise<Started | Refused> {
+  const seconds = await attempt('start-address', address);
+  if (seconds !== undefined) return refuse(waitWords(seconds));
   // Hashing takes long, and no transaction should wait for it.
   const passwordHash = 'password' in founder ? await hashPassword(founder.password) : undefined;
   try {
