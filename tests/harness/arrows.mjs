@@ -18,7 +18,7 @@ export const rooms = [
   { room: 'models', rooms: [], packages: ['sequelize'] },
   { room: 'migrations', rooms: [], packages: ['sequelize'] },
   { room: 'seeders', rooms: [], packages: ['sequelize'] },
-  { room: 'lib/contracts', rooms: ['models/identity-words'], packages: ['zod'] },
+  { room: 'lib/contracts', rooms: ['models/identity-words', 'models/role', 'models/scope'], packages: ['zod'] },
   {
     room: 'lib/compute',
     rooms: ['engine', 'grammar', 'lib/contracts', 'lib/config'],
@@ -33,8 +33,8 @@ export const rooms = [
   { room: 'lib/bootstrap', rooms: ['lib/database'], packages: ['esbuild', 'pg', 'smtp-server', 'node'] },
   {
     room: 'lib/register',
-    rooms: ['lib', 'models', 'grammar', 'engine/expression'],
-    packages: ['sequelize', 'server-only', 'node'],
+    rooms: ['lib', 'models', 'grammar', 'engine/expression', 'engine/version'],
+    packages: ['sequelize', 'zod', 'server-only', 'node'],
   },
   { room: 'lib', rooms: ['lib', 'models', 'engine/version'], packages: 'any' },
   { room: 'app', rooms: ['lib', 'grammar', 'engine/expression', 'engine/version', 'package.json'], packages: 'any' },
