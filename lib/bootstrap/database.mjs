@@ -1,4 +1,4 @@
-import { startCluster } from './cluster.mjs';
+import { hasCluster, runningCluster, startCluster } from './cluster.mjs';
 import { Trouble, say } from './trouble.mjs';
 
 /** The driver is there only after the packages were installed. */
@@ -79,6 +79,26 @@ export async function openDatabase(run) {
   await migrateAndSeed(url);
   return { url, server: cluster.server };
 }
+
+/**
+ * The address of the database as it stands, neither migrated nor seeded: the one DATABASE_URL names, else the one of this clone's
+ * cluster, which is started for it unless another run keeps it running.
+ */
+export async function reachDatabase(run) {
+  const given = process.env.DATABASE_URL;
+  if (given) {
+    await requireDatabase(given);
+    return given;
+  }
+  const running = runningCluster();
+  if (running !== undefined) return running('quadrel');
+  const cluster = await startCluster(run);
+  await requireDatabase(cluster.url('postgres'));
+  return createDatabase(cluster, 'quadrel');
+}
+
+/** Whether there is a database to reach, without making one. */
+export const hasDatabase = () => Boolean(process.env.DATABASE_URL) || hasCluster();
 
 /** A throw-away cluster with a migrated and seeded database from which tests copy theirs. */
 export async function openTestCluster(run) {
