@@ -3,6 +3,7 @@ import { isAnswer, type Reply } from '@/lib/compute/request';
 import type { IdentitySummary } from '@/lib/contracts/identity-answer';
 import type { ExportFormat, ExportQuery } from '@/lib/contracts/identity-query';
 import { csvLine } from '@/lib/export/csv';
+import type { SentFile } from '@/lib/http/sent-file';
 import type { Member } from '@/lib/people/caller';
 import { citation } from './citation';
 import { type Conditions, conditionsOf } from './filter';
@@ -10,21 +11,13 @@ import { pageOf } from './list';
 import { summaryOf } from './present';
 import { identityTex } from './write-tex';
 
-/** A file that is written while it is read. */
-export interface ExportFile {
-  readonly type: string;
-  /** The name under which a browser keeps it. */
-  readonly name: string;
-  readonly chunks: AsyncIterable<string>;
-}
-
 const portion = 500;
 
 /** The whole register under the given filters as one file, by number, so that what changes meanwhile shifts nothing. */
 export async function exportIdentities(
   member: Member,
   { format, state, ...filters }: ExportQuery,
-): Promise<Reply<ExportFile>> {
+): Promise<Reply<SentFile>> {
   const read = conditionsOf(member.group.id, filters);
   if (!isAnswer(read)) return read;
   const conditions = read.answer;
