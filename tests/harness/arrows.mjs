@@ -36,6 +36,7 @@ export const rooms = [
     rooms: ['lib', 'models', 'grammar', 'engine/expression', 'engine/version'],
     packages: ['sequelize', 'zod', 'server-only', 'node'],
   },
+  { room: 'lib/mail', rooms: ['lib/config'], packages: ['nodemailer', 'server-only'] },
   { room: 'lib', rooms: ['lib', 'models', 'engine/version'], packages: 'any' },
   { room: 'app', rooms: ['lib', 'grammar', 'engine/expression', 'engine/version', 'package.json'], packages: 'any' },
   { room: 'package.json', rooms: [], packages: [] },
