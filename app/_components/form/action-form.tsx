@@ -1,7 +1,16 @@
 'use client';
 
 import { unstable_rethrow } from 'next/navigation';
-import { startTransition, useActionState, useEffect, useMemo, useRef, type FormEvent, type ReactNode } from 'react';
+import {
+  Fragment,
+  startTransition,
+  useActionState,
+  useEffect,
+  useMemo,
+  useRef,
+  type FormEvent,
+  type ReactNode,
+} from 'react';
 import { Slip } from '../slip/slip';
 import { FormContext } from './form-context';
 import { unsent, type FormAction, type FormState } from './form-state';
@@ -11,12 +20,20 @@ interface Props {
   /** Names the form where no heading does. */
   label?: string;
   className?: string;
-  /** Empties the form once it is done, for the next one. */
+  /** Once it is done the form begins anew, for the next one. */
   clears?: boolean;
   /** Told of every answer that has no error. */
   onDone?: (state: FormState) => void;
   children: ReactNode;
 }
+
+interface Answered {
+  readonly state: FormState;
+  /** How often it was done. */
+  readonly round: number;
+}
+
+const writingPlaces = 'input:not([type=hidden], [hidden]), textarea, select';
 
 /** What the form says when the server did not answer, or not as it should. */
 const unanswered: FormState = {
@@ -28,13 +45,15 @@ const unanswered: FormState = {
  * field that has to change gets the focus, and what concerns the whole form is said above it.
  */
 export function ActionForm({ action, label, className, clears = false, onDone, children }: Props) {
-  const [state, send, pending] = useActionState(
-    (before: FormState, form: FormData) =>
-      action(before, form).catch((error: unknown) => {
+  const [{ state, round }, send, pending] = useActionState(
+    async (before: Answered, form: FormData): Promise<Answered> => {
+      const state = await action(before.state, form).catch((error: unknown) => {
         unstable_rethrow(error);
         return { ...unanswered };
-      }),
-    unsent,
+      });
+      return { state, round: before.round + (state.done === undefined ? 0 : 1) };
+    },
+    { state: unsent, round: 0 },
   );
   const form = useRef<HTMLFormElement>(null);
   const sent = useMemo(() => ({ state, pending }), [state, pending]);
@@ -50,7 +69,7 @@ export function ActionForm({ action, label, className, clears = false, onDone, c
     if (state.errors !== undefined)
       form.current?.querySelector<HTMLElement>('[aria-invalid=true], [aria-invalid=true] [tabindex="0"]')?.focus();
     else if (state.fault === undefined) {
-      if (clears) form.current?.reset();
+      if (clears) form.current?.querySelector<HTMLElement>(writingPlaces)?.focus();
       told.current?.(state);
     }
   }, [state, clears]);
@@ -76,7 +95,7 @@ export function ActionForm({ action, label, className, clears = false, onDone, c
             <Slip kind="good">{state.done}</Slip>
           </div>
         )}
-        {children}
+        <Fragment key={clears ? round : 0}>{children}</Fragment>
       </form>
     </FormContext>
   );
