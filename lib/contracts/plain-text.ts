@@ -1,7 +1,7 @@
 import { z } from 'zod';
 
 /** What is no text: controls, halves of characters, other ends of line, and what turns the direction of what follows. */
-const hidden = /[\p{Cc}\p{Cs}\u2028\u2029\u202a-\u202e\u2066-\u2069]/u;
+export const hidden = /[\p{Cc}\p{Cs}\u2028\u2029\u202a-\u202e\u2066-\u2069]/u;
 /** The same, but for the end of a line and the tab. */
 const hiddenInLines = /[^\P{Cc}\n\t]|[\p{Cs}\u2028\u2029\u202a-\u202e\u2066-\u2069]/u;
 

@@ -25,16 +25,20 @@ async function withDatabase(url, work) {
   }
 }
 
-const runner = (database, folder, storage) =>
+const runner = (context, folder, storage) =>
   new Umzug({
     migrations: { glob: [`${folder}/*.mjs`, { cwd: root }] },
-    context: database.getQueryInterface(),
+    context,
     storage,
     logger: undefined,
   });
 
 const migrations = (database) =>
-  runner(database, 'migrations', new SequelizeStorage({ sequelize: database, tableName: 'migrations' }));
+  runner(
+    database.getQueryInterface(),
+    'migrations',
+    new SequelizeStorage({ sequelize: database, tableName: 'migrations' }),
+  );
 
 const names = (steps) => steps.map((step) => step.name);
 
@@ -56,6 +60,12 @@ export const rollBack = (url) =>
     return names(await migrations(database).down({ to: 0 }));
   });
 
-/** Runs every seeder. Each one may be run any number of times. */
-export const seed = (url) =>
-  withDatabase(url, async (database) => names(await runner(database, 'seeders', memoryStorage()).up()));
+/**
+ * Runs every seeder. Each one may be run any number of times. With `demo` a database in which nobody has an account gets the
+ * invented groups, whose passwords everyone knows.
+ */
+export const seed = (url, { demo = false } = {}) =>
+  withDatabase(url, async (database) => {
+    const context = { queryInterface: database.getQueryInterface(), demo };
+    return names(await runner(context, 'seeders', memoryStorage()).up());
+  });

@@ -1,26 +1,32 @@
 import 'server-only';
 import { QueryTypes, type Transaction } from 'sequelize';
 import { record } from '@/lib/audit/record';
+import { hidden } from '@/lib/contracts/plain-text';
 import { database } from '@/lib/database/connection';
 import type { Member } from '@/lib/people/caller';
+import { type Refused, refuse } from '@/lib/people/refused';
 import { hashSecret, newSecret } from '@/lib/people/secret-text';
-import { roleMay } from '@/lib/permissions';
 import { ApiToken } from '@/models/api-token';
 import type { MemberRole } from '@/models/role';
-import { type Scope, scopes as allScopes } from '@/models/scope';
+import { scopes as allScopes } from '@/models/scope';
 import { longestLife, longestTokenName, mostTokens, shortestLife } from './limits';
+import { scopesOf } from './scopes';
 
 export interface TokenWish {
   readonly name: string;
-  readonly scopes: readonly Scope[];
+  /** Of the scopes those that the token is to have; other words are none. */
+  readonly scopes: readonly string[];
   /** Days from now on which it holds. */
   readonly days: number;
 }
 
-export type TokenMade =
-  | { readonly outcome: 'made'; readonly id: string; readonly secret: string; readonly expiresAt: Date }
-  /** `at` says which part of the wish has to change; `token` when it is none of them. */
-  | { readonly outcome: 'refused'; readonly at: 'name' | 'scopes' | 'days' | 'token'; readonly why: string };
+export interface TokenMade {
+  readonly id: string;
+  readonly name: string;
+  /** The token itself, here and nowhere else. */
+  readonly secret: string;
+  readonly expiresAt: Date;
+}
 
 const millisecondsADay = 24 * 3600 * 1000;
 /** Characters of the end of a token that are kept, so that its owner knows it again; the rest has more than 200 random bits. */
@@ -30,20 +36,19 @@ const endingLength = 4;
  * Makes a token by which a script acts for the member in the group. The secret is in what is returned and nowhere else: only
  * its hash is kept.
  */
-export async function makeToken(member: Member, wish: TokenWish): Promise<TokenMade> {
+export async function makeToken(member: Member, wish: TokenWish): Promise<TokenMade | Refused> {
   const name = wish.name.trim().normalize('NFC');
   const scopes = allScopes.filter((scope) => wish.scopes.includes(scope));
   const wrong = faultOf({ name, scopes, days: wish.days });
   if (wrong !== undefined) return wrong;
   return database().transaction(async (transaction) => {
     const role = await roleUnderLock(member, transaction);
-    if (role === undefined)
-      return refuse('token', 'You are no longer in this group, so no token can act for you in it.');
-    if (scopes.includes('write') && !roleMay(role, 'identity-write'))
-      return refuse('scopes', 'A reader changes nothing, so a token of yours cannot write. Leave out write.');
+    if (role === undefined) return refuse('You are no longer in this group, so no token can act for you in it.');
+    if (!scopes.every((scope) => scopesOf(role).includes(scope)))
+      return refuse('A reader changes nothing, so a token of yours cannot write. Leave out write.', 'scopes');
     const live = await countLive(member, transaction);
     if (live >= mostTokens)
-      return refuse('token', `You have ${live} tokens that work, and ${mostTokens} are the most. Revoke one first.`);
+      return refuse(`You have ${live} tokens that work, and ${mostTokens} are the most. Revoke one first.`);
     const secret = `qdl_${newSecret()}`;
     const made = await ApiToken.create(
       {
@@ -59,24 +64,18 @@ export async function makeToken(member: Member, wish: TokenWish): Promise<TokenM
     );
     const deed = { groupId: member.group.id, actor: member.person, action: 'token-made', subject: name } as const;
     await record({ ...deed, detail: { scopes: scopes.join(', '), days: wish.days } }, transaction);
-    return { outcome: 'made', id: made.id, secret, expiresAt: made.expiresAt };
+    return { id: made.id, name, secret, expiresAt: made.expiresAt };
   });
 }
 
-const refuse = (at: (TokenMade & { outcome: 'refused' })['at'], why: string): TokenMade => ({
-  outcome: 'refused',
-  at,
-  why,
-});
-
-function faultOf({ name, scopes, days }: TokenWish): TokenMade | undefined {
-  if (name === '') return refuse('name', 'Give the token a name, such as the script that will use it.');
+function faultOf({ name, scopes, days }: TokenWish): Refused | undefined {
+  if (name === '') return refuse('Give the token a name, such as the script that will use it.', 'name');
   if ([...name].length > longestTokenName)
-    return refuse('name', `A name has at most ${longestTokenName} characters; this one has ${[...name].length}.`);
-  if (/[\p{Cc}\p{Cs}]/u.test(name)) return refuse('name', 'A name is one line of text without control characters.');
-  if (scopes.length === 0) return refuse('scopes', 'Choose at least one thing that the token may do.');
+    return refuse(`A name has at most ${longestTokenName} characters; this one has ${[...name].length}.`, 'name');
+  if (hidden.test(name)) return refuse('A name is one line of text without control characters.', 'name');
+  if (scopes.length === 0) return refuse('Choose at least one thing that the token may do.', 'scopes');
   if (!Number.isInteger(days) || days < shortestLife || days > longestLife)
-    return refuse('days', `Give a whole number of days from ${shortestLife} to ${longestLife}.`);
+    return refuse(`Give a whole number of days from ${shortestLife} to ${longestLife}.`, 'days');
   return undefined;
 }
 

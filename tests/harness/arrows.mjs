@@ -17,7 +17,7 @@ export const rooms = [
   { room: 'grammar', rooms: ['engine/expression'], packages: ['ohm-js'] },
   { room: 'models', rooms: [], packages: ['sequelize'] },
   { room: 'migrations', rooms: [], packages: ['sequelize'] },
-  { room: 'seeders', rooms: [], packages: ['sequelize'] },
+  { room: 'seeders', rooms: [], packages: ['sequelize', '@node-rs/argon2', 'node'] },
   { room: 'lib/contracts', rooms: ['models/identity-words', 'models/role', 'models/scope'], packages: ['zod'] },
   {
     room: 'lib/compute',
