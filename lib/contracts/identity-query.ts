@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { checkVerdicts, identityStates } from '@/models/identity-words';
 import { identitySummary } from './identity-answer';
 import { tag } from './identity-content';
+import { oneLine } from './plain-text';
 
 /** What the register can be sorted by; a hyphen before it turns the order round. */
 export const sorts = ['changed', '-changed', 'name', '-name', 'number', '-number', 'state', '-state'] as const;
@@ -31,7 +32,7 @@ const filters = {
   degree: whole(-100_000, 100_000, 'A degree in which the statement was checked.').optional(),
   verdict: z.enum(checkVerdicts).optional().describe('What the last check of the current revision found.'),
   tag: tag.optional(),
-  keeper: z.string().max(200).optional().describe('The name of the one who kept it.'),
+  keeper: oneLine(200).optional().describe('The name of the one who kept it.'),
 };
 
 export const identityFilters = z.strictObject(filters);
