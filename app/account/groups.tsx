@@ -32,7 +32,7 @@ export function Groups({ seats, current }: Props) {
               {seat.name}
             </th>
             <td className="path">{seat.slug}</td>
-            <td>{seat.role}</td>
+            <td data-label="as">{seat.role}</td>
             <td>
               {seat.id === current ? (
                 <Link href="/group">You are here</Link>

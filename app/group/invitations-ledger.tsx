@@ -22,12 +22,12 @@ export function InvitationsLedger({ slug, invitations }: Props) {
         <Ledger caption="Invitations that wait to be accepted" head={head} narrow="stack">
           {invitations.map(({ id, email, role, invitedBy, expiresAt, expired }) => (
             <tr key={id}>
-              <th scope="row" className="break-all">
+              <th scope="row" className="break-all font-sans text-ui">
                 {email}
               </th>
               <td>{role}</td>
-              <td>{invitedBy ?? 'someone who has left'}</td>
-              <td>
+              <td data-label="invited by">{invitedBy ?? 'someone who has left'}</td>
+              <td data-label="good until">
                 {longDay(expiresAt.toISOString())}
                 {expired && ', run out'}
               </td>

@@ -7,7 +7,7 @@ import { may } from '@/lib/permissions';
 import { ActionForm } from '../_components/form/action-form';
 import { Field } from '../_components/form/field';
 import { SendButton } from '../_components/form/send-button';
-import { countFirst, longDay } from '../_components/register/telling';
+import { countWithin, longDay } from '../_components/register/telling';
 import { Colophon } from '../_components/shell/colophon';
 import { Row } from '../_components/shell/row';
 import { rename } from './actions';
@@ -40,8 +40,10 @@ export default async function GroupPage() {
           <div>
             <h1 className="text-title">{group.name}</h1>
             <p className="text">
-              {members.length === 1 ? 'One member.' : `${countFirst(members.length)} members.`} Its identities are{' '}
-              {group.slug}-1, {group.slug}-2 and so on. You are {group.role} here.
+              {members.length === 1
+                ? `You are its only member so far, as ${group.role}.`
+                : `You are one of ${countWithin(members.length)} members, as ${group.role}.`}{' '}
+              Keys of its identities begin with {group.slug}: {group.slug}-1, {group.slug}-2.
             </p>
           </div>
         </div>

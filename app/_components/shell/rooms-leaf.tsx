@@ -30,7 +30,7 @@ export function RoomsLeaf({ open, onClose, who: { person, group } }: Props) {
       </nav>
       <nav className="room-list mt-6" aria-label="Group and person">
         {group !== undefined && (
-          <Link className="it" href="/group" aria-current={current('/group')} onClick={onClose}>
+          <Link className="italic" href="/group" aria-current={current('/group')} onClick={onClose}>
             {group}
           </Link>
         )}

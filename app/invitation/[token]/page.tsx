@@ -26,7 +26,7 @@ export default async function InvitationPage({ params }: { params: Promise<{ tok
       {open !== undefined && (
         <Door
           title={`Join “${open.groupName}”`}
-          lead={`${open.invitedBy ?? 'A steward'} invites ${open.email} as ${open.role}. The invitation is good until ${longDay(open.expiresAt.toISOString())}.`}
+          lead={`${open.invitedBy ?? 'A steward'} invites ${open.email} as ${open.role}. The invitation is good until ${longDay(open.expiresAt.toISOString()).replaceAll(' ', '\u00a0')}.`}
         >
           <JoinForm token={token} email={open.email} hasAccount={open.hasAccount} person={person} />
         </Door>
