@@ -1,3 +1,4 @@
+import './audit.css';
 import Link from 'next/link';
 import { auditActions } from '@/lib/audit/actions';
 import { type AuditFilter, isNarrowed } from '@/lib/audit/filter';

@@ -7,8 +7,17 @@ import { ActionForm } from '../form/action-form';
 import { SendButton } from '../form/send-button';
 import { Leaf } from '../leaf/leaf';
 
+interface Props {
+  /** Short name of the group it belongs to. */
+  group: string;
+  id: string;
+  name: string;
+  /** Whose it is, when it is not one's own. */
+  owner?: string;
+}
+
 /** Asks once more, and ends a token for good. */
-export function RevokeToken({ id, name, owner }: { id: string; name: string; owner?: string }) {
+export function RevokeToken({ group, id, name, owner }: Props) {
   const [open, setOpen] = useState(false);
   const close = () => setOpen(false);
   return (
@@ -22,6 +31,7 @@ export function RevokeToken({ id, name, owner }: { id: string; name: string; own
           back; a new token can be made at any time.
         </p>
         <ActionForm action={revokeTokenAction} label={`Revoke ${name}`} onDone={close}>
+          <input type="hidden" name="group" value={group} />
           <input type="hidden" name="id" value={id} />
           <div className="btns">
             <SendButton>Revoke</SendButton>

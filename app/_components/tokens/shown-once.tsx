@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { Button } from '../button/button';
 import { Slip } from '../slip/slip';
 
@@ -13,6 +13,8 @@ export interface MadeToken {
 /** The one place and the one time where a token can be read. It stays until it is closed. */
 export function ShownOnce({ token, onClose }: { token: MadeToken; onClose: () => void }) {
   const [copied, setCopied] = useState<boolean>();
+  const place = useRef<HTMLDivElement>(null);
+  useEffect(() => place.current?.querySelector<HTMLElement>('.btn')?.focus(), []);
   const copy = () => {
     navigator.clipboard.writeText(token.secret).then(
       () => setCopied(true),
@@ -20,7 +22,7 @@ export function ShownOnce({ token, onClose }: { token: MadeToken; onClose: () =>
     );
   };
   return (
-    <div className="form-slip token-slip">
+    <div className="form-slip token-slip" ref={place}>
       <Slip
         kind="good"
         onClose={onClose}

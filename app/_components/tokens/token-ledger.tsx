@@ -1,4 +1,5 @@
 import type { ListedToken, TokenState } from '@/lib/tokens/list';
+import './tokens.css';
 import { Ledger } from '../ledger/ledger';
 import { Moment } from '../moment/moment';
 import { RevokeToken } from './revoke-token';
@@ -12,13 +13,15 @@ const stateWords: Readonly<Record<TokenState, string>> = {
 
 interface Props {
   tokens: readonly ListedToken[];
+  /** Short name of the group they belong to. */
+  group: string;
   caption: string;
   /** Whether they belong to several people. */
   ofGroup?: boolean;
 }
 
 /** Tokens as rows: name and ending, what each may do, when it was made, used and expires, and the way to end it. */
-export function TokenLedger({ tokens, caption, ofGroup = false }: Props) {
+export function TokenLedger({ tokens, group, caption, ofGroup = false }: Props) {
   const head = ['token', ...(ofGroup ? ['acts for'] : []), 'may', 'made', 'expires', 'last use', 'state'];
   return (
     <Ledger
@@ -34,12 +37,12 @@ export function TokenLedger({ tokens, caption, ofGroup = false }: Props) {
     >
       {tokens.map((token) => (
         <tr key={token.id}>
-          <td>
+          <th scope="row">
             <span className="st">{token.name}</span>
             <span className="nm">
               ends in <code>{token.ending}</code>
             </span>
-          </td>
+          </th>
           {ofGroup && <td data-label="acts for">{token.owner}</td>}
           <td data-label="may">{token.scopes.join(', ')}</td>
           <td className="num" data-label="made">
@@ -56,7 +59,7 @@ export function TokenLedger({ tokens, caption, ofGroup = false }: Props) {
           </td>
           <td>
             {token.state === 'live' && (
-              <RevokeToken id={token.id} name={token.name} owner={token.own ? undefined : token.owner} />
+              <RevokeToken group={group} id={token.id} name={token.name} owner={token.own ? undefined : token.owner} />
             )}
           </td>
         </tr>

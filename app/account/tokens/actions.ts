@@ -3,6 +3,7 @@
 import { revalidatePath } from 'next/cache';
 import type { FormState } from '@/app/_components/form/form-state';
 import { refusal } from '@/app/_components/form/read-form';
+import type { Member } from '@/lib/people/caller';
 import { memberWho } from '@/lib/people/current';
 import { isRefused } from '@/lib/people/refused';
 import { makeToken } from '@/lib/tokens/make';
@@ -13,17 +14,28 @@ export interface TokenFormState extends FormState {
   readonly made?: { readonly id: string; readonly name: string; readonly secret: string };
 }
 
-const noMember = { fault: 'You are no longer signed in to a group. Sign in, and make the token then.' };
+const notAllowed = {
+  fault: 'This was not done: you are no longer signed in to this group. Read the page again.',
+};
+
+/**
+ * The member who sent the form, in the group whose page it was sent from: the same browser may have gone over to another group
+ * meanwhile, and a token for one must not be made for the other.
+ */
+async function senderOf(form: FormData): Promise<Member | undefined> {
+  const member = await memberWho('account');
+  return member?.group.slug === textOf(form, 'group') ? member : undefined;
+}
 
 /** Makes a token for the member who is signed in. */
 export async function makeTokenAction(_: FormState, form: FormData): Promise<TokenFormState> {
-  const member = await memberWho('account');
-  if (member === undefined) return noMember;
-  if (!(form instanceof FormData)) return { fault: 'The form could not be read. Send it again.' };
+  const member = await senderOf(form);
+  if (member === undefined) return notAllowed;
+  const days = textOf(form, 'days').trim();
   const made = await makeToken(member, {
     name: textOf(form, 'name'),
-    scopes: form.getAll('scopes').filter((scope) => typeof scope === 'string'),
-    days: /^\s*\d{1,4}\s*$/.test(textOf(form, 'days')) ? Number(textOf(form, 'days')) : Number.NaN,
+    scopes: allOf(form, 'scopes'),
+    days: /^\d{1,4}$/.test(days) ? Number(days) : Number.NaN,
   });
   if (isRefused(made)) return refusal(made);
   revalidatePath('/account/tokens');
@@ -32,16 +44,17 @@ export async function makeTokenAction(_: FormState, form: FormData): Promise<Tok
 
 /** Revokes a token of one's own, or for a steward any of the group. */
 export async function revokeTokenAction(_: FormState, form: FormData): Promise<FormState> {
-  const member = await memberWho('account');
-  if (member === undefined) return noMember;
-  const revoked = await revokeToken(member, form instanceof FormData ? textOf(form, 'id') : '');
+  const member = await senderOf(form);
+  if (member === undefined) return notAllowed;
+  const revoked = await revokeToken(member, textOf(form, 'id'));
   if (revoked.outcome === 'not-there') return { fault: 'There is no such token that you can revoke.' };
   revalidatePath('/account/tokens');
   revalidatePath('/group/tokens');
   return {};
 }
 
-function textOf(form: FormData, name: string): string {
-  const value = form.get(name);
-  return typeof value === 'string' ? value : '';
-}
+// A server action can be called with anything, whatever its types say.
+const allOf = (form: unknown, name: string): string[] =>
+  form instanceof FormData ? form.getAll(name).filter((value) => typeof value === 'string') : [];
+
+const textOf = (form: unknown, name: string): string => allOf(form, name)[0] ?? '';

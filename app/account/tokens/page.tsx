@@ -31,13 +31,18 @@ export default async function Tokens({ searchParams }: Asked) {
     <>
       <section className="slab" aria-label="A new token">
         <div className="row">
-          <p className="side help-side">tokens</p>
+          <p className="side to-title">tokens</p>
           <div>
             <h1 className="text-title">Tokens for scripts</h1>
             <p className="text mt-1 mb-5 max-w-[44em]">
               A script that sends one of them acts for you in {member.group.name}, within what your role allows.
             </p>
-            <NewToken scopes={offered} longestName={longestTokenName} longestLife={longestLife} />
+            <NewToken
+              group={member.group.slug}
+              scopes={offered}
+              longestName={longestTokenName}
+              longestLife={longestLife}
+            />
           </div>
         </div>
       </section>
@@ -46,7 +51,7 @@ export default async function Tokens({ searchParams }: Asked) {
           {tokens.length === 0 ? (
             <NoTokens />
           ) : (
-            <TokenLedger tokens={tokens} caption={`Your tokens in ${member.group.name}`} />
+            <TokenLedger tokens={tokens} group={member.group.slug} caption={`Your tokens in ${member.group.name}`} />
           )}
           <OlderTokens path="/account/tokens" older={older} first={from === undefined} />
         </Row>

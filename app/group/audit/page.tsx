@@ -25,7 +25,7 @@ export default async function Audit({ searchParams }: Asked) {
     <>
       <section className="slab" aria-label="What is asked">
         <div className="row">
-          <p className="side help-side">audit</p>
+          <p className="side to-title">audit</p>
           <div>
             <h1 className="text-title mb-4">What was done in {group.name}</h1>
             <AuditFilterForm key={auditQuery(filter)} filter={filter} people={people} />
@@ -45,7 +45,7 @@ export default async function Audit({ searchParams }: Asked) {
               )}
             </p>
           ) : (
-            <AuditLedger entries={page.entries} group={group.name} />
+            <AuditLedger entries={page.entries} name={group.name} />
           )}
           <p className="acts mt-4">
             {page.newer !== undefined && <Link href={at({ after: page.newer })}>Newer</Link>}

@@ -21,7 +21,7 @@ export default async function GroupTokens({ searchParams }: Asked) {
     <>
       <section className="slab" aria-label="About this page">
         <div className="row">
-          <p className="side help-side">tokens</p>
+          <p className="side to-title">tokens</p>
           <div>
             <h1 className="text-title">Tokens of {member.group.name}</h1>
             <p className="text mt-1 max-w-[44em]">
@@ -36,7 +36,7 @@ export default async function GroupTokens({ searchParams }: Asked) {
           {tokens.length === 0 ? (
             <p className="lead">No member has made a token for this group yet.</p>
           ) : (
-            <TokenLedger tokens={tokens} caption={`Tokens of ${member.group.name}`} ofGroup />
+            <TokenLedger tokens={tokens} group={member.group.slug} caption={`Tokens of ${member.group.name}`} ofGroup />
           )}
           <OlderTokens path="/group/tokens" older={older} first={from === undefined} />
         </Row>
