@@ -61,10 +61,10 @@ async function accept(
   personOf: (invitation: OpenInvitation, transaction: Transaction) => Promise<User | Refused>,
 ): Promise<Joined | Refused> {
   return database().transaction(async (transaction) => {
-    const seen = await findInvitation(token);
+    const seen = await findInvitation(token, transaction);
     if (seen.state !== 'open') return refuse(noLongerOpen);
     const group = await lockGroup(seen.groupId, transaction);
-    const invitation = await findInvitation(token, transaction);
+    const invitation = await findInvitation(token, transaction, true);
     if (group === null || invitation.state !== 'open') return refuse(noLongerOpen);
     const person = await personOf(invitation, transaction);
     if (isRefused(person)) return person;

@@ -45,13 +45,14 @@ const withHash = `
     FROM invitations i JOIN groups g ON g.id = i.group_id
    WHERE i.token_hash = $1`;
 
-/** The invitation of a link as it is now; inside a transaction its row is locked. */
+/** The invitation of a link as it is now; its row is locked on request, until the transaction ends. */
 export async function findInvitation(
   token: string,
   transaction?: Transaction,
+  lock = false,
 ): Promise<OpenInvitation | DeadInvitation> {
   if (!given.linkToken.safeParse(token).success) return { state: 'unknown' };
-  const [row] = await database().query<Row>(transaction === undefined ? withHash : `${withHash} FOR UPDATE OF i`, {
+  const [row] = await database().query<Row>(lock ? `${withHash} FOR UPDATE OF i` : withHash, {
     bind: [hashSecret(token)],
     type: QueryTypes.SELECT,
     transaction,
