@@ -16,9 +16,22 @@ export interface Difference {
 /** Past this many pairs of words the middle is marked as a whole: finding what it has in common would take too long. */
 const mostPairs = 1_000_000;
 
-/** The words of a statement: its tokens, each with the blanks behind it. */
-const statementWords = (text: string): string[] =>
-  withBlanks(tokenize(text).map(({ start, end }) => text.slice(start, end)));
+/** The words of a statement: its signs and factors, a bracket with all that stands in it as one, each with the blanks behind it. */
+function statementWords(text: string): string[] {
+  const words: string[] = [];
+  let begin = 0;
+  let depth = 0;
+  for (const { kind, start, end } of tokenize(text)) {
+    if (kind === 'open' && depth === 0) begin = start;
+    if (kind === 'open') depth += 1;
+    else if (kind === 'close' && depth > 0) {
+      depth -= 1;
+      if (depth === 0) words.push(text.slice(begin, end));
+    } else if (depth === 0) words.push(text.slice(start, end));
+  }
+  if (depth > 0) words.push(text.slice(begin));
+  return withBlanks(words);
+}
 
 /** The words of prose, each with the blanks behind it. */
 const proseWords = (text: string): string[] => text.match(/\s*\S+\s*/g) ?? [];

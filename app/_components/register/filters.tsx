@@ -45,32 +45,46 @@ interface Props {
   readonly onChoose: (changes: Partial<Record<FilterKey, string>>) => void;
 }
 
-/** The lists by which the register is narrowed down; one that is set stands out. */
+interface PickProps extends Pick<Props, 'query' | 'onChoose'> {
+  readonly filter: Filter;
+}
+
+function FilterPick({ filter: { key, label, all, options }, query, onChoose }: PickProps) {
+  const value = String(query[key] ?? '');
+  const known = value === '' || options.some(([option]) => option === value);
+  return (
+    <span className={`pick ${value === '' ? '' : 'set'}`}>
+      <select name={key} aria-label={label} value={value} onChange={(event) => onChoose({ [key]: event.target.value })}>
+        <option value="">{all}</option>
+        {!known && <option value={value}>{value}</option>}
+        {options.map(([option, word]) => (
+          <option key={option} value={option}>
+            {word}
+          </option>
+        ))}
+      </select>
+    </span>
+  );
+}
+
+/** The lists by which the register is narrowed down; those that are set stand out, those that are needed less open below. */
 export function Filters({ query, choices, onChoose }: Props) {
+  const filters = filtersOf(choices);
+  const more = filters.slice(2);
+  const set = more.filter(({ key }) => query[key] !== undefined).length;
   return (
     <>
-      {filtersOf(choices).map(({ key, label, all, options }) => {
-        const value = String(query[key] ?? '');
-        const known = value === '' || options.some(([option]) => option === value);
-        return (
-          <span key={key} className={`pick ${value === '' ? '' : 'set'}`}>
-            <select
-              name={key}
-              aria-label={label}
-              value={value}
-              onChange={(event) => onChoose({ [key]: event.target.value })}
-            >
-              <option value="">{all}</option>
-              {!known && <option value={value}>{value}</option>}
-              {options.map(([option, word]) => (
-                <option key={option} value={option}>
-                  {word}
-                </option>
-              ))}
-            </select>
-          </span>
-        );
-      })}
+      {filters.slice(0, 2).map((filter) => (
+        <FilterPick key={filter.key} filter={filter} query={query} onChoose={onChoose} />
+      ))}
+      <details className="opens from-left">
+        <summary className={`pick ${set === 0 ? '' : 'set'}`}>{set === 0 ? 'more filters' : `${set} more set`}</summary>
+        <div className="opened listed">
+          {more.map((filter) => (
+            <FilterPick key={filter.key} filter={filter} query={query} onChoose={onChoose} />
+          ))}
+        </div>
+      </details>
       <noscript>
         <button type="submit" className="btn">
           Look

@@ -60,7 +60,7 @@ function Entry({ identity }: { readonly identity: IdentitySummary }) {
         </span>
       </td>
       <td className="st">
-        <Link href={identityHref(identity.key)}>
+        <Link href={identityHref(identity.key)} aria-label={`${name}: ${saying.text}`}>
           <LongFormula text={saying.text} tex={saying.tex} />
         </Link>
         <span className="nm">

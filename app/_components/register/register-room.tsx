@@ -81,7 +81,7 @@ export function RegisterRoom({ query, choices, states, writeOut, children }: Pro
                 id="words"
                 name="words"
                 type="search"
-                className="field"
+                className="field look-line"
                 value={words}
                 maxLength={200}
                 onChange={(event) => setWords(event.target.value)}

@@ -2,7 +2,7 @@ import type { IdentityQuery } from '@/lib/contracts/identity-query';
 import { registerHref } from './address';
 
 /** How the register can be written out. */
-export const formats = [
+const formats = [
   { format: 'tex', name: 'TeX' },
   { format: 'bibtex', name: 'BibTeX' },
   { format: 'csv', name: 'CSV' },
@@ -13,9 +13,9 @@ export const formats = [
 export function WriteOut({ query }: { readonly query: IdentityQuery }) {
   const search = registerHref(query, { sort: undefined }).split('?')[1];
   return (
-    <details className="write-out">
+    <details className="opens">
       <summary className="pick">write out as</summary>
-      <ul>
+      <ul className="opened">
         {formats.map(({ format, name }) => (
           <li key={format}>
             <a href={`/register/write-out?${search === undefined ? '' : `${search}&`}format=${format}`} download>

@@ -23,6 +23,10 @@ interface Props {
   readonly tex: string;
 }
 
+/** How the field stands beside the statement: what is not confirmed is claimed only. */
+const claimOf = ({ state, warning, lastCheck }: IdentityAnswer): string =>
+  warning ? 'over' : state !== 'withdrawn' && lastCheck?.verdict === 'equal' ? 'holds for' : 'claimed for';
+
 /** One identity, at its current revision or at an earlier one: what it says, why, how it came about, and how to cite it. */
 export function IdentityPage({ identity, viewer, bibtex, tex }: Props) {
   const saying = sayingOf(identity);
@@ -39,7 +43,7 @@ export function IdentityPage({ identity, viewer, bibtex, tex }: Props) {
           </p>
         </div>
         <div className="facts-rows">
-          <Row side={identity.warning ? 'claimed for' : 'holds for'} id="holds-for" className="tight first">
+          <Row side={claimOf(identity)} id="holds-for" className="tight first">
             <HoldsFor identity={identity} />
           </Row>
           <Row side="reference" id="reference" className="tight">
