@@ -1,6 +1,14 @@
 import { z } from 'zod';
 import { type Contract, readingProblems } from './contract';
-import { createExamples, listExamples, readExamples, reviseExamples, withdrawExamples } from './examples/identities';
+import {
+  createExamples,
+  exportExamples,
+  listExamples,
+  readExamples,
+  reviseExamples,
+  showExamples,
+  withdrawExamples,
+} from './examples/identities';
 import { identityAnswer, identitySummary } from './identity-answer';
 import { identityContent, identityRevision, limits, visibility } from './identity-content';
 import { identityKey } from './identity-key';
@@ -146,7 +154,7 @@ export const showIdentityContract: Contract<typeof visibilityRequest, typeof ide
   params: byKey,
   answer: identityAnswer,
   problems: ['invalid', 'not-found'],
-  examples: [],
+  examples: showExamples,
 };
 
 export const exportIdentitiesContract: Contract<undefined, typeof exportAnswer, undefined, typeof exportQuery> = {
@@ -162,5 +170,5 @@ export const exportIdentitiesContract: Contract<undefined, typeof exportAnswer, 
   answer: exportAnswer,
   files: { csv: 'text/csv', tex: 'application/x-tex', bibtex: 'application/x-bibtex' },
   problems: ['invalid', 'syntax'],
-  examples: [],
+  examples: exportExamples,
 };

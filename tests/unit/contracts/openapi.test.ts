@@ -31,7 +31,9 @@ test('each call lists its statuses, and each of its examples fits its contract',
     const statuses = Object.keys(operation?.responses ?? {});
     expect(statuses).toEqual(expect.arrayContaining([String(contract.success ?? 200), '401', '405', '500']));
     for (const code of contract.problems) expect(statuses).toContain(String(problemKinds[code].status));
-    for (const { request, answer } of contract.examples) {
+    for (const { request, answer, params, query } of contract.examples) {
+      contract.params?.parse(params);
+      contract.query?.parse(query ?? {});
       if (contract.request !== undefined) contract.request.parse(request);
       contract.answer.parse(answer);
     }

@@ -1,0 +1,17 @@
+import { memberBattery } from '../batteries/member-call';
+import { kept, newRoom } from '../batteries/room';
+import { transportBattery } from '../batteries/transport';
+
+const path = '/api/v1/identities/{key}/visibility';
+const body = { visibility: 'public' };
+
+transportBattery(path, {
+  body,
+  asking: async () => {
+    const room = await newRoom();
+    return { address: path.replace('{key}', (await kept(room)).key), headers: room.token };
+  },
+});
+
+// What is public by now is still not to be changed, nor found, by a stranger who would change it.
+memberBattery({ method: 'post', path, scope: 'write', body, success: 200 });
