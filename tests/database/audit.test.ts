@@ -6,7 +6,7 @@ import { closeDatabase, database } from '@/lib/database/connection';
 import type { Member } from '@/lib/people/caller';
 import { runSql } from '../harness/database';
 import { ownDatabase } from '../harness/own-database';
-import { insertGroup, insertMember } from './seated';
+import { newGroup, newMember } from '../harness/people';
 
 const url = ownDatabase();
 let odile: Member;
@@ -14,8 +14,8 @@ let other: Member;
 
 beforeAll(async () => {
   process.env.DATABASE_URL = url();
-  odile = await insertMember(url(), await insertGroup(url()), 'steward', 'Odile Farrant');
-  other = await insertMember(url(), await insertGroup(url()), 'steward', 'Maren Iwuji');
+  odile = await newMember(await newGroup(url()), 'steward', { url: url(), name: 'Odile Farrant' });
+  other = await newMember(await newGroup(url()), 'steward', { url: url(), name: 'Maren Iwuji' });
   await runSql(
     url(),
     `INSERT INTO audit_events (group_id, actor_id, actor_name, action, subject, at)

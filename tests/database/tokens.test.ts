@@ -11,7 +11,7 @@ import { makeToken, type TokenMade, type TokenWish } from '@/lib/tokens/make';
 import { revokeToken } from '@/lib/tokens/revoke';
 import { runSql } from '../harness/database';
 import { ownDatabase } from '../harness/own-database';
-import { insertGroup, insertMember } from './seated';
+import { newGroup, newMember } from '../harness/people';
 
 const url = ownDatabase();
 let author: Member;
@@ -24,10 +24,10 @@ beforeAll(() => {
 afterAll(closeDatabase);
 
 beforeEach(async () => {
-  const group = await insertGroup(url());
-  author = await insertMember(url(), group, 'author', 'Tobias Renk');
-  reader = await insertMember(url(), group, 'reader', 'Ines Calloway');
-  steward = await insertMember(url(), group, 'steward', 'Odile Farrant');
+  const group = await newGroup(url());
+  author = await newMember(group, 'author', { url: url(), name: 'Tobias Renk' });
+  reader = await newMember(group, 'reader', { url: url(), name: 'Ines Calloway' });
+  steward = await newMember(group, 'steward', { url: url(), name: 'Odile Farrant' });
 });
 
 const wish: TokenWish = { name: 'night run', scopes: ['read', 'compute'], days: 30 };
@@ -189,7 +189,7 @@ test('a steward revokes any token of the group, and it is written down whose it 
 
 test('to anyone else a token does not exist', async () => {
   const { id, secret } = await made(steward);
-  const elsewhere = await insertMember(url(), await insertGroup(url()), 'steward', 'Maren Iwuji');
+  const elsewhere = await newMember(await newGroup(url()), 'steward', { url: url(), name: 'Maren Iwuji' });
   for (const stranger of [author, reader, elsewhere])
     expect(await revokeToken(stranger, id)).toEqual({ outcome: 'not-there' });
   for (const wrong of ['', 'x', "' OR true --", '00000000-0000-0000-0000-000000000000'])
@@ -224,7 +224,7 @@ test('the list is read page by page, each token once', async () => {
   expect(seen).toHaveLength(120);
   expect(new Set(seen).size).toBe(120);
   // A place of another group, or none at all, begins at the top and shows nothing of that group.
-  const other = await insertMember(url(), await insertGroup(url()), 'steward');
+  const other = await newMember(await newGroup(url()), 'steward', { url: url() });
   expect((await listTokens(other, 'group', seen[3])).tokens).toEqual([]);
   expect((await listTokens(steward, 'group', "'; DROP TABLE users --")).tokens).toHaveLength(50);
 });

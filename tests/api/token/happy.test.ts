@@ -61,10 +61,11 @@ test('that it was used is noted', async () => {
   const member = await newMember(await newGroup(), 'reader');
   const token = await tokenOf(member);
   const used = () =>
-    query(serverDatabase(), 'SELECT last_used_at > now() - interval $1 AS just FROM api_tokens WHERE user_id = $2', [
-      '5 minutes',
-      member.person.id,
-    ]);
+    query(
+      serverDatabase(),
+      `SELECT last_used_at > now() - interval '5 minutes' AS just FROM api_tokens WHERE user_id = $1`,
+      [member.person.id],
+    );
   expect(await used()).toEqual([{ just: null }]);
   await get(path, token);
   expect(await used()).toEqual([{ just: true }]);
