@@ -8,9 +8,12 @@ const subjects = [
   { id: 'conventions', name: 'conventions' },
   { id: 'verdicts', name: 'verdicts' },
   { id: 'evidence', name: 'evidence' },
-  { id: 'errors', name: 'refusals' },
+  { id: 'register', name: 'register' },
+  { id: 'groups', name: 'groups and roles' },
   { id: 'keys', name: 'keys' },
   { id: 'rest', name: 'REST' },
+  { id: 'tokens', name: 'tokens' },
+  { id: 'errors', name: 'refusals' },
   { id: 'cautions', name: 'cautions' },
 ];
 
