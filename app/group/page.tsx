@@ -88,7 +88,8 @@ export default async function GroupPage() {
             <Row side="what happened" id="happened" className="sec ruled">
               <p className="text">
                 Who invited, kept, revised, withdrew or made a token, and when, is written down.{' '}
-                <Link href="/group/audit">Read what happened</Link>
+                <Link href="/group/audit">Read what happened</Link>, or see the{' '}
+                <Link href="/group/tokens">tokens of all members</Link>.
               </p>
             </Row>
           </>
