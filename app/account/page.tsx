@@ -69,7 +69,7 @@ export default async function AccountPage({ searchParams }: Props) {
           <ActionForm action={savePassword} className="door" label="Password" clears>
             <input type="email" name="email" autoComplete="username" value={person.email} readOnly hidden />
             <div className="two">
-              <Field label="Password as it is" name="current" type="password" autoComplete="current-password" />
+              <Field label="Your password now" name="current" type="password" autoComplete="current-password" />
               <Field
                 label="New password"
                 name="next"
