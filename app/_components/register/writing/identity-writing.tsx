@@ -183,7 +183,9 @@ function Writing(props: Props) {
           <NamingRows form={form} onWrite={write} revising={revising} />
           <Row className="sec" label="Keep it">
             <div className="form-acts">
-              <SendButton>{revising ? `Keep as revision ${(base ?? 0) + 1}` : keepWords[asked.waiting ? 'equal' : decided]}</SendButton>
+              <SendButton>
+                {revising ? `Keep as revision ${(base ?? 0) + 1}` : keepWords[asked.waiting ? 'equal' : decided]}
+              </SendButton>
               {leave}
               <span className="small quiet" role="status">
                 {kept.told}
