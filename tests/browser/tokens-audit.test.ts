@@ -246,8 +246,13 @@ describe('the audit trail', () => {
 });
 
 describe('how the pages look', () => {
+  const sights = [
+    { width: 1440, dark: false },
+    { width: 390, dark: true },
+    { width: 320, dark: false },
+  ];
   const cases = ['/account/tokens', '/group/tokens', '/group/audit'].flatMap((path) =>
-    [1440, 390, 320].flatMap((width) => [false, true].map((dark) => ({ path, width, dark }))),
+    sights.map((sight) => ({ path, ...sight })),
   );
 
   test.each(cases)('$path at $width pixels, dark: $dark', async ({ path, width, dark }) => {
