@@ -23,9 +23,8 @@ const checking = [
   'hypothesis',
   'place',
   'uniformizer',
-  'sides-differ',
-  'sides-agree',
 ] as const;
+const keeping = [...checking, 'sides-differ', 'sides-agree'] as const;
 const changing = ['not-found', 'conflict'] as const;
 
 const base = z.int().min(1).describe('The number of the revision one has seen.');
@@ -77,7 +76,7 @@ export const createIdentityContract: Contract<typeof identityContent, typeof ide
   answer: identityAnswer,
   success: 201,
   idempotent: true,
-  problems: [...checking, 'idempotency-key'],
+  problems: [...keeping, 'idempotency-key'],
   examples: createExamples,
 };
 
@@ -109,7 +108,7 @@ export const reviseIdentityContract: Contract<typeof identityRevision, typeof id
   params: byKey,
   answer: identityAnswer,
   success: 201,
-  problems: [...checking, ...changing],
+  problems: [...keeping, ...changing],
   examples: reviseExamples,
 };
 
@@ -139,7 +138,7 @@ export const checkIdentityContract: Contract<undefined, typeof identityAnswer, t
   request: undefined,
   params: byKey,
   answer: identityAnswer,
-  problems: ['not-found', 'busy'],
+  problems: [...checking, 'not-found'],
   examples: readExamples,
 };
 
