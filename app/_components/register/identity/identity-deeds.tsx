@@ -9,6 +9,7 @@ import { Button } from '../../button/button';
 import { useKey } from '../../keys/keys-provider';
 import { registerHref } from '../address';
 import { copyText } from '../../clipboard/copy-text';
+import { OpenOnBench } from './open-on-bench';
 import type { Viewer } from './viewer';
 
 interface Props {
@@ -17,8 +18,9 @@ interface Props {
   readonly past: boolean;
   readonly text: string;
   readonly tex: string;
-  /** The bench with this statement, where the bench can hold it. */
-  readonly bench: string;
+  /** What the bench is opened with. */
+  readonly field: string;
+  readonly line: string;
   readonly visibility: IdentityAnswer['visibility'];
   readonly tags: readonly string[];
   readonly viewer: Viewer;
@@ -32,7 +34,7 @@ const formats = [
 
 /** What can be taken from the page, who sees it, and under which tags it stands. */
 export function IdentityDeeds(props: Props) {
-  const { identityKey, revision, past, text, tex, bench, visibility, tags, viewer } = props;
+  const { identityKey, revision, past, text, tex, field, line, visibility, tags, viewer } = props;
   const router = useRouter();
   const [told, setTold] = useState('');
   const [busy, setBusy] = useState(false);
@@ -108,9 +110,7 @@ export function IdentityDeeds(props: Props) {
         </p>
       )}
       <p className="acts">
-        <Link className="plain quietly" href={bench as Parameters<typeof router.push>[0]}>
-          Open on the bench
-        </Link>
+        <OpenOnBench field={field} line={line} />
       </p>
       <p className="small quiet told" role="status">
         {told}

@@ -5,7 +5,6 @@ import { LongFormula } from '../../bench/sheet/long-formula';
 import { Colophon } from '../../shell/colophon';
 import { Row } from '../../shell/row';
 import { sayingOf } from '../saying';
-import { benchHref } from './bench-address';
 import { Citations } from './citations';
 import { EvidenceRows } from './evidence-rows';
 import { HoldsFor } from './holds-for';
@@ -22,6 +21,10 @@ interface Props {
   readonly bibtex: string;
   readonly tex: string;
 }
+
+/** The statement, or the class, with its hypotheses, as the bench takes it. */
+const lineOf = ({ statement, hypotheses }: IdentityAnswer): string =>
+  [statement.text, ...hypotheses.map(({ text }) => text)].join('; ');
 
 /** How the field stands beside the statement: what is not confirmed is claimed only. */
 const claimOf = ({ state, warning, lastCheck }: IdentityAnswer): string =>
@@ -56,7 +59,8 @@ export function IdentityPage({ identity, viewer, bibtex, tex }: Props) {
           past={past}
           text={saying.text}
           tex={saying.tex}
-          bench={benchHref(identity)}
+          field={identity.field.text}
+          line={lineOf(identity)}
           visibility={identity.visibility}
           tags={identity.tags}
           viewer={viewer}
