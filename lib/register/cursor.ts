@@ -10,7 +10,8 @@ export interface Place {
   readonly state?: string;
 }
 
-const moment = z.string().regex(/^\d{4}-\d\d-\d\dT\d\d:\d\d:\d\d\.\d{6}Z$/);
+// No year 0: JavaScript has one, PostgreSQL does not.
+const moment = z.string().regex(/^(?!0000)\d{4}-\d\d-\d\dT\d\d:\d\d:\d\d\.\d{6}Z$/);
 const number = z.int().min(1).max(2_147_483_647);
 const text = z
   .string()

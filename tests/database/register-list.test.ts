@@ -178,6 +178,10 @@ test.each([
   ['another shape', Buffer.from('["-changed",{"number":1}]').toString('base64url')],
   ['another order', Buffer.from('["number",{"number":1}]').toString('base64url')],
   ['no moment', Buffer.from('["-changed",{"number":1,"changed":"2026-02-31T10:00:00.000000Z"}]').toString('base64url')],
+  [
+    'the year 0',
+    Buffer.from('["-changed",{"number":1,"changed":"0000-12-31T23:59:59.999999Z"}]').toString('base64url'),
+  ],
   ['SQL', Buffer.from(`["-changed",{"number":1,"changed":"now(); DROP TABLE identities"}]`).toString('base64url')],
   ['a large number', Buffer.from('["number",{"number":1e300}]').toString('base64url')],
 ])('a cursor that is %s is refused', async (_, cursor) => {
