@@ -11,7 +11,8 @@ export type SignedIn =
 
 /** Checks an address and a password. Guesses are counted by account and by address of the network, before they are tried. */
 export async function checkPassword(email: string, password: string, address: string): Promise<SignedIn> {
-  const account = email.trim().toLowerCase();
+  // The database takes no NUL, and no account has one.
+  const account = email.replaceAll('\0', '\ufffd').trim().toLowerCase();
   const waits = await Promise.all([attempt('sign-in-account', account), attempt('sign-in-address', address)]);
   const seconds = Math.max(...waits.map((wait) => wait ?? 0));
   if (seconds > 0) return { outcome: 'too-often', seconds };

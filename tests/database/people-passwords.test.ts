@@ -54,6 +54,10 @@ async function mailed(): Promise<string> {
 
 const signIn = (password: string) => checkPassword(member.person.email, password, '192.0.2.1');
 
+test('an address that no database can keep is the address of nobody', async () => {
+  expect(await checkPassword('odile\0@skerry.example', old, '192.0.2.9')).toEqual({ outcome: 'wrong' });
+});
+
 describe('a session', () => {
   test('is that of the person, in the chosen group if it is one of theirs', async () => {
     const token = await session(1);
