@@ -1,5 +1,5 @@
-/** Signs that make a spreadsheet take a cell for a formula, and with it for something to carry out. */
-const formulaStart = /^[=+\-@\t\r]/;
+/** Signs, the wide ones of East Asian keyboards too, that make a spreadsheet take a cell for a formula to carry out. */
+const formulaStart = /^[=+\-@\t\r＝＋－＠]/;
 
 /**
  * One line of CSV (RFC 4180), with its end. A cell that a spreadsheet would take for a formula begins with an apostrophe, which

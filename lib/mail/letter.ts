@@ -60,6 +60,7 @@ const asText = ({ paragraphs, action, afterwards, reason }: Letter): string =>
 
 /** Sets a letter in both forms. */
 export function setLetter(letter: Letter): Message {
-  const subject = oneLine(letter.subject, 200);
+  // Programs that read mail would decode what a name writes as an encoded word, and show another name.
+  const subject = oneLine(letter.subject, 200).replaceAll('=?', '= ?');
   return { subject, text: asText(letter), html: asHtml({ ...letter, subject }) };
 }

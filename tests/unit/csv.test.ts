@@ -14,10 +14,13 @@ test.each([
   expect(csvLine([cell])).toBe(`${written}\r\n`);
 });
 
-test.each(['=1+1', '+1', '-[2] = 0', '@SUM(A1)', '\t=1', '\r=1'])('%j is no formula to a spreadsheet', (cell) => {
-  const written = csvLine(['first', cell]);
-  expect(written.replace('first,', '').replace(/^"/, '')).toMatch(/^'/);
-});
+test.each(['=1+1', '+1', '-[2] = 0', '@SUM(A1)', '\t=1', '\r=1', '＝1+1', '＠SUM'])(
+  '%j is no formula to a spreadsheet',
+  (cell) => {
+    const written = csvLine(['first', cell]);
+    expect(written.replace('first,', '').replace(/^"/, '')).toMatch(/^'/);
+  },
+);
 
 test('numbers below zero stay numbers', () => {
   expect(csvLine([-3])).toBe('-3\r\n');

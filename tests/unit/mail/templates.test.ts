@@ -101,6 +101,12 @@ describe('names people chose', () => {
     expect(subject).toBe(`Tobias Bcc: odile@skerry.example Renk invites you to the group ${'η'.repeat(119)}…`);
   });
 
+  test('are no encoded words', () => {
+    const { subject, text } = compose('invitation', { ...plain, inviterName: '=?utf-8?Q?Odile_Farrant?=' });
+    expect(subject).not.toContain('=?');
+    expect(text).toContain('=?utf-8?Q?Odile_Farrant?=');
+  });
+
   test('are never headers of the message, and letters of every script arrive', async () => {
     const inviterName = 'Ödile "F." Farrant\r\nBcc: maren@skerry.example\r\n\r\n<p>早瀬';
     const sent = await createTransport({ streamTransport: true, buffer: true }).sendMail({
