@@ -1,17 +1,19 @@
 import { post } from '../../harness/http';
 import { hostileTextBattery } from '../batteries/hostile-texts';
 import { memberBattery } from '../batteries/member-call';
-import { kept, newRoom, sample } from '../batteries/room';
+import { kept, newRoom, type Room, sample } from '../batteries/room';
 import { transportBattery } from '../batteries/transport';
 
 const path = '/api/v1/identities/{key}/revisions';
 const body = { ...sample, base: 1 };
 
+let room: Room | undefined;
+
 transportBattery(path, {
   body,
   success: 201,
   asking: async () => {
-    const room = await newRoom();
+    room ??= await newRoom();
     return { address: path.replace('{key}', (await kept(room)).key), headers: room.token };
   },
 });

@@ -1,14 +1,16 @@
 import { memberBattery } from '../batteries/member-call';
-import { kept, newRoom } from '../batteries/room';
+import { kept, newRoom, type Room } from '../batteries/room';
 import { transportBattery } from '../batteries/transport';
 
 const path = '/api/v1/identities/{key}/visibility';
 const body = { visibility: 'public' };
 
+let room: Room | undefined;
+
 transportBattery(path, {
   body,
   asking: async () => {
-    const room = await newRoom();
+    room ??= await newRoom();
     return { address: path.replace('{key}', (await kept(room)).key), headers: room.token };
   },
 });

@@ -1,16 +1,18 @@
 import { expect, test } from 'vitest';
 import { post } from '../../harness/http';
 import { memberBattery } from '../batteries/member-call';
-import { kept, newRoom } from '../batteries/room';
+import { kept, newRoom, type Room } from '../batteries/room';
 import { transportBattery } from '../batteries/transport';
 
 const path = '/api/v1/identities/{key}/withdraw';
 const body = { base: 1, reason: 'The sign is wrong.' };
 
+let room: Room | undefined;
+
 transportBattery(path, {
   body,
   asking: async () => {
-    const room = await newRoom();
+    room ??= await newRoom();
     return { address: path.replace('{key}', (await kept(room)).key), headers: room.token };
   },
 });
