@@ -28,7 +28,7 @@ export function Groups({ seats, current }: Props) {
       >
         {seats.map((seat) => (
           <tr key={seat.id}>
-            <th scope="row" className="st">
+            <th scope="row" className="st named">
               {seat.name}
             </th>
             <td className="path">{seat.slug}</td>

@@ -33,7 +33,7 @@ export default async function AccountPage({ searchParams }: Props) {
       <section className="slab" aria-label="Who you are">
         <div className="row">
           <p className="side to-title">account</p>
-          <div>
+          <div className="named">
             <h1 className="text-title">{person.name}</h1>
             <p className="text">{person.email}</p>
           </div>

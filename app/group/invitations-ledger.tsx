@@ -22,11 +22,13 @@ export function InvitationsLedger({ slug, invitations }: Props) {
         <Ledger caption="Invitations that wait to be accepted" head={head} narrow="stack">
           {invitations.map(({ id, email, role, invitedBy, expiresAt, expired }) => (
             <tr key={id}>
-              <th scope="row" className="break-all font-sans text-ui">
+              <th scope="row" className="named font-sans text-ui">
                 {email}
               </th>
               <td>{role}</td>
-              <td data-label="invited by">{invitedBy ?? 'someone who has left'}</td>
+              <td data-label="invited by" className="named">
+                {invitedBy ?? 'someone who has left'}
+              </td>
               <td data-label="good until">
                 {longDay(expiresAt.toISOString())}
                 {expired && ', run out'}

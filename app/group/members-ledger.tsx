@@ -52,7 +52,7 @@ export function MembersLedger({ slug, members, self, manages }: Props) {
       <Ledger caption="Members of the group" head={head} narrow="stack">
         {members.map((member) => (
           <tr key={member.id}>
-            <th scope="row">
+            <th scope="row" className="named">
               <span className="st">{member.name}</span>
               <span className="nm">{member.email}</span>
             </th>

@@ -37,7 +37,7 @@ export default async function GroupPage() {
       <section className="slab" aria-label="The group">
         <div className="row">
           <p className="side to-title">group</p>
-          <div>
+          <div className="named">
             <h1 className="text-title">{group.name}</h1>
             <p className="text">
               {members.length === 1

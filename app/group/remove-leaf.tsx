@@ -15,7 +15,7 @@ export function RemoveLeaf({ slug, member, onClose, onDone }: LeafProps) {
         {member.name} can no longer open what belongs to this group, from this moment on, and the tokens made for it
         stop working. What {member.name} kept stays in the register.
       </p>
-      <ActionForm action={remove} label={`Remove ${member.name}`} onDone={({ done }) => onDone(done)}>
+      <ActionForm action={remove} onDone={({ done }) => onDone(done)}>
         <input type="hidden" name="group" value={slug} />
         <input type="hidden" name="person" value={member.id} />
         <div className="btns">

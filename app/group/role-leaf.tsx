@@ -19,7 +19,7 @@ export interface LeafProps {
 export function RoleLeaf({ slug, member, onClose, onDone }: LeafProps) {
   return (
     <Leaf open onClose={onClose} title={`The role of ${member.name}`}>
-      <ActionForm action={giveRole} label={`The role of ${member.name}`} onDone={({ done }) => onDone(done)}>
+      <ActionForm action={giveRole} onDone={({ done }) => onDone(done)}>
         <input type="hidden" name="group" value={slug} />
         <input type="hidden" name="person" value={member.id} />
         <RoleField role={member.role} />

@@ -18,7 +18,8 @@ beforeAll(async () => {
   member = await newKeeper();
   ({ key } = await keptBy(member, {
     name: 'A long name, so that a narrow page has to break it somewhere between its words',
-    statement: '[a][1-a] + [b][c] = ε[c][b] + 0',
+    statement: '[a][b c] = ε[b c][a]',
+    hypotheses: ['char != 2'],
     field: 'any',
     tags: ['steinberg', 'a-rather-long-tag-for-a-narrow-page'],
     reference: 'Seminar note 4, lemma 2',
@@ -86,6 +87,7 @@ describe('by keyboard alone', () => {
     }
     await page.keyboard.press('Enter');
     await page.waitForURL('**/identities/*-2');
+    await page.locator('.deeds').waitFor();
     await page.keyboard.press('t');
     await eventually(() => page.evaluate(() => navigator.clipboard.readText())).toMatch(/\\ne/);
     await page.keyboard.press('m');
