@@ -30,6 +30,9 @@ const otherHeaders: Readonly<Record<string, string>> = {
   'Cross-Origin-Opener-Policy': 'same-origin',
 };
 
+/** Pages whose address carries a secret, which must not be told to the next page. */
+const isSecretAddress = (pathname: string): boolean => /^\/(invitation|reset)(\/|$)/.test(pathname);
+
 /** Every page goes through here for its security headers; Next.js reads the nonce off the request's policy. */
 export function proxy(request: NextRequest): NextResponse {
   const nonce = btoa(String.fromCharCode(...crypto.getRandomValues(new Uint8Array(18))));
@@ -40,6 +43,7 @@ export function proxy(request: NextRequest): NextResponse {
   const response = NextResponse.next({ request: { headers } });
   response.headers.set('Content-Security-Policy', policy);
   for (const [name, value] of Object.entries(otherHeaders)) response.headers.set(name, value);
+  if (isSecretAddress(request.nextUrl.pathname)) response.headers.set('Referrer-Policy', 'no-referrer');
   return response;
 }
 

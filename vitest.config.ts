@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import path from 'node:path';
 import { defineConfig } from 'vitest/config';
 
@@ -18,6 +19,7 @@ export default defineConfig({
           name: 'database',
           include: ['tests/{database,bootstrap}/**/*.test.ts'],
           globalSetup: ['tests/harness/global-cluster.ts'],
+          env: { NEXTAUTH_SECRET: randomBytes(32).toString('base64url') },
           testTimeout: 120_000,
           hookTimeout: 120_000,
         },

@@ -9,6 +9,7 @@ import 'katex/dist/katex-swap.min.css';
 import './globals.css';
 import { KeysProvider } from './_components/keys/keys-provider';
 import { RunningHead } from './_components/shell/running-head';
+import { whoIsHere } from './_components/shell/who-is-here';
 import { themeScript } from './_components/theme/theme-script';
 
 export const metadata: Metadata = {
@@ -30,6 +31,7 @@ export const viewport: Viewport = {
 /** The shell: theme before the first paint, skip link, running head, keys. A page brings its slab, its sheet and its colophon. */
 export default async function Layout({ children }: { children: ReactNode }) {
   const nonce = (await headers()).get('x-nonce') ?? undefined;
+  const who = await whoIsHere();
   return (
     <html lang="en" suppressHydrationWarning>
       <head>
@@ -37,11 +39,11 @@ export default async function Layout({ children }: { children: ReactNode }) {
         <script nonce={nonce} suppressHydrationWarning dangerouslySetInnerHTML={{ __html: themeScript }} />
       </head>
       <body>
-        <KeysProvider>
+        <KeysProvider who={who}>
           <a className="skip" href="#sheet">
             Skip to the sheet
           </a>
-          <RunningHead />
+          <RunningHead who={who} />
           {children}
         </KeysProvider>
       </body>

@@ -8,6 +8,7 @@ import { Formula } from './_components/math/formula';
 import { Colophon } from './_components/shell/colophon';
 import { rooms } from './_components/shell/rooms';
 import { Row } from './_components/shell/row';
+import { whoIsHere } from './_components/shell/who-is-here';
 
 const first = { field: 'Q', statement: '[5][6] = [-1][6]' };
 
@@ -29,6 +30,7 @@ async function firstAnswer(): Promise<CompareAnswer | undefined> {
 /** The question, a line to try it on, and a real answer; then contents as in a book. */
 export default async function Landing() {
   answered ??= firstAnswer();
+  const { group } = await whoIsHere();
   return (
     <LiveBench {...first} answer={await answered}>
       <section className="slab" aria-label="Try a statement">
@@ -72,6 +74,21 @@ export default async function Landing() {
               <Link className="btn primary wide" href="/bench">
                 Open the bench
               </Link>
+            </p>
+          </div>
+          <div>
+            <h2>with an account</h2>
+            <p>
+              {group === undefined ? (
+                <>
+                  A group keeps what it has found in a register of its own. <Link href="/sign-in">Sign in</Link>, or{' '}
+                  <Link href="/start">start a group</Link>.
+                </>
+              ) : (
+                <>
+                  What your group has found stands in <Link href="/register">the register of {group}</Link>.
+                </>
+              )}
             </p>
           </div>
           <div>

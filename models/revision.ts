@@ -25,6 +25,7 @@ export class Revision extends Model<InferAttributes<Revision>, InferCreationAttr
   declare authorId: CreationOptional<string | null>;
   declare authorName: string;
   declare createdAt: CreationOptional<Date>;
+  declare typeset: CreationOptional<Record<string, unknown> | null>;
 }
 
 /** Binds the class to its table in the given database. */
@@ -52,6 +53,7 @@ export function initRevision(database: Sequelize): void {
       authorId: { type: DataTypes.UUID, field: 'author_id' },
       authorName: { type: DataTypes.TEXT, allowNull: false, field: 'author_name' },
       createdAt: { type: DataTypes.DATE, allowNull: false, field: 'created_at', defaultValue: DataTypes.NOW },
+      typeset: { type: DataTypes.JSONB },
     },
     { sequelize: database, modelName: 'Revision', tableName: 'revisions', timestamps: false },
   );

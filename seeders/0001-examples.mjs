@@ -5,6 +5,6 @@ const examples = [
   { code: '5axew0372n', field: 'Q_5', statement: '[5][-5] = 0' },
 ];
 
-export async function up({ context: queryInterface }) {
+export async function up({ context: { queryInterface } }) {
   await queryInterface.bulkInsert('permalinks', examples, { ignoreDuplicates: true });
 }

@@ -1,5 +1,7 @@
 import type { Metadata } from 'next';
+import { currentCaller } from '@/lib/people/current';
 import { Bench } from '../_components/bench/bench';
+import { mayKeep } from '../_components/register/may-keep';
 import { Colophon } from '../_components/shell/colophon';
 
 export const metadata: Metadata = { title: 'Bench' };
@@ -18,7 +20,7 @@ export default async function BenchPage({ searchParams }: Props) {
   const opened = asked === undefined && over === undefined ? undefined : { field: over ?? 'Q', statement: asked ?? '' };
   return (
     <>
-      <Bench key={`${over ?? ''} ${asked ?? ''}`} opened={opened} />
+      <Bench key={`${over ?? ''} ${asked ?? ''}`} opened={opened} mayKeep={mayKeep(await currentCaller())} />
       <Colophon />
     </>
   );

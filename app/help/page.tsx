@@ -4,11 +4,14 @@ import { Cautions } from './_sections/cautions';
 import { Conventions } from './_sections/conventions';
 import { Errors } from './_sections/errors';
 import { Fields } from './_sections/fields';
+import { Groups } from './_sections/groups';
 import { HelpIndex } from './_sections/help-index';
 import { Keys } from './_sections/keys';
 import { Language } from './_sections/language';
+import { Register } from './_sections/register';
 import { Relations } from './_sections/relations';
 import { Rest } from './_sections/rest';
+import { Tokens } from './_sections/tokens';
 import { Evidence, Verdicts } from './_sections/verdicts';
 
 export const metadata: Metadata = { title: 'Help' };
@@ -33,9 +36,12 @@ export default function Help() {
         <Conventions />
         <Verdicts />
         <Evidence />
-        <Errors />
+        <Register />
+        <Groups />
         <Keys />
         <Rest />
+        <Tokens />
+        <Errors />
         <Cautions />
         <aside className="notes from-top" aria-label="Index of the page">
           <HelpIndex />

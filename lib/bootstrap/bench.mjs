@@ -1,5 +1,6 @@
 // npm run bench [name …]: runs tests/bench/<name>.ts, all of them when none is named, each in a process of its own. Those
-// whose name begins with "rest" find a built and running server's address in QUADREL_URL.
+// whose name begins with "rest" find a built and running server's address in QUADREL_URL, and its database in DATABASE_URL.
+import { randomBytes } from 'node:crypto';
 import fs from 'node:fs';
 import path from 'node:path';
 import { ensureBuild, nextEnvironment, nextProgram } from './build.mjs';
@@ -18,13 +19,21 @@ async function serve(run) {
   const port = await freePort();
   const url = `http://127.0.0.1:${port}`;
   const databaseUrl = adminUrl.replace(/\/postgres$/, `/${template}`);
-  const settings = { PORT: String(port), DATABASE_URL: databaseUrl, COMPUTE_QUOTA_PER_MINUTE: '0' };
+  const settings = {
+    PORT: String(port),
+    DATABASE_URL: databaseUrl,
+    NEXTAUTH_SECRET: randomBytes(32).toString('base64url'),
+    NEXTAUTH_URL: url,
+    PUBLIC_URL: url,
+    COMPUTE_QUOTA_PER_MINUTE: '0',
+    TOKEN_QUOTA_PER_MINUTE: '0',
+  };
   const server = run.start(process.execPath, [nextProgram, 'start', '-H', '127.0.0.1', '-p', String(port)], {
     stdio: ['ignore', 'ignore', 'inherit'],
     env: { ...process.env, ...nextEnvironment, NODE_ENV: 'production', ...settings },
   });
   await untilHealthy(url, server.ended);
-  return url;
+  return { QUADREL_URL: url, DATABASE_URL: databaseUrl };
 }
 
 function chosen(given) {
@@ -41,7 +50,7 @@ await launch('bench', 'npm run bench', 130, async (run) => {
   const names = chosen(process.argv.slice(2));
   await ensureDependencies(run);
   await ensurePackages(run, ['pari-gp']);
-  const url = names.some((name) => name.startsWith('rest')) ? await serve(run) : '';
+  const served = names.some((name) => name.startsWith('rest')) ? await serve(run) : {};
   let failed = 0;
   for (const name of names) {
     if (run.leaving) return 130;
@@ -49,7 +58,7 @@ await launch('bench', 'npm run bench', 130, async (run) => {
     const file = path.join(root, 'tests', 'bench', `${name}.ts`);
     const code = await run.finish(process.execPath, ['--conditions=react-server', '--import', 'tsx', file], {
       stdio: ['ignore', 'inherit', 'inherit'],
-      env: { ...process.env, ...(url === '' ? {} : { QUADREL_URL: url }) },
+      env: { ...process.env, ...served },
     });
     if (code !== 0) failed += 1;
   }

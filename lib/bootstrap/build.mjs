@@ -16,8 +16,11 @@ const sourceFiles = [
   'proxy.ts',
   'instrumentation.ts',
 ];
-const worker = path.join(root, 'dist', 'engine.worker.mjs');
+const engineWorker = path.join(root, 'dist', 'engine.worker.mjs');
 const stamp = path.join(root, '.next', 'built-from');
+
+/** The program of a job worker, once it is bundled. */
+export const jobWorker = path.join(root, 'dist', 'jobs.worker.mjs');
 
 export const nextProgram = path.join(root, 'node_modules', 'next', 'dist', 'bin', 'next');
 export const nextEnvironment = { NEXT_TELEMETRY_DISABLED: '1' };
@@ -35,27 +38,43 @@ function sourceDigest() {
   return digest.digest('hex');
 }
 
-/** How the worker threads' file is bundled: one file of modern JavaScript that Node loads without a compiler. */
-export const workerBundle = {
+/** How the worker threads and the job worker are bundled: one file each of modern JavaScript that Node loads without a compiler. */
+export const workerBundles = {
   absWorkingDir: root,
-  entryPoints: ['lib/compute/engine.worker.ts'],
-  outfile: worker,
+  entryPoints: [
+    { in: 'lib/compute/engine.worker.ts', out: path.basename(engineWorker, '.mjs') },
+    { in: 'lib/jobs/worker.ts', out: path.basename(jobWorker, '.mjs') },
+  ],
+  outdir: 'dist',
+  outExtension: { '.js': '.mjs' },
   bundle: true,
   platform: 'node',
   format: 'esm',
   target: 'node20',
   conditions: ['react-server'],
+  // Loaded from node_modules as they are: native code, or files that look for others beside them.
+  external: ['@node-rs/argon2', 'graphile-worker', 'nodemailer', 'pg', 'piscina', 'sequelize'],
   // Bundled CommonJS packages ask for Node's own modules by require.
   banner: { js: "import { createRequire } from 'node:module'; const require = createRequire(import.meta.url);" },
   logLevel: 'warning',
 };
 
-async function bundleWorker() {
+/** The files the bundles are written to. */
+export const workerFiles = [engineWorker, jobWorker];
+
+/** Bundles the workers. Each file is put in place as a whole, for a process may be starting from it. */
+export async function bundleWorkers() {
   const { build } = await import('esbuild');
   try {
-    await build(workerBundle);
+    const { outputFiles } = await build({ ...workerBundles, write: false });
+    fs.mkdirSync(path.join(root, 'dist'), { recursive: true });
+    for (const { path: file, contents } of outputFiles) {
+      const draft = `${file}.${process.pid}`;
+      fs.writeFileSync(draft, contents);
+      fs.renameSync(draft, file);
+    }
   } catch (error) {
-    throw new Trouble('The worker bundle could not be made.', `Mend what the messages above name.\n${error.message}`);
+    throw new Trouble('The worker bundles could not be made.', `Mend what the messages above name.\n${error.message}`);
   }
 }
 
@@ -110,10 +129,11 @@ async function buildPages(run) {
   );
 }
 
-/** Builds the worker bundle and the pages when they are not those of the present sources. */
+/** Builds the worker bundles and the pages when they are not those of the present sources. */
 export async function ensureBuild(run) {
   const digest = sourceDigest();
-  const current = () => fs.existsSync(worker) && fs.existsSync(stamp) && fs.readFileSync(stamp, 'utf8') === digest;
+  const current = () =>
+    [...workerFiles, stamp].every((file) => fs.existsSync(file)) && fs.readFileSync(stamp, 'utf8') === digest;
   if (current()) return;
   await inTurn(run, async () => {
     if (current()) return;
@@ -126,7 +146,7 @@ export async function ensureBuild(run) {
     }
     say('Building (about a minute) …');
     fs.rmSync(stamp, { force: true });
-    await bundleWorker();
+    await bundleWorkers();
     await buildPages(run);
     if (!run.leaving) fs.writeFileSync(stamp, digest);
   });

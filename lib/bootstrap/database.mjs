@@ -1,4 +1,4 @@
-import { startCluster } from './cluster.mjs';
+import { hasCluster, runningCluster, startCluster } from './cluster.mjs';
 import { Trouble, say } from './trouble.mjs';
 
 /** The driver is there only after the packages were installed. */
@@ -48,12 +48,20 @@ async function createDatabase(cluster, name) {
   return cluster.url(name);
 }
 
-async function migrateAndSeed(url) {
+/** Whether an empty database gets the invented groups: QUADREL_DEMO says so, else `byDefault`. */
+function demoWanted(byDefault) {
+  const given = process.env.QUADREL_DEMO;
+  if (!given) return byDefault;
+  if (given === '0' || given === '1') return given === '1';
+  throw new Trouble(`QUADREL_DEMO is ${given}.`, 'Set it to 1 for the demo or to 0 for none, or leave it out.');
+}
+
+async function migrateAndSeed(url, demo) {
   const { migrate, seed } = await import('../database/migrate.mjs');
   try {
     const done = await migrate(url);
     if (done.length > 0) say(`Migrated the database: ${done.join(', ')}.`);
-    await seed(url);
+    await seed(url, { demo });
   } catch (error) {
     throw new Trouble(
       `The database could not be brought up to date: ${error.message}`,
@@ -70,19 +78,41 @@ export async function openDatabase(run) {
   const given = process.env.DATABASE_URL;
   if (given) {
     await requireDatabase(given);
-    await migrateAndSeed(given);
+    await migrateAndSeed(given, demoWanted(false));
     return { url: given };
   }
   const cluster = await startCluster(run);
   await requireDatabase(cluster.url('postgres'));
   const url = await createDatabase(cluster, 'quadrel');
-  await migrateAndSeed(url);
+  // Whoever gives the server a public address has people of their own, and must not have known passwords beside them.
+  await migrateAndSeed(url, demoWanted(!process.env.PUBLIC_URL));
   return { url, server: cluster.server };
 }
+
+/**
+ * The address of the database as it stands, neither migrated nor seeded: the one DATABASE_URL names, else the one of this clone's
+ * cluster, which is started for it unless another run keeps it running.
+ */
+export async function reachDatabase(run) {
+  const given = process.env.DATABASE_URL;
+  if (given) {
+    await requireDatabase(given);
+    return given;
+  }
+  const running = runningCluster();
+  if (running !== undefined) return running('quadrel');
+  const cluster = await startCluster(run);
+  await requireDatabase(cluster.url('postgres'));
+  return createDatabase(cluster, 'quadrel');
+}
+
+/** Whether there is a database to reach, without making one. */
+export const hasDatabase = () => Boolean(process.env.DATABASE_URL) || hasCluster();
 
 /** A throw-away cluster with a migrated and seeded database from which tests copy theirs. */
 export async function openTestCluster(run) {
   const cluster = await startCluster(run, { throwAway: true });
-  await migrateAndSeed(await createDatabase(cluster, 'template_quadrel'));
+  // Tests bring the people they need; those that want the demo seed it themselves.
+  await migrateAndSeed(await createDatabase(cluster, 'template_quadrel'), false);
   return { adminUrl: cluster.url('postgres'), template: 'template_quadrel' };
 }

@@ -9,8 +9,8 @@ export const onPath = (program) =>
     .split(path.delimiter)
     .some((folder) => folder !== '' && fs.existsSync(path.join(folder, program)));
 
-/** The folders with the programs of an installed PostgreSQL server, the newest version first. */
-export function serverFolders() {
+/** The folders that hold all of the named programs of PostgreSQL, the newest version first. */
+export function postgresFolders(programs) {
   const folders = [];
   const debian = '/usr/lib/postgresql';
   if (fs.existsSync(debian)) {
@@ -23,14 +23,24 @@ export function serverFolders() {
       execFileSync('pg_config', ['--bindir'], { encoding: 'utf8', stdio: ['ignore', 'pipe', 'ignore'] }).trim(),
     );
   } catch {
-    // No pg_config: a server elsewhere is not known to this machine.
+    // No pg_config: programs elsewhere are not known to this machine.
   }
-  return folders.filter((folder) => ['postgres', 'initdb'].every((name) => fs.existsSync(path.join(folder, name))));
+  return folders.filter((folder) => programs.every((name) => fs.existsSync(path.join(folder, name))));
 }
+
+/** The folders with the programs of an installed PostgreSQL server, the newest version first. */
+export const serverFolders = () => postgresFolders(['postgres', 'initdb']);
+
+/** The programs that copy a database out and in. */
+export const clientPrograms = ['pg_dump', 'pg_restore', 'psql'];
 
 /** Debian packages this program can use, and how to tell that they are there. */
 const known = {
   postgresql: { what: 'The PostgreSQL server', present: () => serverFolders().length > 0 },
+  'postgresql-client': {
+    what: 'The PostgreSQL client',
+    present: () => postgresFolders(clientPrograms).length > 0,
+  },
   chromium: { what: 'Chromium, for the browser tests,', present: () => fs.existsSync('/usr/bin/chromium') },
   'pari-gp': { what: 'PARI/GP, for the outside checks,', present: () => onPath('gp') },
 };

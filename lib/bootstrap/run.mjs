@@ -40,6 +40,14 @@ export function otherRuns() {
   return records.filter((record) => record !== undefined && record.owner.pid !== process.pid && runs(record.owner));
 }
 
+/** The run that serves from this clone, if there is one: its process and its address. */
+export function servingRun() {
+  const record = readRecord(recordFile('server'));
+  return record?.address !== undefined && runs(record.owner)
+    ? { pid: record.owner.pid, address: record.address }
+    : undefined;
+}
+
 /**
  * One run of a launcher: it knows every process and folder it made, has them on record, and removes them when it ends —
  * or has them removed by the next run, should it be killed.

@@ -1,7 +1,7 @@
 // npm test -- [part …] [arguments for vitest]: everything, or the named parts, on a throw-away cluster and a built server.
 import fs from 'node:fs';
 import path from 'node:path';
-import { ensureBuild } from './build.mjs';
+import { bundleWorkers, ensureBuild } from './build.mjs';
 import { runChecks } from './checks.mjs';
 import { openTestCluster } from './database.mjs';
 import { ensureDependencies, requireNode } from './dependencies.mjs';
@@ -14,7 +14,7 @@ import { Trouble, say } from './trouble.mjs';
 const parts = {
   checks: { packages: [] },
   mathematics: { packages: ['pari-gp'] },
-  database: { packages: [], cluster: true },
+  database: { packages: [], cluster: true, workers: true },
   api: { packages: [], cluster: true, build: true },
   browser: { packages: ['chromium'], cluster: true, build: true },
 };
@@ -69,6 +69,7 @@ await launch('test', 'npm test', 130, async (run) => {
     Object.assign(environment, { QUADREL_TEST_ADMIN_URL: adminUrl, QUADREL_TEST_TEMPLATE: template });
   }
   if (needs.some((need) => need.build)) await ensureBuild(run);
+  else if (needs.some((need) => need.workers)) await bundleWorkers();
   const total = { passed: 0, failed: 0 };
   for (const name of names) {
     if (run.leaving) return 130;

@@ -42,6 +42,8 @@ export interface Contract<
   readonly success?: 200 | 201;
   /** Whether the call takes an `Idempotency-Key`. */
   readonly idempotent?: boolean;
+  /** Media types of a success besides JSON, each under the word that asks for it. */
+  readonly files?: Readonly<Record<string, string>>;
   /** The problems particular to this call; those of every call (method, quota, …) are added by the document. */
   readonly problems: readonly ProblemCode[];
   readonly examples: readonly Example[];

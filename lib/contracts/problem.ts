@@ -78,6 +78,16 @@ export const problemKinds = {
     title: 'Not a uniformizer',
     about: 'A uniformizer has valuation 1 at the place, and goes with exactly one place.',
   },
+  'sides-differ': {
+    status: 422,
+    title: 'The sides are different',
+    about: 'An identity is kept when its sides are equal. What is different can be kept with `warning: true`.',
+  },
+  'sides-agree': {
+    status: 422,
+    title: 'The sides are equal',
+    about: 'With `warning: true` an identity says that its sides are different; these are equal.',
+  },
   quota: {
     status: 429,
     title: 'Too many questions from this address',

@@ -30,8 +30,10 @@ function explain(issue: z.core.$ZodIssue, body: unknown): { key: string; detail:
           : { key, detail: `${named} must be ${article(issue.expected)}.` },
       ];
     case 'too_big':
+      if (issue.origin === 'string') return [{ key, detail: `${named} may have at most ${issue.maximum} characters.` }];
       return [{ key, detail: `${named} may have at most ${issue.maximum} entries.` }];
     case 'too_small':
+      if (issue.origin === 'string') return [{ key, detail: `${named} must not be empty.` }];
       return [
         { key, detail: `${named} must have at least ${issue.minimum} ${issue.minimum === 1 ? 'entry' : 'entries'}.` },
       ];

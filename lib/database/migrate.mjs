@@ -1,5 +1,6 @@
 // Plain JavaScript, so that the launcher can migrate before anything has been compiled.
 import path from 'node:path';
+import { Logger, runMigrations } from 'graphile-worker';
 import pg from 'pg';
 import { Sequelize } from 'sequelize';
 import { SequelizeStorage, Umzug, memoryStorage } from 'umzug';
@@ -24,26 +25,47 @@ async function withDatabase(url, work) {
   }
 }
 
-const runner = (database, folder, storage) =>
+const runner = (context, folder, storage) =>
   new Umzug({
     migrations: { glob: [`${folder}/*.mjs`, { cwd: root }] },
-    context: database.getQueryInterface(),
+    context,
     storage,
     logger: undefined,
   });
 
 const migrations = (database) =>
-  runner(database, 'migrations', new SequelizeStorage({ sequelize: database, tableName: 'migrations' }));
+  runner(
+    database.getQueryInterface(),
+    'migrations',
+    new SequelizeStorage({ sequelize: database, tableName: 'migrations' }),
+  );
 
 const names = (steps) => steps.map((step) => step.name);
 
-/** Brings the schema up to date; returns the names of the migrations it ran. */
-export const migrate = (url) => withDatabase(url, async (database) => names(await migrations(database).up()));
+/** The queue's own tables lie in a schema of their own and are migrated by the package they belong to. */
+const migrateQueue = (url) => runMigrations({ connectionString: url, logger: new Logger(() => () => undefined) });
 
-/** Undoes every migration, the newest first; returns their names. Every row is lost. */
+/** Brings the schema and the queue up to date; returns the names of the migrations of ours that were run. */
+export const migrate = (url) =>
+  withDatabase(url, async (database) => {
+    const done = names(await migrations(database).up());
+    await migrateQueue(url);
+    return done;
+  });
+
+/** Undoes every migration, the newest first, and removes the queue; returns their names. Every row is lost. */
 export const rollBack = (url) =>
-  withDatabase(url, async (database) => names(await migrations(database).down({ to: 0 })));
+  withDatabase(url, async (database) => {
+    await database.query('DROP SCHEMA IF EXISTS graphile_worker CASCADE');
+    return names(await migrations(database).down({ to: 0 }));
+  });
 
-/** Runs every seeder. Each one may be run any number of times. */
-export const seed = (url) =>
-  withDatabase(url, async (database) => names(await runner(database, 'seeders', memoryStorage()).up()));
+/**
+ * Runs every seeder. Each one may be run any number of times. With `demo` a database in which nobody has an account gets the
+ * invented groups, whose passwords everyone knows.
+ */
+export const seed = (url, { demo = false } = {}) =>
+  withDatabase(url, async (database) => {
+    const context = { queryInterface: database.getQueryInterface(), demo };
+    return names(await runner(context, 'seeders', memoryStorage()).up());
+  });

@@ -14,6 +14,7 @@ const foreignHeader = 'x-foreign-method';
  *
  * - `X-Forwarded-For` becomes the address of the socket, whatever the client wrote there, unless the configuration says that a
  *   proxy of one's own sets that header.
+ * - A path with a percent sign that encodes no text gets `%25` for each: the framework fails on it, and so nothing is there.
  * - A foreign method, such as TRACE, becomes OPTIONS, which changes nothing anywhere, and is remembered for `foreignMethod`.
  */
 export function correctIncoming(): void {
@@ -24,11 +25,24 @@ export function correctIncoming(): void {
     if (!isRequestStart(message)) return;
     const { request } = message;
     if (!trustProxy) request.headers['x-forwarded-for'] = request.socket.remoteAddress ?? '';
+    if (request.url !== undefined) request.url = decodable(request.url);
     delete request.headers[foreignHeader];
     if (request.method === undefined || known.has(request.method)) return;
     request.headers[foreignHeader] = request.method;
     request.method = 'OPTIONS';
   });
+}
+
+/** An address whose path can be decoded: as it is, or with its percent signs taken for themselves. */
+function decodable(address: string): string {
+  const end = address.search(/[?#]|$/);
+  const path = address.slice(0, end);
+  try {
+    decodeURIComponent(path);
+    return address;
+  } catch {
+    return path.replaceAll('%', '%25') + address.slice(end);
+  }
 }
 
 const isRequestStart = (message: unknown): message is { readonly request: IncomingMessage } =>

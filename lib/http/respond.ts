@@ -1,4 +1,5 @@
 import { type Problem, problemOf } from '@/lib/contracts/problem';
+import { byteStream, type SentFile } from './sent-file';
 
 /** What every answer of the API says to a browser: data, never a page, and not to be kept. */
 const always = {
@@ -16,6 +17,12 @@ export function jsonResponse(body: unknown, status: number, headers: Readonly<Re
     headers: { 'Content-Type': 'application/json', ...always, ...headers },
   });
 }
+
+/** A file as a response, to be kept and not to be shown. */
+export const fileResponse = ({ type, name, chunks }: SentFile, headers: Readonly<Record<string, string>>): Response =>
+  new Response(byteStream(chunks), {
+    headers: { 'Content-Type': type, 'Content-Disposition': `attachment; filename="${name}"`, ...always, ...headers },
+  });
 
 /** A problem document as a response. */
 export function problemResponse(problem: Problem, headers: Readonly<Record<string, string>> = {}): Response {

@@ -11,7 +11,8 @@ import { callerOf } from './caller';
 import { addressOf, foreignMethod } from './incoming';
 import { takeQuota } from './quota';
 import { requestId } from './request-id';
-import { jsonResponse, problemResponse } from './respond';
+import { fileResponse, jsonResponse, problemResponse } from './respond';
+import type { SentFile } from './sent-file';
 
 type Context = { readonly params: Promise<Record<string, string | string[] | undefined>> };
 type Handler = (request: Request, context: Context) => Promise<Response>;
@@ -33,9 +34,12 @@ export interface Asked<Body, Params, Query> {
   readonly idempotencyKey: string | undefined;
 }
 
+/** What a service gives: its answer, a file with it, or why there is none. */
+export type Served<Answer> = Reply<Answer> | { readonly file: SentFile };
+
 export interface Service<Body, Answer, Params = undefined, Query = undefined> {
   /** Serves one valid request. `signal` is aborted when the client goes away. */
-  readonly serve: (asked: Asked<Body, Params, Query>, signal: AbortSignal) => Promise<Reply<Answer>>;
+  readonly serve: (asked: Asked<Body, Params, Query>, signal: AbortSignal) => Promise<Served<Answer>>;
   /** How many computations the request counts as. */
   readonly cost: (body: Body) => number;
 }
@@ -77,6 +81,7 @@ export function bind<
     const all = { ...headers, ...quota.headers };
     if (quota.problem !== undefined) return problemResponse(quota.problem, all);
     const reply = await service.serve(asked, request.signal);
+    if ('file' in reply) return fileResponse(reply.file, all);
     return 'answer' in reply
       ? jsonResponse(reply.answer, contract.success ?? 200, all)
       : problemResponse(reply.problem, all);

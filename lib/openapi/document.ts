@@ -3,16 +3,20 @@ import {
   type HeadersObject,
   type OpenAPIObject,
   type OperationObject,
+  type ParameterObject,
   type ResponseObject,
+  type SchemaObject,
 } from 'openapi3-ts/oas31';
+import { z } from 'zod';
 import type { AnyContract, Example } from '@/lib/contracts/contract';
 import { apiVersion } from '@/lib/contracts/openapi';
 import { type ProblemCode, problemKinds } from '@/lib/contracts/problem';
+import { roleMay, ruleOf } from '@/lib/permissions';
 import { componentSchemas, nameOf, reference } from './components';
 import { contracts } from './contracts';
 
 /** Problems that any call can meet. */
-const everyCall: readonly ProblemCode[] = ['method', 'internal'];
+const everyCall: readonly ProblemCode[] = ['unauthenticated', 'method', 'internal'];
 /** Problems that any call with a body can meet. */
 const withBody: readonly ProblemCode[] = ['unreadable-json', 'too-large', 'content-type'];
 /** Problems that any call which counts towards the quota can meet. */
@@ -26,9 +30,14 @@ export function openApiDocument(): OpenAPIObject {
       title: 'Quadrel',
       version: apiVersion,
       description:
-        'Milnor–Witt K-theory over REST: canonical forms, decided equalities and residues. JSON in and out; what cannot be answered comes back as a problem document (RFC 9457). No account is needed below a quota for each address.',
+        'Milnor–Witt K-theory over REST: canonical forms, decided equalities and residues, and the register of a group. JSON in and out; what cannot be answered comes back as a problem document (RFC 9457). Computations need no account below a quota for each address; the register needs a token.',
     })
-    .addServer({ url: '/' });
+    .addServer({ url: '/' })
+    .addSecurityScheme('token', {
+      type: 'http',
+      scheme: 'bearer',
+      description: 'A token that a member makes on the account page, for one group and with scopes.',
+    });
   for (const [name, schema] of Object.entries(componentSchemas())) builder.addSchema(name, schema);
   for (const contract of contracts)
     builder.addPath(contract.path, { [contract.method.toLowerCase()]: operation(contract) });
@@ -40,7 +49,9 @@ function operation(contract: AnyContract): OperationObject {
   return {
     operationId: contract.operation,
     summary: contract.summary,
-    description: contract.description,
+    description: `${contract.description}${needs(contract)}`,
+    security: [...(roleMay('visitor', contract.permission) ? [{}] : []), { token: [] }],
+    ...(parameters(contract).length === 0 ? {} : { parameters: parameters(contract) }),
     ...(request === undefined
       ? {}
       : {
@@ -54,8 +65,37 @@ function operation(contract: AnyContract): OperationObject {
             },
           },
         }),
-    responses: { '200': success(contract), ...declines(contract) },
+    responses: { [contract.success ?? 200]: success(contract), ...declines(contract) },
   };
+}
+
+/** What a token needs for the call, in a sentence. */
+function needs({ permission }: AnyContract): string {
+  const { from, scope } = ruleOf(permission);
+  const role = from === 'visitor' ? '' : ` Whoever asks must be ${from === 'author' ? 'an' : 'a'} ${from} or more.`;
+  return scope === 'any' || scope === 'none' ? role : `${role} A token needs the scope \`${scope}\`.`;
+}
+
+function parameters({ params, query, idempotent }: AnyContract): ParameterObject[] {
+  const key: ParameterObject = {
+    name: 'Idempotency-Key',
+    in: 'header',
+    description: 'A word of the caller for this request: sent again with the same key, it makes nothing new.',
+    schema: { type: 'string', minLength: 1, maxLength: 200 },
+  };
+  return [
+    ...(params === undefined ? [] : parametersOf(params, 'path')),
+    ...(query === undefined ? [] : parametersOf(query, 'query')),
+    ...(idempotent === true ? [key] : []),
+  ];
+}
+
+function parametersOf(schema: z.ZodObject, place: 'path' | 'query'): ParameterObject[] {
+  const { properties = {}, required = [] } = z.toJSONSchema(schema, { io: 'input' });
+  return Object.entries(properties).map(([name, property]) => {
+    const { description, ...rest } = property as SchemaObject;
+    return { name, in: place, required: required.includes(name), description, schema: rest };
+  });
 }
 
 const success = (contract: AnyContract): ResponseObject => ({
@@ -66,13 +106,22 @@ const success = (contract: AnyContract): ResponseObject => ({
       schema: { $ref: reference(nameOf(contract.answer)) },
       examples: examples(contract.examples, 'answer'),
     },
+    ...Object.fromEntries(
+      Object.values(contract.files ?? {}).map((media) => [media, { schema: { type: 'string' as const } }]),
+    ),
   },
 });
 
 const examples = (all: readonly Example[], side: 'request' | 'answer') =>
   Object.fromEntries(all.map((example) => [example.name, { summary: example.summary, value: example[side] }]));
 
-const isCounted = (contract: AnyContract): boolean => contract.permission === 'compute';
+/** Everything but what says how the service or the token is counts towards the quota. */
+const isCounted = ({ permission }: AnyContract): boolean =>
+  permission !== 'service-state' && permission !== 'token-state';
+
+/** Whether a caller who is known may lack what the call needs. */
+const canBeForbidden = ({ permission }: AnyContract): boolean =>
+  ruleOf(permission).scope !== 'any' || !roleMay('reader', permission);
 
 /** One response for each status, its description listing every problem of that status. */
 function declines(contract: AnyContract): Record<string, ResponseObject> {
@@ -80,6 +129,7 @@ function declines(contract: AnyContract): Record<string, ResponseObject> {
     ...everyCall,
     ...(contract.request === undefined ? [] : withBody),
     ...(isCounted(contract) ? counted : []),
+    ...(canBeForbidden(contract) ? (['forbidden'] as const) : []),
     ...contract.problems,
   ]);
   const byStatus: Record<string, ProblemCode[]> = {};
@@ -101,12 +151,16 @@ const header = (description: string, type: 'string' | 'integer') => ({ descripti
 const requestIdHeader = { 'X-Request-Id': header('Id of the request: the one sent, or a new one.', 'string') };
 
 const quotaHeaders = {
-  'RateLimit-Limit': header('Questions an address has in a minute; absent when there is no quota.', 'integer'),
+  'RateLimit-Limit': header(
+    'Questions an address, or a token, has in a minute; absent when there is no quota.',
+    'integer',
+  ),
   'RateLimit-Remaining': header('How many of them are left.', 'integer'),
   'RateLimit-Reset': header('Seconds until all of them are there again.', 'integer'),
 };
 
 function declineHeaders(status: string): HeadersObject {
+  if (status === '401') return { 'WWW-Authenticate': header('Bearer.', 'string') };
   if (status === '405') return { Allow: header('The methods that answer.', 'string') };
   if (status === '429' || status === '503') return { 'Retry-After': header('Seconds to wait.', 'integer') };
   return {};

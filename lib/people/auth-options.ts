@@ -23,7 +23,13 @@ export const authOptions = (): NextAuthOptions => ({
       credentials: { email: { label: 'E-mail address' }, password: { label: 'Password', type: 'password' } },
       async authorize(given, request) {
         const headers = new Headers(request.headers as Record<string, string> | undefined);
-        const checked = await checkPassword(given?.email ?? '', given?.password ?? '', addressOf(headers));
+        const checked = await checkPassword(given?.email ?? '', given?.password ?? '', addressOf(headers)).catch(
+          (error: unknown) => {
+            // next-auth tells the browser what was thrown; what failed inside is for the log alone.
+            console.error('A sign-in failed:', error);
+            throw new Error('failed');
+          },
+        );
         // The message travels to the sign-in page as the error of the attempt.
         if (checked.outcome === 'too-often') throw new Error(`wait-${checked.seconds}`);
         return checked.outcome === 'right' ? { id: checked.id, version: checked.version } : null;

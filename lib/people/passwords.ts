@@ -1,10 +1,6 @@
 import 'server-only';
 import { hash, verify } from '@node-rs/argon2';
-
-/** Characters a password must have at least; its length is the only rule (NIST SP 800-63B, 5.1.1.2). */
-export const shortestPassword = 10;
-/** Longer ones are refused, so that hashing cannot be made expensive. */
-export const longestPassword = 200;
+import { longestPassword } from './password-length';
 
 /** The package's number for argon2id; its enum is not there at run time. */
 const argon2id = 2;

@@ -2,7 +2,7 @@ import 'server-only';
 import { database } from '@/lib/database/connection';
 import { User } from '@/models/user';
 import { isPassword } from './passwords';
-import { attempt, forgive } from './throttle';
+import { attempt, forgive, giveBack } from './throttle';
 
 export type SignedIn =
   | { readonly outcome: 'right'; readonly id: string; readonly version: number }
@@ -11,13 +11,15 @@ export type SignedIn =
 
 /** Checks an address and a password. Guesses are counted by account and by address of the network, before they are tried. */
 export async function checkPassword(email: string, password: string, address: string): Promise<SignedIn> {
-  const account = email.trim().toLowerCase();
+  // The database takes no NUL, and no account has one.
+  const account = email.replaceAll('\0', '\ufffd').trim().toLowerCase();
   const waits = await Promise.all([attempt('sign-in-account', account), attempt('sign-in-address', address)]);
   const seconds = Math.max(...waits.map((wait) => wait ?? 0));
   if (seconds > 0) return { outcome: 'too-often', seconds };
   database();
   const user = await User.findOne({ where: { email: account } });
   if (!(await isPassword(password, user?.passwordHash)) || user === null) return { outcome: 'wrong' };
-  await forgive('sign-in-account', account);
+  // A whole institute may come from one address: what is right does not count against the others.
+  await Promise.all([forgive('sign-in-account', account), giveBack('sign-in-address', address)]);
   return { outcome: 'right', id: user.id, version: user.sessionVersion };
 }

@@ -49,3 +49,8 @@ export async function attempt(limit: Limit, key: string): Promise<number | undef
 export async function forgive(limit: Limit, key: string): Promise<void> {
   await limiter(limit).delete(key.slice(0, 200));
 }
+
+/** Takes one counted attempt back: it turned out to be none of those that are to be few. */
+export async function giveBack(limit: Limit, key: string): Promise<void> {
+  await limiter(limit).reward(key.slice(0, 200));
+}

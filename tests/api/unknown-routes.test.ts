@@ -15,6 +15,16 @@ test.each([
   }
 });
 
+test.each(['%zz', '%ff', '%ED%A0%80', '%'])('nothing is at an address that cannot be decoded: %j', async (part) => {
+  for (const path of [`/api/v1/${part}`, `/api/v1/identities/${part}`, `/api/auth/${part}`])
+    expect(await get(path)).toMatchObject({ status: 404, type: 'application/problem+json' });
+  for (const path of ['/identities/', '/invitation/', '/reset/', '/bench/', '/'])
+    expect(await get(path + part)).toMatchObject({
+      status: path === '/invitation/' || path === '/reset/' ? 200 : 404,
+      type: 'text/html',
+    });
+});
+
 test('the address is given back as JSON only', async () => {
   const answer = await get('/api/v1/%3Cscript%3Ealert(1)%3C/script%3E');
   expect(answer).toMatchObject({ status: 404, type: 'application/problem+json' });

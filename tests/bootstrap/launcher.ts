@@ -29,7 +29,7 @@ export function makeStateFolder(options: { closed?: boolean } = {}): string {
 }
 
 /** Starts a small launcher on the same machinery as `npm start`: it opens what its first argument says and waits. */
-export function startLauncher(stateFolder: string, what: 'sleeper' | 'database'): Launched {
+export function startLauncher(stateFolder: string, what: 'sleeper' | 'database' | 'serving'): Launched {
   const { DATABASE_URL: _unused, ...environment } = process.env;
   const child = spawn(process.execPath, [program, what], {
     stdio: ['ignore', 'pipe', 'pipe'],

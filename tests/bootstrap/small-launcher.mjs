@@ -4,8 +4,10 @@ import { launch } from '../../lib/bootstrap/launch.mjs';
 import { say } from '../../lib/bootstrap/trouble.mjs';
 
 await launch('server', 'npm start', 0, async (run) => {
-  if (process.argv[2] === 'database') {
+  const what = process.argv[2];
+  if (what !== 'sleeper') {
     const { url, server } = await openDatabase(run);
+    if (what === 'serving') run.serves('http://127.0.0.1:1');
     say(`ready ${JSON.stringify({ url, pid: server.child.pid })}`);
     await server.ended;
     return 1;

@@ -1,5 +1,8 @@
 import { expect, test } from 'vitest';
 import { errorsOf, findings, openPage } from '../harness/browser';
+import { newGroup } from '../harness/people';
+import { newAccount } from '../harness/sign-in';
+import { pageOf } from './register-page';
 
 test('the line gives a real answer, and another one to another statement', async () => {
   const page = await openPage('/');
@@ -26,12 +29,21 @@ test('what stands in the line opens on the bench', async () => {
   expect(new URL(page.url()).searchParams.get('statement')).toBe('[5][6] = [-1][6]');
 });
 
+test('whoever has an account, or wants one, is told where', async () => {
+  const page = await openPage('/');
+  await page.getByRole('link', { name: 'start a group' }).waitFor();
+  const member = await newAccount(await newGroup(undefined, 'Tarn reading group'), 'reader');
+  const own = await pageOf(member, '/');
+  await own.getByRole('link', { name: 'the register of Tarn reading group' }).click();
+  await own.waitForURL('**/register');
+});
+
 test('the contents name the rooms there are, and nothing that is not there', async () => {
   const page = await openPage('/');
   const contents = page.getByRole('navigation', { name: 'Contents' });
   const paths = await contents
     .getByRole('link')
     .evaluateAll((links) => links.map((link) => link.getAttribute('href') ?? ''));
-  expect(paths).toEqual(['/bench', '/help', '/help/api']);
+  expect(paths).toEqual(['/bench', '/register', '/help', '/help/api']);
   for (const path of paths) expect((await page.request.get(path)).status()).toBe(200);
 });

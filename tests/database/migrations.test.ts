@@ -24,6 +24,7 @@ test('the migrations run in order, once, and make the schema of schema.golden.tx
 test('every migration is undone, the newest first, and nothing is left but the list of migrations', async () => {
   expect(await rollBack(url())).toEqual([...files].reverse());
   expect(await tables()).toEqual(['migrations']);
+  expect(await runSql(url(), `SELECT to_regnamespace('graphile_worker') AS queue`)).toEqual([{ queue: null }]);
 });
 
 test('they can be run again after that', async () => {

@@ -17,8 +17,8 @@ export const rooms = [
   { room: 'grammar', rooms: ['engine/expression'], packages: ['ohm-js'] },
   { room: 'models', rooms: [], packages: ['sequelize'] },
   { room: 'migrations', rooms: [], packages: ['sequelize'] },
-  { room: 'seeders', rooms: [], packages: ['sequelize'] },
-  { room: 'lib/contracts', rooms: [], packages: ['zod'] },
+  { room: 'seeders', rooms: [], packages: ['sequelize', '@node-rs/argon2', 'node'] },
+  { room: 'lib/contracts', rooms: ['models/identity-words', 'models/role', 'models/scope'], packages: ['zod'] },
   {
     room: 'lib/compute',
     rooms: ['engine', 'grammar', 'lib/contracts', 'lib/config'],
@@ -28,9 +28,15 @@ export const rooms = [
   {
     room: 'lib/database',
     rooms: ['lib/config', 'models'],
-    packages: ['sequelize', 'pg', 'umzug', 'server-only', 'node'],
+    packages: ['sequelize', 'pg', 'umzug', 'graphile-worker', 'server-only', 'node'],
   },
-  { room: 'lib/bootstrap', rooms: ['lib/database'], packages: ['esbuild', 'pg', 'node'] },
+  { room: 'lib/bootstrap', rooms: ['lib/database'], packages: ['esbuild', 'pg', 'smtp-server', 'node'] },
+  {
+    room: 'lib/register',
+    rooms: ['lib', 'models', 'grammar', 'engine/expression', 'engine/version'],
+    packages: ['sequelize', 'zod', 'server-only', 'node'],
+  },
+  { room: 'lib/mail', rooms: ['lib/config'], packages: ['nodemailer', 'server-only'] },
   { room: 'lib', rooms: ['lib', 'models', 'engine/version'], packages: 'any' },
   { room: 'app', rooms: ['lib', 'grammar', 'engine/expression', 'engine/version', 'package.json'], packages: 'any' },
   { room: 'package.json', rooms: [], packages: [] },

@@ -1,5 +1,6 @@
 import { spawn } from 'node:child_process';
 import type { ChildProcess } from 'node:child_process';
+import { randomBytes } from 'node:crypto';
 import { once } from 'node:events';
 import net from 'node:net';
 import path from 'node:path';
@@ -9,6 +10,8 @@ import { clusterFromEnvironment, createDatabase, dropDatabase } from './database
 export interface RunningServer {
   readonly url: string;
   readonly databaseUrl: string;
+  /** What it was started with; `startJobWorker` takes the same, once an SMTP_URL is among it. */
+  readonly settings: Readonly<Record<string, string>> & { readonly DATABASE_URL: string };
   stop(): Promise<void>;
 }
 
@@ -34,12 +37,23 @@ async function end(child: ChildProcess): Promise<void> {
 
 /**
  * Starts the server that was built, with a database of its own and the given settings, and waits until it is well. No quota
- * holds unless one is set here.
+ * holds unless one is set here. A server that is to send mail is given a mailbox (`SMTP_URL`), and a job worker beside it.
  */
 export async function startServer(settings: Readonly<Record<string, string>> = {}): Promise<RunningServer> {
   const cluster = clusterFromEnvironment();
   const databaseUrl = await createDatabase(cluster);
   const port = await freePort();
+  const url = `http://127.0.0.1:${port}`;
+  const given = {
+    NEXTAUTH_SECRET: randomBytes(32).toString('base64url'),
+    NEXTAUTH_URL: url,
+    PUBLIC_URL: url,
+    COMPUTE_QUOTA_PER_MINUTE: '0',
+    TOKEN_QUOTA_PER_MINUTE: '0',
+    ...settings,
+    PORT: String(port),
+    DATABASE_URL: databaseUrl,
+  };
   const root = path.resolve(import.meta.dirname, '..', '..');
   const child = spawn(
     process.execPath,
@@ -47,27 +61,18 @@ export async function startServer(settings: Readonly<Record<string, string>> = {
     {
       cwd: root,
       stdio: ['ignore', 'pipe', 'pipe'],
-      env: {
-        ...process.env,
-        NODE_ENV: 'production',
-        NEXT_TELEMETRY_DISABLED: '1',
-        COMPUTE_QUOTA_PER_MINUTE: '0',
-        ...settings,
-        PORT: String(port),
-        DATABASE_URL: databaseUrl,
-      },
+      env: { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1', ...given },
     },
   );
   let output = '';
   for (const stream of [child.stdout, child.stderr]) stream.on('data', (data: Buffer) => (output += data.toString()));
-  const url = `http://127.0.0.1:${port}`;
   const stop = async () => {
     await end(child);
     await dropDatabase(cluster, databaseUrl);
   };
   for (const limit = Date.now() + 90_000; Date.now() < limit && child.exitCode === null; await pause(100)) {
     const response = await fetch(`${url}/api/v1/health`).catch(() => undefined);
-    if (response?.ok === true) return { url, databaseUrl, stop };
+    if (response?.ok === true) return { url, databaseUrl, settings: given, stop };
   }
   await stop();
   throw new Error(`The server did not become well. What it said:\n${output}`);

@@ -112,5 +112,20 @@ export const askInvariants = (field: string, expression: string, signal: AbortSi
 export const askResidues = (field: string, expression: string, signal: AbortSignal): Promise<ResiduesAnswer> =>
   post<ResiduesRequest, ResiduesAnswer>('/api/v1/residues', { field, expression }, signal);
 
+/** The residue of a class at one place, against a uniformizer of one's own if one is named. */
+export const askResidueAt = (
+  { field, expression, place, uniformizer }: Record<'field' | 'expression' | 'place' | 'uniformizer', string>,
+  signal: AbortSignal,
+): Promise<ResiduesAnswer> =>
+  post<ResiduesRequest, ResiduesAnswer>(
+    '/api/v1/residues',
+    { field, expression, places: [place], ...(uniformizer === '' ? {} : { uniformizer }) },
+    signal,
+  );
+
+/** A verdict on two expressions. */
+export const askSame = (field: string, left: string, right: string, signal: AbortSignal): Promise<CompareAnswer> =>
+  post<CompareRequest, CompareAnswer>('/api/v1/compare', { field, left, right, forms: true }, signal);
+
 /** Asks whether a field exists, by the smallest question over it; the answer names the field and its modulus. */
 export const askField = (field: string, signal: AbortSignal): Promise<NormalizeAnswer> => askForm(field, '0', signal);

@@ -8,6 +8,7 @@ import { Slip } from '../slip/slip';
 import { Announcer } from './announcer';
 import { AskClient } from './ask-client';
 import type { Draft } from './drafts';
+import { MayKeep } from './keeping';
 import { Sheet } from './sheet/sheet';
 import { SlabRow } from './slab/slab-row';
 import { useBench } from './use-bench';
@@ -16,9 +17,11 @@ import { useDraft } from './use-draft';
 interface Props {
   /** What the address opens; undefined for the bare bench. */
   readonly opened: Draft | undefined;
+  /** Whether a statement may be kept in the register from here; a visitor is asked to sign in there. */
+  readonly mayKeep: boolean;
 }
 
-function OpenBench({ opened }: Props) {
+function OpenBench({ opened }: Pick<Props, 'opened'>) {
   const bench = useBench(opened);
   const { field, text, edited, write } = bench;
   const now = useMemo(() => ({ field, statement: text }), [field, text]);
@@ -51,10 +54,12 @@ function OpenBench({ opened }: Props) {
 }
 
 /** The bench: one statement or expression at a time, answered as it is typed. */
-export function Bench({ opened }: Props) {
+export function Bench({ opened, mayKeep }: Props) {
   return (
     <AskClient>
-      <OpenBench opened={opened} />
+      <MayKeep value={mayKeep}>
+        <OpenBench opened={opened} />
+      </MayKeep>
     </AskClient>
   );
 }

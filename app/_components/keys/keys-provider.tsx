@@ -3,6 +3,7 @@
 import { createContext, useContext, useEffect, useRef, useState, type ReactNode } from 'react';
 import { useStored } from '../theme/stored';
 import { RoomsLeaf } from '../shell/rooms-leaf';
+import type { Who } from '../shell/who';
 import { KeysLeaf } from './keys-leaf';
 import { letters } from './letters';
 import { isWritingPlace, KeyRegistry } from './registry';
@@ -55,7 +56,8 @@ export function useKeyNote({ keys, label }: { keys: readonly string[]; label: st
   useEffect(() => registry.addNote({ keys: written.split(' '), label }), [registry, written, label]);
 }
 
-export function KeysProvider({ children }: { children: ReactNode }) {
+/** Keys for all that is inside; `who` is told to the list of rooms. */
+export function KeysProvider({ who, children }: { who: Who; children: ReactNode }) {
   const [registry] = useState(() => new KeyRegistry());
   const [leaf, setLeaf] = useState<OpenLeaf>();
   const on = useStored(letters) === 'on';
@@ -80,7 +82,7 @@ export function KeysProvider({ children }: { children: ReactNode }) {
     <KeysContext.Provider value={{ registry, openLeaf: setLeaf }}>
       {children}
       <KeysLeaf open={leaf === 'keys'} onClose={close} rows={leaf === 'keys' ? registry.rows() : []} />
-      <RoomsLeaf open={leaf === 'rooms'} onClose={close} />
+      <RoomsLeaf open={leaf === 'rooms'} onClose={close} who={who} />
     </KeysContext.Provider>
   );
 }

@@ -18,9 +18,14 @@ export function Leaf({ open, onClose, title, broad = false, children }: Props) {
   useEffect(() => {
     const dialog = leaf.current;
     if (!dialog || !open) return;
+    const before = document.activeElement;
     if (!dialog.open) dialog.showModal();
     dialog.querySelector<HTMLElement>('input:not([type=checkbox]), textarea, select, [contenteditable=true]')?.focus();
-    return () => dialog.close();
+    return () => {
+      dialog.close();
+      // The leaf is taken away before it could hand the focus back by itself.
+      if (document.activeElement === document.body && before instanceof HTMLElement) before.focus();
+    };
   }, [open]);
 
   if (!open) return null;

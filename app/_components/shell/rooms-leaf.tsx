@@ -6,23 +6,41 @@ import { Button } from '../button/button';
 import { Leaf } from '../leaf/leaf';
 import { ThemeChoice } from '../theme/theme-choice';
 import { isIn, rooms } from './rooms';
+import { SignInLink } from './sign-in-link';
+import type { Who } from './who';
 
-/** The list of rooms, and the theme. */
-export function RoomsLeaf({ open, onClose }: { open: boolean; onClose: () => void }) {
+interface Props {
+  open: boolean;
+  onClose: () => void;
+  who: Who;
+}
+
+/** The list of rooms, the group and the person, and the theme. */
+export function RoomsLeaf({ open, onClose, who: { person, group } }: Props) {
   const pathname = usePathname();
+  const current = (href: string) => (isIn(pathname, { href }) ? 'page' : undefined);
   return (
     <Leaf open={open} onClose={onClose} title="Rooms">
       <nav className="room-list" aria-label="Rooms">
         {rooms.map((room) => (
-          <Link
-            key={room.href}
-            href={room.href}
-            aria-current={isIn(pathname, room) ? 'page' : undefined}
-            onClick={onClose}
-          >
+          <Link key={room.href} href={room.href} aria-current={current(room.href)} onClick={onClose}>
             {room.name}
           </Link>
         ))}
+      </nav>
+      <nav className="room-list mt-6" aria-label="Group and person">
+        {group !== undefined && (
+          <Link className="italic" href="/group" aria-current={current('/group')} onClick={onClose}>
+            {group}
+          </Link>
+        )}
+        {person === undefined ? (
+          <SignInLink onClick={onClose} />
+        ) : (
+          <Link href="/account" aria-current={current('/account')} onClick={onClose}>
+            {person}
+          </Link>
+        )}
       </nav>
       <div className="mt-5">
         <span className="label">Theme</span>

@@ -11,11 +11,16 @@ export interface Room {
 export const rooms: readonly Room[] = [
   { href: '/bench', name: 'Bench', says: 'one statement at a time: its canonical form, a verdict, and the reason' },
   {
+    href: '/register',
+    name: 'Register',
+    says: 'the identities a group keeps: stated, checked, citable, found again by their words',
+  },
+  {
     href: '/help',
     name: 'Help',
     says: 'the language, the conventions, what is decided over which field, and the REST API',
   },
 ];
 
-export const isIn = (pathname: string, room: Room): boolean =>
+export const isIn = (pathname: string, room: Pick<Room, 'href'>): boolean =>
   pathname === room.href || pathname.startsWith(`${room.href}/`);

@@ -1,7 +1,9 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { openLink } from '@/lib/links/links';
+import { currentCaller } from '@/lib/people/current';
 import { Bench } from '../../_components/bench/bench';
+import { mayKeep } from '../../_components/register/may-keep';
 import { Colophon } from '../../_components/shell/colophon';
 
 export const metadata: Metadata = { title: 'Bench' };
@@ -17,7 +19,7 @@ export default async function LinkedBenchPage({ params }: Props) {
   if (!opened) notFound();
   return (
     <>
-      <Bench key={code} opened={opened} />
+      <Bench key={code} opened={opened} mayKeep={mayKeep(await currentCaller())} />
       <Colophon />
     </>
   );

@@ -7,6 +7,8 @@ const keys: readonly { keys: readonly string[]; says: string }[] = [
   { keys: ['Esc'], says: 'leave the line, so that letters act' },
   { keys: ['I'], says: 'back to the line' },
   { keys: ['F'], says: 'choose the field' },
+  { keys: ['K'], says: 'keep as identity' },
+  { keys: ['M'], says: 'look for an identity' },
   { keys: ['C'], says: 'copy as text' },
   { keys: ['T'], says: 'copy as TeX' },
   { keys: ['L'], says: 'copy the link' },

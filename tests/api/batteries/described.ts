@@ -32,16 +32,20 @@ export function expectSchema(api: Json, schema: Json, value: unknown): void {
   expect(result.error?.issues ?? []).toEqual([]);
 }
 
-/** Checks that an answer is a problem document with this status and code that the OpenAPI document describes. */
+/**
+ * Checks that an answer is a problem document with this status and code that the OpenAPI document describes. The path is the
+ * one of the document, with braces.
+ */
 export async function expectProblem(
   path: string,
   answer: Answer,
   status: number,
   code: string,
   more: Json = {},
+  method: 'get' | 'post' = 'post',
 ): Promise<void> {
   expect(answer).toMatchObject({ status, type: 'application/problem+json' });
   expect(answer.body).toMatchObject({ status, code, type: `/help#error-${code}`, ...more });
   expect(answer.headers.get('x-content-type-options')).toBe('nosniff');
-  await expectDescribed('post', path, answer);
+  await expectDescribed(method, path, answer);
 }

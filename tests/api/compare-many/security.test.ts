@@ -5,7 +5,7 @@ import { transportBattery } from '../batteries/transport';
 
 const path = '/api/v1/compare/many';
 
-transportBattery(path, { compares: [{ field: 'Q', left: '[2][-1]', right: '[-1][2]' }] });
+transportBattery(path, { body: { compares: [{ field: 'Q', left: '[2][-1]', right: '[-1][2]' }] } });
 
 test('keys inside a question are held as strictly as alone', async () => {
   const text =

@@ -6,7 +6,7 @@ import { transportBattery } from '../batteries/transport';
 const path = '/api/v1/compare';
 const body = { field: 'Q', left: '[2][-1]', right: '[-1][2]' };
 
-transportBattery(path, body);
+transportBattery(path, { body });
 
 test('towers of powers end at a size limit', async () => {
   const answer = await post(path, { field: 'Q', left: '(((2^64)^64)^64)^64', right: '1' });

@@ -6,7 +6,7 @@ import { transportBattery } from '../batteries/transport';
 const path = '/api/v1/normalize';
 const body = { field: 'Q', expression: '[2][-1]' };
 
-transportBattery(path, body);
+transportBattery(path, { body });
 
 test('markup in the text comes back inside JSON, in a problem document', async () => {
   const answer = await post(path, { field: 'Q', expression: '<script>alert(1)</script>' });

@@ -6,7 +6,7 @@ import { transportBattery } from '../batteries/transport';
 const path = '/api/v1/residues';
 const body = { field: 'Q', expression: '[7][2]' };
 
-transportBattery(path, body);
+transportBattery(path, { body });
 
 test('more places than are allowed are refused', async () => {
   const answer = await post(path, { ...body, places: Array.from({ length: 101 }, () => '7') });

@@ -1,6 +1,9 @@
+'use client';
+
 import type { Answer } from '../ask';
 import { degreeMeaning, degreeName } from '../degrees';
 import { Formula } from '../../math/formula';
+import { KeepButton, useKeep } from '../keeping';
 import { type Phrase, Said, tex, withFormulas } from '../phrase';
 
 function conditionsPhrase(answer: Answer): Phrase {
@@ -46,15 +49,49 @@ function Degrees({ answer }: { readonly answer: Answer }) {
   );
 }
 
+/** A pair that differs can be kept too, and then says so. */
+function KeepWarning({ answer, current }: { readonly answer: Answer; readonly current: boolean }) {
+  const keep = useKeep(answer.question);
+  if (!keep || answer.kind !== 'statement' || answer.body.verdict !== 'different') return null;
+  return (
+    <div>
+      <h2>keep it all the same?</h2>
+      <p>
+        A different pair can be kept as a warning. The register then says that the two sides are <i>not</i> the same,
+        with this evidence. <KeepButton question={answer.question} verdict="different" current={current} />
+      </p>
+    </div>
+  );
+}
+
+function KeepResidue({ answer, current }: { readonly answer: Answer; readonly current: boolean }) {
+  const keep = useKeep(answer.question, 'residue');
+  if (!keep || answer.kind !== 'expression' || !current) return null;
+  return (
+    <div>
+      <h2>keep a residue</h2>
+      <p>
+        What the residue of this class is at a place can be{' '}
+        <button type="button" className="plain" onClick={keep}>
+          kept in the register
+        </button>
+        .
+      </p>
+    </div>
+  );
+}
+
 interface Props {
   readonly answer: Answer;
+  /** Whether it answers what stands in the line now. */
+  readonly current: boolean;
   readonly meaning: Phrase | undefined;
   /** Puts another text into the line. */
   readonly onWrite: (text: string) => void;
 }
 
 /** The notes at the edge of the sheet: what the answer rests on, where the parts lie, where one can go from here. */
-export function Notes({ answer, meaning, onWrite }: Props) {
+export function Notes({ answer, current, meaning, onWrite }: Props) {
   const statement = answer.kind === 'statement' ? answer.body : undefined;
   const left = statement?.sides[0];
   const right = statement?.sides.at(-1);
@@ -94,6 +131,8 @@ export function Notes({ answer, meaning, onWrite }: Props) {
           </p>
         </div>
       )}
+      <KeepWarning answer={answer} current={current} />
+      <KeepResidue answer={answer} current={current} />
     </aside>
   );
 }

@@ -3,9 +3,15 @@ import { Ledger } from '../../ledger/ledger';
 import { Formula } from '../../math/formula';
 import { LongFormula } from './long-formula';
 
+interface Props {
+  readonly answer: ResiduesAnswer;
+  /** The places were named: nothing is said of the others. */
+  readonly only?: boolean;
+}
+
 /** Where the class ramifies: residue and specialisation at each such place, against the uniformizer that is named. */
-export function ResidueTable({ answer }: { readonly answer: ResiduesAnswer }) {
-  const elsewhere = answer.unramifiedElsewhere ? 'At every place not listed the residue is zero.' : '';
+export function ResidueTable({ answer, only = false }: Props) {
+  const elsewhere = !only && answer.unramifiedElsewhere ? 'At every place not listed the residue is zero.' : '';
   if (answer.residues.length === 0)
     return <p className="lead">The class is unramified: its residue is zero at every prime.</p>;
   return (

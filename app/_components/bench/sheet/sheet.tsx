@@ -8,6 +8,7 @@ import { Formula } from '../../math/formula';
 import type { Answer } from '../ask';
 import { fieldMeaning } from '../field-meaning';
 import type { Phrase } from '../phrase';
+import { KeepButton } from '../keeping';
 import type { BenchState } from '../use-bench';
 import { Deeds } from './deeds';
 import { useDifference } from './difference';
@@ -80,9 +81,12 @@ function Repair({ bench, answer }: { readonly bench: BenchState; readonly answer
   );
 }
 
+/** Why the service gives no verdict on a statement that can still be kept as a draft. */
+const undecidedCodes: readonly (string | undefined)[] = ['not-yet', 'budget', 'size'];
+
 /** The sheet: the statement as it is set, the verdict, and what it rests on. An answer to an earlier text is marked old. */
 export function Sheet({ bench }: { readonly bench: BenchState }) {
-  const { asked, reading, live, noted, fault } = bench;
+  const { asked, question, reading, live, noted, fault } = bench;
   const { answer, current } = asked;
   const meaning = useMemo(() => (answer ? meaningOf(answer) : undefined), [answer]);
   if (reading?.state === 'empty') return <EmptySheet bench={bench} />;
@@ -91,6 +95,8 @@ export function Sheet({ bench }: { readonly bench: BenchState }) {
   const oldSaid = old && (noted || asked.slow || asked.stopped || asked.declined !== undefined || asked.offline);
   const shown = answer && (answer.kind === 'statement' ? answer.body.statement : answer.body.expression);
   const set = live ? { text: live.text, tex: live.tex } : shown;
+  const statement = answer?.kind === 'statement' ? answer.body : undefined;
+  const open = question?.kind === 'statement' && undecidedCodes.includes(asked.declined?.problem?.code);
   return (
     <main
       className={`sheet spread bench-sheet ${old ? 'is-old' : ''}`}
@@ -116,13 +122,34 @@ export function Sheet({ bench }: { readonly bench: BenchState }) {
       ) : (
         <UnansweredRow unread={reading?.state === 'unread' && noted} refusal={refusal} />
       )}
+      {!answer && open && (
+        <div className="deeds">
+          <p>
+            <KeepButton question={question} current />
+          </p>
+        </div>
+      )}
       {answer && (
         <>
           <Deeds
             field={answer.question.field}
             line={answer.question.text}
             {...copied(answer)}
-            repair={<Repair bench={bench} answer={answer} />}
+            repair={
+              <>
+                {open && (
+                  <p>
+                    <KeepButton question={question} current />
+                  </p>
+                )}
+                {!open && statement && statement.verdict !== 'different' && (
+                  <p>
+                    <KeepButton question={answer.question} verdict={statement.verdict} current={current} />
+                  </p>
+                )}
+                <Repair bench={bench} answer={answer} />
+              </>
+            }
           />
           {answer.kind === 'statement' ? (
             <StatementEvidence key={`${answer.question.field} ${answer.question.text}`} answer={answer.body} />
@@ -132,7 +159,7 @@ export function Sheet({ bench }: { readonly bench: BenchState }) {
               expression={answer.question.under?.expression ?? answer.question.text}
             />
           )}
-          <Notes answer={answer} meaning={meaning} onWrite={bench.put} />
+          <Notes answer={answer} current={current} meaning={meaning} onWrite={bench.put} />
         </>
       )}
     </main>

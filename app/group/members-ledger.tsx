@@ -1,0 +1,96 @@
+'use client';
+
+import { useRef, useState } from 'react';
+import { Button } from '../_components/button/button';
+import { Ledger } from '../_components/ledger/ledger';
+import type { RoleName } from '../_components/people/role-words';
+import { Slip } from '../_components/slip/slip';
+import { RemoveLeaf } from './remove-leaf';
+import { RoleLeaf } from './role-leaf';
+
+export interface MemberLine {
+  readonly id: string;
+  readonly name: string;
+  readonly email: string;
+  readonly role: RoleName;
+  /** Since when, as a day. */
+  readonly since: string;
+}
+
+interface Props {
+  slug: string;
+  members: readonly MemberLine[];
+  /** The id of the person who reads the page. */
+  self: string;
+  /** Whether that person gives roles and removes. */
+  manages: boolean;
+}
+
+/** Who is in the group, and as what; for stewards with what they can change. */
+export function MembersLedger({ slug, members, self, manages }: Props) {
+  const [open, setOpen] = useState<{ readonly leaf: 'role' | 'remove'; readonly id: string }>();
+  const [said, setSaid] = useState<string>();
+  const place = useRef<HTMLDivElement>(null);
+  const chosen = members.find(({ id }) => id === open?.id);
+  const close = () => setOpen(undefined);
+  const done = (words: string | undefined) => {
+    close();
+    setSaid(words);
+    // The control that was used may be gone with its row.
+    requestAnimationFrame(() => place.current?.focus());
+  };
+  const head = ['member', 'role', 'since', ...(manages ? [<span key="acts">change</span>] : [])];
+  return (
+    <div ref={place} tabIndex={-1} role="group" aria-label="Members">
+      {said !== undefined && (
+        <div className="form-slip">
+          <Slip kind="good" onClose={() => setSaid(undefined)}>
+            {said}
+          </Slip>
+        </div>
+      )}
+      <Ledger caption="Members of the group" head={head} narrow="stack">
+        {members.map((member) => (
+          <tr key={member.id}>
+            <th scope="row" className="named">
+              <span className="st">{member.name}</span>
+              <span className="nm">{member.email}</span>
+            </th>
+            <td>{member.role}</td>
+            <td data-label="since">{member.since}</td>
+            {manages && (
+              <td>
+                <span className="acts">
+                  <Button
+                    kind="plain"
+                    aria-haspopup="dialog"
+                    aria-label={`Change the role of ${member.name}`}
+                    onClick={() => setOpen({ leaf: 'role', id: member.id })}
+                  >
+                    Change role
+                  </Button>
+                  {member.id !== self && (
+                    <Button
+                      kind="plain"
+                      aria-haspopup="dialog"
+                      aria-label={`Remove ${member.name}`}
+                      onClick={() => setOpen({ leaf: 'remove', id: member.id })}
+                    >
+                      Remove
+                    </Button>
+                  )}
+                </span>
+              </td>
+            )}
+          </tr>
+        ))}
+      </Ledger>
+      {chosen !== undefined && open?.leaf === 'role' && (
+        <RoleLeaf slug={slug} member={chosen} onClose={close} onDone={done} />
+      )}
+      {chosen !== undefined && open?.leaf === 'remove' && (
+        <RemoveLeaf slug={slug} member={chosen} onClose={close} onDone={done} />
+      )}
+    </div>
+  );
+}
