@@ -40,10 +40,14 @@ const TRIAL_VALUES: readonly (readonly bigint[])[] = [
 export function factorsOf(ring: LetterRing, f: MultiPolynomial): readonly MultiPolynomial[] {
   const letters = lettersIn(ring, f);
   if (letters.length > 1 && isSeenIrreducible(ring, f, letters)) return [f];
-  const image = ring.characteristic === 0n ? numberImage(ring, f, letters) : letterImage(ring, f, letters);
+  const image =
+    ring.characteristic === 0n
+      ? factored(ring, numberImage(ring, f, letters))
+      : ordersOf(letters)
+          .map((order) => () => factored(ring, letterImage(ring, f, order)))
+          .reduce<FactoredImage | undefined>((found, next) => found ?? next(), undefined);
   if (image === undefined) return [f];
-  let pieces = factorImage(ring, image.of);
-  if (pieces.length > IMAGE_FACTORS) return [f];
+  let { pieces } = image;
   const found: MultiPolynomial[] = [];
   let rest = f;
   for (let size = 1; 2 * size <= pieces.length;) {
@@ -57,6 +61,24 @@ export function factorsOf(ring: LetterRing, f: MultiPolynomial): readonly MultiP
     pieces = pieces.filter((_, i) => !divisor.used.includes(i));
   }
   return isConstant(rest) ? found : [...found, normalized(ring, rest).primitive];
+}
+
+/** An image with its irreducible factors, `undefined` where they are too many to be combined. */
+function factored(ring: LetterRing, image: Image | undefined): FactoredImage | undefined {
+  if (image === undefined) return undefined;
+  const pieces = factorImage(ring, image.of);
+  return pieces.length > IMAGE_FACTORS ? undefined : { ...image, pieces };
+}
+
+/** Letters in some of their orders: over 𝔽_p each gives another image, which may have fewer factors. */
+const ordersOf = (letters: readonly number[]): readonly (readonly number[])[] =>
+  letters.flatMap((_, i) => {
+    const turned = [...letters.slice(i), ...letters.slice(0, i)];
+    return letters.length > 2 ? [turned, [...turned].reverse()] : [turned];
+  });
+
+interface FactoredImage extends Image {
+  readonly pieces: readonly IntegerPolynomial[];
 }
 
 /** An image in one letter, and what a product of its factors comes from if it comes from a factor. */

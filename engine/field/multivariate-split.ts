@@ -37,15 +37,18 @@ function split(ring: LetterRing, f: MultiPolynomial): readonly MultiPolynomial[]
     if (!isConstant(content)) return parted(ring, f, content);
   }
   if (letters.some((letter) => degreeIn(f, letter) === 1)) return [f];
-  for (const letter of letters) {
-    const derivative = derivativeIn(ring, f, letter);
-    if (derivative.length === 0) continue;
-    const repeated = gcdMulti(ring, f, derivative);
-    if (!isConstant(repeated)) return parted(ring, f, repeated);
-    break;
-  }
+  const derivative = letters.map((letter) => derivativeIn(ring, f, letter)).find((candidate) => candidate.length > 0);
+  if (derivative === undefined) return isConstant(f) ? [] : split(ring, rootOfPower(ring, f));
+  const repeated = gcdMulti(ring, f, derivative);
+  if (!isConstant(repeated)) return parted(ring, f, repeated);
   const parts = factorsOf(ring, f);
   return parts.length === 1 ? parts : parts.flatMap((part) => split(ring, part));
+}
+
+/** g with g^p = f, for an f of characteristic p whose exponents are all divisible by p: constants of 𝔽_p are their own roots. */
+function rootOfPower({ characteristic }: LetterRing, f: MultiPolynomial): MultiPolynomial {
+  const p = Number(characteristic);
+  return f.map(({ exponents, coefficient }) => ({ exponents: exponents.map((e) => e / p), coefficient }));
 }
 
 /** f split along a divisor. */
