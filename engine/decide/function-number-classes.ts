@@ -116,7 +116,11 @@ export function numberPlaces({ sight, functions }: FunctionStatement<Rational>, 
       minusOne: { ...numberMinusOne(), valuation: 0 },
       image<H>(terms: Terms, ring: ResidueRing<ReducedUnit, H>, spent: Budget): Graded<H> {
         const values: Graded<H> = new Map();
-        for (const [degree, value] of evaluate(terms, thetaRingOver<FunctionEntry<Rational>, ReducedUnit, H>(ring, unit), spent)) {
+        for (const [degree, value] of evaluate(
+          terms,
+          thetaRingOver<FunctionEntry<Rational>, ReducedUnit, H>(ring, unit),
+          spent,
+        )) {
           const found = part(value);
           if (found !== undefined) values.set(degree - shift, found);
         }

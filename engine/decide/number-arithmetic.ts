@@ -5,7 +5,7 @@ import type { NumberField, NumberFieldElement } from '../field/number-field';
 import { isSquareInNumberField } from '../field/number-field-squares';
 import { SIZE_LIMIT, tooLarge } from '../field/read-element';
 import { realRoots, type RealRoot } from '../field/real-roots';
-import { splitsAtFinitePlaces } from '../place/number-symbols';
+import { FinitePlaces, splitsAtFinitePlaces } from '../place/number-symbols';
 import { unitPower } from '../place/unit-power';
 import { bitsOf, symbolPairs } from '../ring/witt-symbol-ring';
 
@@ -14,13 +14,16 @@ export class NumberArithmetic {
   private readonly products = new Map<bigint, NumberFieldElement>();
   private readonly squares = new Map<bigint, boolean>();
   private roots: readonly RealRoot[] | undefined;
+  private readonly places: FinitePlaces;
   private readonly signs = new Map<RealRoot, (boolean | undefined)[]>();
 
   constructor(
     private readonly field: NumberField,
     private readonly generators: readonly NumberFieldElement[],
     private readonly budget: Budget,
-  ) {}
+  ) {
+    this.places = new FinitePlaces(field, budget);
+  }
 
   /** For each real place, in the order of the real roots of the modulus, whether a product is negative there. */
   get realPlaces(): readonly ((mask: bigint) => boolean)[] {
@@ -58,7 +61,7 @@ export class NumberArithmetic {
     const pairs = [...partners]
       .map(([j, mask]) => [this.product(mask), this.generators[j]!] as const)
       .filter(([a, b]) => !this.field.equal(a, this.field.one) && !this.field.equal(b, this.field.one));
-    return pairs.length === 0 || splitsAtFinitePlaces(this.field, pairs, this.budget);
+    return pairs.length === 0 || splitsAtFinitePlaces(this.places, pairs);
   }
 
   /** About how many binary digits a product of powers of generators has. */

@@ -47,10 +47,7 @@ export function rationalFunctionNormalForm(
 }
 
 /** The products [P]·r̃_P with their degree, the last place first. */
-function* tower(
-  statement: FunctionStatement<Rational>,
-  budget: Budget,
-): Generator<readonly [number, Expression]> {
+function* tower(statement: FunctionStatement<Rational>, budget: Budget): Generator<readonly [number, Expression]> {
   const { sight, functions } = statement;
   const queue = [...statement.order()]; // the next place is the last
   const pending = sight.places.map((_, index) => [...statement.terms(0, index)]);
@@ -90,10 +87,7 @@ function* tower(
     for (const own of classes.degrees(sides[0] ?? [])) {
       const words = numberWords(value, own, classes, arithmetic);
       if (words.length === 0) continue;
-      yield [
-        own + 1,
-        writeNumberWords(words, (a) => writePolynomial(rationals, a, functions.generator), [prefix]),
-      ];
+      yield [own + 1, writeNumberWords(words, (a) => writePolynomial(rationals, a, functions.generator), [prefix])];
       for (const word of words) {
         const term = lifted(word, entryOf(place), entryOf);
         for (const f of [...word.symbols, ...(word.angle === undefined ? [] : [word.angle])]) {

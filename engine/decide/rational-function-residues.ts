@@ -51,8 +51,8 @@ export function rationalFunctionResidues(
     return { residues: ramified.map((place) => residues.at(place)), unramifiedElsewhere: true };
   }
   const factor = (f: Polynomial<Rational>) => factorOverRationals(f, budget).factors;
-  const places = readFunctionPlaces(functions, asked, factor, budget).map(
-    (place): Placed => (place === 'infinity' ? place : sight.index(place)),
+  const places = readFunctionPlaces(functions, asked, factor, budget).map((place): Placed =>
+    place === 'infinity' ? place : sight.index(place),
   );
   if (uniformizer !== undefined) checkOnePlace(places.length, uniformizer);
   const listed = new Set(places);

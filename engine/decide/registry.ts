@@ -5,11 +5,13 @@ import { Refusal } from '../expression/refusal';
 import { fieldNameText } from '../expression/to-text';
 import type { FiniteField } from '../field/field';
 import { resolveFiniteField } from '../field/resolve-finite';
+import { resolveNumberField } from '../field/resolve-number';
 import { complexField, realField } from './archimedean-fields';
 import type { DecidableField } from './decidable-field';
 import { decidableFiniteField } from './finite-field';
 import { finiteFunctionField } from './finite-function-field';
 import { lettersField } from './letters-field';
+import { decidableNumberField } from './number-field';
 import { padicField } from './padic-field';
 import { rationalField } from './rational-field';
 import { rationalFunctionField } from './rational-function-field';
@@ -38,7 +40,8 @@ export function resolveField(name: FieldName, budget: Budget): DecidableField {
       return decidableFiniteField(resolveFiniteField(name, budget));
     case 'extension':
       if (bottom(name).kind === 'finite') return decidableFiniteField(resolveFiniteField(name, budget));
-      throw notYet(name, 'Number fields');
+      if (name.base.kind === 'rationals') return decidableNumberField(resolveNumberField(name, budget));
+      throw notYet(name, 'Fields over number fields');
     case 'functions':
       if (isFiniteTower(name.base)) return finiteFunctionField(constantsOf(name, budget), name.letter);
       if (name.base.kind === 'rationals') return rationalFunctionField(name.letter);
@@ -72,7 +75,7 @@ function constantsOf(name: FieldName & { kind: 'functions' }, budget: Budget): F
 function notYet(name: FieldName, kind: string): Refusal {
   return new Refusal(
     'not-yet',
-    `${kind} such as ${fieldNameText(name)} are read but not decided yet. Decided now: Q, R, C, Q_p, F_q, F_q(t), Q(t) and any.`,
+    `${kind} such as ${fieldNameText(name)} are read but not decided yet. Decided now: Q, R, C, Q_p, F_q, F_q(t), Q(t), number fields Q[w]/(f) and any.`,
     name.at,
   );
 }

@@ -4,15 +4,15 @@ import type { Element } from '../expression/element';
 import type { FieldName } from '../expression/field-name';
 import { Refusal } from '../expression/refusal';
 import type { Span } from '../expression/span';
-import { elementText, fieldNameText } from '../expression/to-text';
+import { fieldNameText } from '../expression/to-text';
+import { checkedModulus, short } from './checked-modulus';
 import { extensionField } from './extension-field';
 import type { FiniteField } from './field';
 import { finiteField, primePower } from './finite';
 import { leastFactor } from './irreducible';
 import { leastIrreducible } from './least-irreducible';
-import { degree, monic, type Polynomial } from './polynomial';
-import { DEGREE_LIMIT, readModulus } from './read-modulus';
-import { writePolynomial } from './write-polynomial';
+import { degree } from './polynomial';
+import { DEGREE_LIMIT } from './read-modulus';
 
 /** The binary digits of 10^10000: larger fields are refused. */
 const ORDER_BITS = 33220;
@@ -75,44 +75,19 @@ function withModulus<E>(
   budget: Budget,
   at: Span | undefined,
 ): FiniteField<unknown> {
-  if (base.letter(letter) !== undefined) {
-    const other = [...'yxwvutsrqp'].find((free) => base.letter(free) === undefined);
-    const fact = `The letter ${letter} is used twice: ${base.name} has it already.`;
-    throw new Refusal('field', `${fact} Take another letter, such as ${other}.`, at);
-  }
-  const where = written.at ?? at;
-  const modulus = readModulus(written, base, letter, budget);
-  const text = short(elementText(written));
-  if (modulus.length < 2) {
-    const fact = modulus.length === 0 ? `The modulus is 0 over ${base.name}.` : `The modulus ${text} is a constant.`;
-    throw new Refusal(
-      'field',
-      `${fact} Type an irreducible polynomial in ${letter}, ${example(base, letter, budget)}.`,
-      where,
-    );
-  }
-  if (bitLength(base.order) * degree(modulus) > ORDER_BITS) throw tooLarge(where);
-  const unitary = monic(base, modulus);
-  const factor = leastFactor(base, unitary, budget, `deciding whether ${text} is irreducible over ${base.name}`);
-  if (factor === undefined) return extensionField(base, letter, unitary);
-  const fact = `${text} has the ${named(base, factor, letter)} over ${base.name}.`;
-  throw new Refusal('field', `${fact} Type an irreducible polynomial, or ${base.name} itself.`, where);
-}
-
-/** A factor as it is named in a message: of degree 1 by its root. */
-function named<E>(base: FiniteField<E>, factor: Polynomial<E>, letter: string): string {
-  return degree(factor) === 1
-    ? `root ${short(elementText(base.write(base.negate(factor[0]!))))}`
-    : `factor ${short(elementText(writePolynomial(base, factor, letter)))}`;
-}
-
-function example<E>(base: FiniteField<E>, letter: string, budget: Budget): string {
-  const found = writePolynomial(base, leastIrreducible(base, 2, budget), letter);
-  return `such as ${short(elementText(found))}, or ${base.name} itself`;
-}
-
-/** A number or polynomial in a message, cut short when it is long. */
-function short(what: bigint | string): string {
-  const text = what.toString();
-  return text.length <= 60 ? text : `${text.slice(0, 57)}…`;
+  const modulus = checkedModulus(
+    base,
+    letter,
+    written,
+    {
+      example: () => leastIrreducible(base, 2, budget),
+      checkSize(f, where) {
+        if (bitLength(base.order) * degree(f) > ORDER_BITS) throw tooLarge(where);
+      },
+      factor: (f, doing) => leastFactor(base, f, budget, doing),
+    },
+    budget,
+    at,
+  );
+  return extensionField(base, letter, modulus);
 }

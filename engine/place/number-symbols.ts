@@ -2,7 +2,6 @@ import type { Budget } from '../arith/budget';
 import { coprimeBase } from '../arith/coprime-base';
 import { factor } from '../arith/factor';
 import { valuation } from '../arith/valuation';
-import { elementText } from '../expression/to-text';
 import { content, type IntegerPolynomial } from '../field/integer-polynomial';
 import { normOf } from '../field/integer-residues';
 import type { NumberField, NumberFieldElement } from '../field/number-field';
@@ -15,26 +14,41 @@ import { oddNumberPlace } from './odd-number-place';
 /** A symbol (a, b) of elements ≠ 0. */
 export type NumberSymbol = readonly [NumberFieldElement, NumberFieldElement];
 
-/** Whether a sum of symbols (a, b) is zero in the Brauer group at every finite place of a number field. */
-export const splitsAtFinitePlaces = (field: NumberField, symbols: readonly NumberSymbol[], budget: Budget): boolean =>
-  ramifiedFinitePlace(field, symbols, budget) === undefined;
+/** The finite places of a number field, each made once. */
+export class FinitePlaces {
+  private readonly above = new Map<bigint, readonly FinitePlace[]>();
+
+  constructor(
+    readonly field: NumberField,
+    readonly budget: Budget,
+  ) {}
+
+  /** Those above a prime, in a fixed order. */
+  at(p: bigint): readonly FinitePlace[] {
+    const known = this.above.get(p);
+    if (known !== undefined) return known;
+    const made = primesAbove(this.field.model.modulus, p, this.budget).map((prime) => ({
+      prime,
+      place: p === 2n ? dyadicNumberPlace(prime) : oddNumberPlace(prime),
+    }));
+    this.above.set(p, made);
+    return made;
+  }
+}
+
+/** A finite place: its prime ideal, and what is known of squares there. */
+export interface FinitePlace {
+  readonly prime: PrimeIdeal;
+  readonly place: NumberPlace;
+}
 
 /**
- * A finite place of a number field at which a sum of symbols is not zero in the Brauer group, as it is written, or `undefined` when there is none.
- * Only the places above 2 and those where an entry has odd order can be. Primes ascend.
+ * Whether a sum of symbols (a, b) is zero in the Brauer group at every finite place of a number field. Only the places above 2 and those where
+ * an entry has odd order can be in the way.
  */
-export function ramifiedFinitePlace(
-  field: NumberField,
-  symbols: readonly NumberSymbol[],
-  budget: Budget,
-): string | undefined {
-  const sum = symbolSum(field, symbols, budget);
-  for (const p of primesInSight(sum.entries, budget)) {
-    for (const prime of primesAbove(field.model.modulus, p, budget)) {
-      if (sum.at(prime) === 1) return primeText(field, prime);
-    }
-  }
-  return undefined;
+export function splitsAtFinitePlaces(places: FinitePlaces, symbols: readonly NumberSymbol[]): boolean {
+  const sum = symbolSum(places, symbols);
+  return primesInSight(sum.entries, places.budget).every((p) => places.at(p).every((place) => sum.at(place) === 0));
 }
 
 /** An entry as an algebraic integer in the same square class: constant · primitive, with the norm of the second factor. */
@@ -47,11 +61,11 @@ interface Entry {
 /** A sum of symbols at the finite places. */
 interface SymbolSum {
   readonly entries: readonly Entry[];
-  /** The exponent of −1 at a prime ideal. */
-  at(prime: PrimeIdeal): 0 | 1;
+  /** The exponent of −1 at a place. */
+  at(place: FinitePlace): 0 | 1;
 }
 
-export function symbolSum(field: NumberField, symbols: readonly NumberSymbol[], budget: Budget): SymbolSum {
+export function symbolSum({ field, budget }: FinitePlaces, symbols: readonly NumberSymbol[]): SymbolSum {
   const spend = (): void => budget.spend(`computing norms from ${field.name}`);
   const { model } = field;
   const numbers = new Map<NumberFieldElement, number>();
@@ -69,8 +83,7 @@ export function symbolSum(field: NumberField, symbols: readonly NumberSymbol[], 
   const pairs = symbols.map(([a, b]) => [numberOf(a), numberOf(b)] as const);
   return {
     entries,
-    at(prime) {
-      const place = numberPlace(prime);
+    at({ prime, place }) {
       const classes: bigint[] = [];
       const classOf = (i: number): bigint => {
         const { primitive, constant, norm } = entries[i]!;
@@ -87,23 +100,10 @@ export function symbolSum(field: NumberField, symbols: readonly NumberSymbol[], 
   };
 }
 
-const numberPlace = (prime: PrimeIdeal): NumberPlace =>
-  prime.p === 2n ? dyadicNumberPlace(prime) : oddNumberPlace(prime);
-
 /** 2 and the primes that divide a norm, ascending. */
 function primesInSight(entries: readonly Entry[], budget: Budget): readonly bigint[] {
   const base = coprimeBase(entries.flatMap(({ constant, norm }) => [constant, norm]));
   const primes = new Set([2n]);
   for (const n of base) for (const { prime } of factor(n, budget)) primes.add(prime);
   return [...primes].sort((a, b) => (a < b ? -1 : a > b ? 1 : 0));
-}
-
-/** A prime ideal as it is written: (p, g) with g in the letter of the field, or by its numbers when p divides the index. */
-function primeText(field: NumberField, prime: PrimeIdeal): string {
-  const { p, generator, ramification, residueDegree, order } = prime;
-  if (residueDegree === order.degree) return `(${p})`;
-  if (generator === undefined) {
-    return `a prime above ${p} of ramification index ${ramification} and residue degree ${residueDegree}`;
-  }
-  return `(${p}, ${elementText(field.write(field.model.element(generator, 1n)))})`;
 }
