@@ -149,6 +149,21 @@ const smallRational = fc.oneof(
   { weight: 1, arbitrary: fc.constantFrom(2, 3).map((n) => quotientElement(integer(1), integer(n))) },
 );
 
+/** Units of ℚ[w]/(modulus): polynomials in w with small coefficients. */
+function numberUnit(modulus: string): fc.Arbitrary<Element> {
+  const degree = Number(/\^(\d)/.exec(modulus)?.[1]);
+  const powers = Array.from({ length: degree }, (_, i) => powerElement(letterElement('w'), i));
+  return fc
+    .array(fc.oneof({ weight: 1, arbitrary: fc.constant(undefined) }, { weight: 2, arbitrary: smallRational }), {
+      minLength: degree,
+      maxLength: degree,
+    })
+    .filter((coefficients) => coefficients.some((c) => c !== undefined))
+    .map((coefficients) =>
+      sumElement(coefficients.flatMap((c, i) => (c === undefined ? [] : [productElement([c, powers[i]!])]))),
+    );
+}
+
 /** Every kind of field the engine decides over. */
 export const fieldRows: readonly FieldRow[] = [
   ...['Q', 'R', 'C'].map((name) => row(name, rationalUnit())),
@@ -170,8 +185,11 @@ export const fieldRows: readonly FieldRow[] = [
       ['y', 2],
     ]),
   ),
-  ...[2, 7].map((p) => row(`F_${p}(t)`, functionUnit(primeFieldUnit(p)))),
+  ...[2, 3, 7].map((p) => row(`F_${p}(t)`, functionUnit(primeFieldUnit(p)))),
   ...([2, 3] as const).map((p) => row(`F_${p * p}(t)`, functionUnit(extensionUnit(p, [['z', 2]])))),
+  ...['w^2-5', 'w^2+w+1', 'w^3-2', 'w^2+7'].map((modulus) =>
+    row(`Q[w]/(${modulus})`, numberUnit(modulus), { canonical: false }),
+  ),
   row('Q(t)', functionUnit(smallRational), { canonical: false, open: 3 }),
   ...[0, 2, 3, 5].map(letters),
 ];
