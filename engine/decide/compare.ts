@@ -1,10 +1,20 @@
 import type { Budget } from '../arith/budget';
 import type { Expression } from '../expression/expression';
 import type { Condition } from '../expression/statement';
-import { expressionText } from '../expression/to-text';
+import { elementText, expressionText } from '../expression/to-text';
 import type { DecidableField, Open, Search } from './decidable-field';
 import type { Finding } from './finding';
-import type { Compared, CompareOutcome, ComparedDegree, Evidence, MapName, Separating, Verdict } from './outcome';
+import { quotientsOf, verdictsOf } from './judged';
+import type {
+  Compared,
+  CompareOutcome,
+  ComparedDegree,
+  Counterexample,
+  Evidence,
+  MapName,
+  Separating,
+  Verdict,
+} from './outcome';
 
 /**
  * Decides left = right in K^MW_*(F) by homomorphisms, degree by degree, never by expansion.
@@ -20,19 +30,16 @@ export function compare(
   conditions: readonly Condition[],
   budget: Budget,
 ): CompareOutcome {
-  const { findings, theorem, open = [], search } = field.decide(left, right, conditions, budget);
-  const unseen = [...(search?.verdicts.keys() ?? []), ...open.map(({ degree }) => degree)];
-  const byDegree = new Map<number, Finding[]>(unseen.map((degree) => [degree, []]));
-  for (const finding of findings) {
-    const here = byDegree.get(finding.degree);
-    if (here === undefined) byDegree.set(finding.degree, [finding]);
-    else here.push(finding);
-  }
+  const decision = field.decide(left, right, conditions, budget);
+  const { findings, theorem, open = [], search } = decision;
+  const verdicts = search?.verdicts ?? verdictsOf(decision);
+  const byDegree = new Map<number, Finding[]>([...verdicts.keys()].map((degree) => [degree, []]));
+  for (const finding of findings) byDegree.get(finding.degree)?.push(finding);
   const parts = [...byDegree]
     .sort(([a], [b]) => b - a)
     .map(([degree, here]): ComparedDegree => ({
       degree,
-      verdict: search?.verdicts.get(degree) ?? verdictOf(here, isOpen(open, degree)),
+      verdict: verdicts.get(degree) ?? 'undecided',
       compared: here.map(compared),
     }));
   const separating = firstDifference(findings);
@@ -42,18 +49,12 @@ export function compare(
     sideConditions: field.sideConditions([left, right], conditions, budget),
     evidence: {
       kind: search?.counterexample === undefined ? 'invariants' : 'counterexample',
-      ...(separating && { separating: describe(separating) }),
+      ...(separating && { separating: describe(separating, search?.counterexample) }),
       theorem: withOpen(theorem, open),
-      ...(search === undefined ? quotients(findings, open) : searched(search)),
+      ...(search === undefined ? quotientsOf(decision) : searched(search)),
     },
   };
 }
-
-const verdictOf = (findings: readonly Finding[], open: boolean): Verdict =>
-  findings.some((finding) => !finding.same) ? 'different' : open ? 'undecided' : 'equal';
-
-const isOpen = (open: readonly Open[], degree: number): boolean =>
-  open.some((part) => part.verdict && part.degree === degree);
 
 /** The theorem, and what the maps do not see. */
 function withOpen(theorem: string, open: readonly Open[]): string {
@@ -67,16 +68,6 @@ const overall = (parts: readonly ComparedDegree[]): Verdict =>
     : parts.some(({ verdict }) => verdict === 'undecided')
       ? 'undecided'
       : 'equal';
-
-/** What is known modulo η and modulo h; what is open stays out. */
-function quotients(findings: readonly Finding[], open: readonly Open[]): Pick<Evidence, 'modEta' | 'modH'> {
-  const modEta = findings.every((finding) => finding.sameModEta);
-  const modH = findings.every((finding) => finding.sameModH);
-  return {
-    ...(!(modEta && open.some((part) => part.modEta)) && { modEta }),
-    ...(!(modH && open.some((part) => part.modH)) && { modH }),
-  };
-}
 
 const searched = ({ modEta, modH, counterexample, relations, tried }: Search): Partial<Evidence> => ({
   ...(modEta !== undefined && { modEta }),
@@ -122,7 +113,13 @@ const NOUN: Readonly<Record<MapName, string>> = {
   word: 'coefficient',
 };
 
-function describe(finding: Finding): Separating {
+/** The field and the values of a counterexample, in words. */
+function failure({ field, values }: Counterexample): string {
+  const given = values.map(({ letter, value }) => `${letter} = ${elementText(value)}`).join(', ');
+  return `It fails over ${field.name}${given === '' ? '' : ` with ${given}`}. `;
+}
+
+function describe(finding: Finding, counterexample: Counterexample | undefined): Separating {
   const [left, right] = [finding.left(), finding.right()];
   const where =
     finding.place === undefined ? '' : finding.place === 'real' ? ', at the real place' : `, at ${finding.place}`;
@@ -133,6 +130,6 @@ function describe(finding: Finding): Separating {
     ...(finding.place !== undefined && { place: finding.place }),
     left,
     right,
-    sentence: `Different in degree ${finding.degree}${where}. There ${values}. ${finding.reason()}`,
+    sentence: `${counterexample === undefined ? '' : failure(counterexample)}Different in degree ${finding.degree}${where}. There ${values}. ${finding.reason()}`,
   };
 }

@@ -1,24 +1,20 @@
 import type { Budget } from '../arith/budget';
-import { limitedBudget } from '../arith/limited-budget';
-import type { Expression } from '../expression/expression';
-import type { Condition } from '../expression/statement';
-import { elementText } from '../expression/to-text';
 import { degreesOf } from '../ring/degrees';
 import type { Graded } from '../ring/graded-ring';
 import type { Words } from '../ring/word-ring';
 import type { Decision } from './decidable-field';
 import type { Finding } from './finding';
+import { quotientsOf, verdictsOf } from './judged';
+import { COUNTEREXAMPLE } from './letters-example';
 import { residueFindings, separationFinding } from './letters-findings';
 import { seeLetters, type Seen } from './letters-places';
-import { proofSearcher, within } from './letters-proof';
-import { searchCounterexample, type DecideOver, type Refutation } from './letters-refute';
+import { PROOF_STEPS, proofSearcher, within } from './letters-proof';
+import { searchCounterexample, type Claim, type DecideOver, type Refutation } from './letters-refute';
 import type { LettersStatement } from './letters-statement';
 import type { SteinbergRelation, Verdict } from './outcome';
 
 /** How many steps each search may take; together they stay well below what a person waits for. */
 const STEPS = { places: 10_000, values: 20_000 } as const;
-
-const COUNTEREXAMPLE = 'A statement about every field and all values fails when it fails for one.';
 
 const RELATIONS =
   'The difference of the sides is an integer combination of multiples of Steinberg relations [x][y] = 0, x + y = 1 (F. Morel, ' +
@@ -37,20 +33,15 @@ const NEITHER =
  * as far as residue fields are again fields of rational functions; Steinberg relations among products of the factors of the entries;
  * and values at which the sides differ. A degree in which none of these settles the question is undecided.
  */
-export function decideLetters(
-  sides: readonly [Expression, Expression],
-  conditions: readonly Condition[],
-  statement: LettersStatement,
-  decideOver: DecideOver,
-  budget: Budget,
-): Decision {
+export function decideLetters(claim: Claim, decideOver: DecideOver, budget: Budget): Decision {
+  const { statement } = claim;
   const [left = [], right = []] = statement.sides;
   const degrees = degreesOf([...left, ...right]);
   const seen = see(statement, budget);
   const searcher = proofSearcher(statement, budget);
 
   const verdicts = new Map<number, Verdict>();
-  const relations = new Map<string, SteinbergRelation>();
+  const relations: SteinbergRelation[] = [];
   let named = true;
   for (const degree of degrees) {
     if (seen?.separations.has(degree)) {
@@ -61,20 +52,15 @@ export function decideLetters(
     const proof = searcher.prove(degree, known ? 2 : 3);
     verdicts.set(degree, known || proof !== undefined ? 'equal' : 'undecided');
     if (proof === undefined) named = false;
-    for (const relation of proof ?? [])
-      relations.set(`${elementText(relation.left)} ${elementText(relation.right)}`, relation);
+    else relations.push(...proof);
   }
 
   const apart = degrees.some((degree) => verdicts.get(degree) === 'different');
   const wanted = new Set(degrees.filter((degree) => verdicts.get(degree) !== 'equal'));
   const refutation: Refutation =
     wanted.size === 0
-      ? { findings: [], tried: [] }
-      : searchCounterexample(
-          { left: sides[0], right: sides[1], conditions, statement, degrees: wanted, patience: apart ? 3 : 1 },
-          decideOver,
-          limitedBudget(budget, STEPS.values),
-        );
+      ? { findings: [], tried: [], limit: { steps: STEPS.values, reached: false } }
+      : searchCounterexample({ ...claim, degrees: wanted, patience: apart ? 3 : 1 }, decideOver, STEPS.values, budget);
   for (const { degree, same } of refutation.findings) if (!same) verdicts.set(degree, 'different');
 
   const { counterexample } = refutation;
@@ -107,16 +93,39 @@ export function decideLetters(
         refutation.findings.every((finding) => finding.sameModH),
       ),
       ...(counterexample && { counterexample }),
-      ...(byRelations && { relations: [...relations.values()] }),
+      ...(byRelations && { relations }),
       tried: {
         fields: refutation.tried,
+        limit: refutation.limit,
         proof: {
+          limit: { steps: PROOF_STEPS, reached: searcher.reached() },
           generators: statement.generators.map(({ element }) => element),
           ...searcher.looked,
           chains: seen?.chains ?? 0,
         },
       },
     },
+  };
+}
+
+/**
+ * What maps over k(t) leave open, settled by the searches as far as they go. Both are right, so in each degree the one that knows
+ * more is followed; findings of a counterexample are shown, if there is one.
+ */
+export function settledBySearch(maps: Decision, searches: Decision): Decision {
+  const { search } = searches;
+  if (search === undefined) return maps;
+  const verdicts = new Map(search.verdicts);
+  for (const [degree, verdict] of verdictsOf(maps)) if (verdict !== 'undecided') verdicts.set(degree, verdict);
+  const settled = [...verdicts.values()].every((verdict) => verdict !== 'undecided');
+  const found = search.counterexample !== undefined || search.relations !== undefined;
+  const { findings, theorem } = found ? searches : maps;
+  const known = quotientsOf(maps);
+  return {
+    findings,
+    theorem,
+    ...(!settled && maps.open && { open: maps.open }),
+    search: { ...search, verdicts, modEta: known.modEta ?? search.modEta, modH: known.modH ?? search.modH },
   };
 }
 

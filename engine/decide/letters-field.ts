@@ -14,9 +14,12 @@ import { total } from '../ring/write-word';
 import type { DecidableField, Decision } from './decidable-field';
 import { sideConditionsOf } from './letters-conditions';
 import { constantForm } from './letters-constant';
-import { decideLetters } from './letters-decision';
+import { verdictsOf } from './judged';
+import { decideLetters, settledBySearch } from './letters-decision';
+import { withExample, withoutLetters } from './letters-example';
 import { separationFinding } from './letters-findings';
 import { seeLetters } from './letters-places';
+import type { Claim, DecideOver } from './letters-refute';
 import { lettersOfElement, forEachElement } from './letters-seen';
 import { monomialAt, readStatement, type LettersStatement } from './letters-statement';
 import { wordFindings, writeWord, writeWords } from './letters-words';
@@ -98,17 +101,23 @@ export function lettersField(concrete: (name: FieldName, budget: Budget) => Deci
   const decide: DecidableField['decide'] = (left, right, conditions, budget) => {
     const statement = readStatement([left, right], conditions, budget);
     const { characteristic, letters, valued } = statement;
+    const claim: Claim = { left, right, conditions, statement };
+    const decideOver: DecideOver = (name) => decideAt(name, budget);
     if (letters.length === 0) {
-      const decision = constants(characteristic, budget).decide(valued(left), valued(right), [], budget);
-      return { ...decision, theorem: everywhere(constants(characteristic, budget).name, decision.theorem) };
+      const field = constants(characteristic, budget);
+      const decision = field.decide(valued(left), valued(right), [], budget);
+      const { name, tex } = field;
+      return withoutLetters(claim, { ...decision, theorem: everywhere(name, decision.theorem) }, { name, tex });
     }
-    if (isOfMonomials(statement)) return decideWords(statement, budget);
+    if (isOfMonomials(statement)) return withExample(claim, decideWords(statement, budget), decideOver, budget);
     const decided = overOneLetter(statement, budget, (field, name) => {
       const decision = field.decide(readable(statement, left), readable(statement, right), [], budget);
       return { ...decision, theorem: everywhere(name, decision.theorem) };
     });
-    if (decided !== undefined) return decided;
-    return decideLetters([left, right], conditions, statement, (name) => decideAt(name, budget), budget);
+    if (decided === undefined) return decideLetters(claim, decideOver, budget);
+    if (![...verdictsOf(decided).values()].includes('undecided'))
+      return withExample(claim, decided, decideOver, budget);
+    return settledBySearch(decided, decideLetters(claim, decideOver, budget));
   };
   /** A field that letters are given values in. In `any` they leave products of letters with constants. */
   const decideAt = (name: FieldName, budget: Budget): Pick<DecidableField, 'name' | 'tex' | 'decide'> =>

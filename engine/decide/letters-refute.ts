@@ -1,5 +1,5 @@
 import type { Budget } from '../arith/budget';
-import { unlessExhausted } from '../arith/limited-budget';
+import { limitedBudget, unlessExhausted } from '../arith/limited-budget';
 import { negateElement, sumElement, type Element } from '../expression/element';
 import type { Expression } from '../expression/expression';
 import type { FieldName } from '../expression/field-name';
@@ -13,7 +13,7 @@ import type { Finding } from './finding';
 import type { LettersStatement } from './letters-statement';
 import { freeTargets } from './letters-free-targets';
 import { concreteTargets, type Assignment, type Target } from './letters-targets';
-import type { Counterexample, TriedField } from './outcome';
+import type { Counterexample, NamedField, SearchLimit, TriedField } from './outcome';
 
 /** What a search for a counterexample came to. */
 export interface Refutation {
@@ -22,13 +22,18 @@ export interface Refutation {
   readonly findings: readonly Finding[];
   readonly theorem?: string;
   readonly tried: readonly TriedField[];
+  readonly limit: SearchLimit;
 }
 
-interface Question {
+/** A statement about an unspecified field, as it was typed and as it was read. */
+export interface Claim {
   readonly left: Expression;
   readonly right: Expression;
   readonly conditions: readonly Condition[];
   readonly statement: LettersStatement;
+}
+
+interface Question extends Claim {
   /** The degrees in which a difference is looked for. */
   readonly degrees: ReadonlySet<number>;
   /** How many times longer than usual to look: a difference may be known to be there. */
@@ -41,89 +46,117 @@ export type DecideOver = (name: FieldName) => Pick<DecidableField, 'name' | 'tex
 /**
  * Looks for values of the letters at which the sides differ: with some letters left free, so that canonical words decide in every
  * degree, then over finite fields, ℚ, ℚ(t) and 𝔽_p(t), small values first. Values are lawful when all entries are units and the
- * conditions hold. The order is fixed and every field has a fixed number of values.
+ * conditions hold. The order is fixed, every field has a fixed number of values, and all ends after so many steps.
  */
-export function searchCounterexample(question: Question, decideOver: DecideOver, budget: Budget): Refutation {
-  const { conditions, statement, patience } = question;
-  const excluded = new Set(conditions.flatMap((c) => (c.kind === 'characteristic' && !c.is ? [c.prime] : [])));
+export function searchCounterexample(
+  question: Question,
+  decideOver: DecideOver,
+  steps: number,
+  whole: Budget,
+): Refutation {
+  const budget = limitedBudget(whole, steps);
   const tried: TriedField[] = [];
-  const free = [...freeTargets(statement, patience, budget)];
-  const concrete = concreteTargets(statement.characteristic, excluded, patience, budget);
-  // symbols of degree ≥ 3 have little or nothing left of them over finite fields, Q and F_p(t)
-  const high = Math.min(...question.degrees) > 2;
-  const functions = concrete.filter(({ name }) => name.kind === 'functions');
-  const small = concrete.filter(({ name }) => name.kind !== 'functions');
-  const targets = high ? [...free, ...small, ...functions] : [...small, ...free, ...functions];
-  for (const target of targets) {
-    const found = unlessExhausted<Found | 'exhausted' | undefined>(
-      () => searchIn(target, question, decideOver, budget),
-      () => 'exhausted',
-    );
-    if (found === 'exhausted') break;
+  let reached = false;
+  for (const target of targetsOf(question, budget)) {
+    if (isSpent(budget)) {
+      reached = true;
+      break;
+    }
+    const found = searchIn(target, question, decideOver, limitedBudget(budget, steps >> 1));
     if (found === undefined) continue;
-    const { field, values, counterexample, findings, theorem } = found;
-    const known = tried.findIndex((entry) => entry.field.name === field.name);
-    const entry = { field, values: values + (tried[known]?.values ?? 0) };
+    reached ||= found.ended;
+    const known = tried.findIndex(({ field }) => field.name === found.field.name);
+    const entry = { field: found.field, values: found.values + (tried[known]?.values ?? 0) };
     if (known >= 0) tried[known] = entry;
     else tried.push(entry);
-    if (counterexample !== undefined)
-      return { counterexample, findings, ...(theorem !== undefined && { theorem }), tried };
+    if (found.failure !== undefined) return { ...found.failure, tried, limit: { steps, reached: false } };
   }
-  return { findings: [], tried };
+  return { findings: [], tried, limit: { steps, reached } };
+}
+
+const isSpent = (budget: Budget): boolean =>
+  unlessExhausted(
+    () => {
+      budget.spend('looking for a counterexample');
+      return false;
+    },
+    () => true,
+  );
+
+function targetsOf({ conditions, statement, patience, degrees }: Question, budget: Budget): readonly Target[] {
+  const excluded = new Set(conditions.flatMap((c) => (c.kind === 'characteristic' && !c.is ? [c.prime] : [])));
+  return unlessExhausted(
+    () => {
+      const free = [...freeTargets(statement, patience, budget)];
+      const concrete = concreteTargets(statement.characteristic, excluded, patience, budget);
+      const functions = concrete.filter(({ name }) => name.kind === 'functions');
+      const small = concrete.filter(({ name }) => name.kind !== 'functions');
+      // symbols of degree ≥ 3 have little or nothing left of them over finite fields, Q and F_p(t)
+      return Math.min(...degrees) > 2 ? [...free, ...small, ...functions] : [...small, ...free, ...functions];
+    },
+    () => [],
+  );
 }
 
 interface Found {
-  readonly field: { readonly name: string; readonly tex: string };
+  readonly field: NamedField;
   /** How many lawful values gave no difference. */
   readonly values: number;
-  readonly counterexample?: Counterexample;
-  readonly findings: readonly Finding[];
-  readonly theorem?: string;
+  /** Whether the budget ended the search. */
+  readonly ended: boolean;
+  /** What a value that separates the sides gives. */
+  readonly failure?: Pick<Refutation, 'counterexample' | 'findings' | 'theorem'>;
 }
 
 /** The search in one field; `undefined` where the field is not decided. */
 function searchIn(target: Target, question: Question, decideOver: DecideOver, budget: Budget): Found | undefined {
   const { statement, conditions } = question;
   const assigned = statement.ring.letters.filter((name) => !statement.solved.has(name));
+  const kept = conditions.filter((c) => target.name.kind === 'any' && c.kind === 'characteristic');
+  const field = unlessPassedOver(() => decideOver(target.name));
+  if (field === undefined) return undefined;
+  const named = { name: field.name, tex: field.tex };
   let values = 0;
-  let field: ReturnType<DecideOver>;
+  const failure = unlessExhausted<Found['failure'] | 'ended'>(
+    () => {
+      for (const assignment of target.assignments(assigned)) {
+        budget.spend('looking for a counterexample');
+        const lawful = valuesAt(target, question, assignment);
+        if (lawful === undefined) continue;
+        const decision = unlessPassedOver(() => field.decide(lawful.left, lawful.right, kept, budget));
+        if (decision === undefined) continue;
+        const unseen = decision.open?.some(({ degree, verdict }) => verdict && question.degrees.has(degree)) ?? false;
+        const apart = new Set(
+          decision.findings.flatMap(({ same, degree }) => (!same && question.degrees.has(degree) ? [degree] : [])),
+        );
+        if (apart.size > 0)
+          return {
+            counterexample: {
+              field: named,
+              values: lawful.values,
+              statement: { sides: [lawful.left, lawful.right], conditions: kept },
+            },
+            findings: decision.findings.filter(({ degree }) => apart.has(degree)),
+            theorem: decision.theorem,
+          };
+        if (!unseen) values += 1;
+      }
+      return undefined;
+    },
+    () => 'ended',
+  );
+  if (failure === 'ended') return { field: named, values, ended: true };
+  return { field: named, values, ended: false, ...(failure && { failure }) };
+}
+
+/** Values that a field cannot be asked about are passed over. */
+function unlessPassedOver<T>(question: () => T): T | undefined {
   try {
-    field = decideOver(target.name);
+    return question();
   } catch (error) {
     if (isPassedOver(error)) return undefined;
     throw error;
   }
-  const named = { name: field.name, tex: field.tex };
-  for (const assignment of target.assignments(assigned)) {
-    budget.spend('looking for a counterexample');
-    const lawful = valuesAt(target, question, assignment);
-    if (lawful === undefined) continue;
-    try {
-      const kept = conditions.filter((c) => target.name.kind === 'any' && c.kind === 'characteristic');
-      const { findings, theorem } = field.decide(lawful.left, lawful.right, kept, budget);
-      const apart = findings.filter(({ same, degree }) => !same && question.degrees.has(degree));
-      if (apart.length === 0) {
-        values += 1;
-        continue;
-      }
-      const degrees = new Set(apart.map(({ degree }) => degree));
-      return {
-        field: named,
-        values,
-        counterexample: {
-          field: named,
-          values: lawful.values,
-          statement: { sides: [lawful.left, lawful.right], conditions: kept },
-        },
-        findings: findings.filter(({ degree }) => degrees.has(degree)),
-        theorem,
-      };
-    } catch (error) {
-      if (!isPassedOver(error)) throw error;
-      if (error.code === 'not-yet' && target.name.kind === 'functions' && values === 0) return undefined;
-    }
-  }
-  return { field: named, values, findings: [] };
 }
 
 const isPassedOver = (error: unknown): error is Refusal =>

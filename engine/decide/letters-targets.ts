@@ -64,6 +64,7 @@ const LARGEST_EXTENSION = 130n;
 /** How many values are tried in each kind of field. */
 const FINITE_ASSIGNMENTS = 12;
 const RATIONAL_ASSIGNMENTS = 60;
+const FIRST_ASSIGNMENTS = 16;
 const FUNCTION_ASSIGNMENTS = 16;
 
 /** The fields of this characteristic and kind that letters get values in: `excluded` says which characteristics are ruled out. */
@@ -85,7 +86,7 @@ export function concreteTargets(
   if (characteristic !== 0n) return [...finite, ...functions];
   return [
     ...finite,
-    fieldTarget({ kind: 'rationals' }, rationals, RATIONAL_VALUES, RATIONAL_ASSIGNMENTS * patience, budget),
+    rationalTarget(RATIONAL_ASSIGNMENTS * patience, budget),
     functionTarget(0n, FUNCTION_ASSIGNMENTS * patience, budget),
     ...functions,
   ];
@@ -97,6 +98,33 @@ function finiteTarget(order: bigint, limit: number, budget: Budget): Target {
   const units = Array.from({ length: count - 1 }, (_, i) => field.write(field.element(BigInt(i + 1))));
   // 1 comes last: with it most words vanish
   return fieldTarget({ kind: 'finite', order }, field, [...units.slice(1), ...units.slice(0, 1)], limit, budget);
+}
+
+/** Small values first, then different primes with all signs: these are independent, and little is true of them by chance. */
+function rationalTarget(limit: number, budget: Budget): Target {
+  const target = fieldTarget({ kind: 'rationals' }, rationals, RATIONAL_VALUES, limit, budget);
+  return {
+    ...target,
+    *assignments(letters) {
+      const few = letters.length < 2 ? limit : FIRST_ASSIGNMENTS;
+      yield* tuples(letters, RATIONAL_VALUES, few, () => true);
+      if (letters.length < 2) return;
+      yield* independentTuples(letters, limit >> 2);
+      let seen = 0;
+      for (const assignment of tuples(letters, RATIONAL_VALUES, limit, () => true)) {
+        seen += 1;
+        if (seen > few) yield assignment;
+      }
+    },
+  };
+}
+
+/** Values ±2, ±3, ±5, … for the letters, every sign in turn. */
+function* independentTuples(letters: readonly string[], limit: number): Generator<Assignment> {
+  const primes = [2, 3, 5, 7, 11, 13, 17, 19, 23, 29];
+  if (letters.length > primes.length) return;
+  for (let i = 0; i < limit && i < 1 << letters.length; i += 1)
+    yield new Map(letters.map((name, k) => [name, number(((i >> k) & 1 ? -1 : 1) * (primes[k] ?? 1))]));
 }
 
 function fieldTarget<E>(

@@ -63,8 +63,10 @@ export interface Counterexample {
   readonly statement: Statement;
 }
 
-/** A Steinberg relation [left][right] = 0, left + right = 1. */
+/** A multiple of a Steinberg relation [left][right] = 0, left + right = 1. */
 export interface SteinbergRelation {
+  /** What [left][right] is multiplied by, from the left. */
+  readonly times: Expression;
   readonly left: Element;
   readonly right: Element;
 }
@@ -76,10 +78,21 @@ export interface TriedField {
   readonly values: number;
 }
 
+/** How many steps a search may take, and whether it ended because of that. */
+export interface SearchLimit {
+  readonly steps: number;
+  readonly reached: boolean;
+}
+
 /** What the two searches over an unspecified field looked at. */
 export interface Tried {
   readonly fields: readonly TriedField[];
-  readonly proof: {
+  /** How far values may be looked for. */
+  readonly limit: SearchLimit;
+  /** The search for a proof; absent where none was needed, since the sides were compared completely. */
+  readonly proof?: {
+    /** How far a proof may be looked for, with the units of one choice in one degree. */
+    readonly limit: SearchLimit;
     /** The units of which all entries are products. */
     readonly generators: readonly Element[];
     /** How many Steinberg pairs x + y = 1 there are among their products. */
@@ -102,7 +115,7 @@ export interface Evidence {
   /** Equal modulo h, that is in the Witt ring; left out where that is not known. */
   readonly modH?: boolean;
   readonly counterexample?: Counterexample;
-  /** The Steinberg relations of which the difference of the sides is a combination. */
+  /** Multiples of Steinberg relations that add up to the difference of the sides. */
   readonly relations?: readonly SteinbergRelation[];
   readonly tried?: Tried;
 }

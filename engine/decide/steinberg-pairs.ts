@@ -6,6 +6,7 @@ import {
   addMulti,
   constantPolynomial,
   keyOf,
+  lettersIn,
   multiplyMulti,
   negateMulti,
   type LetterRing,
@@ -37,28 +38,38 @@ const ENTRY_WEIGHT = 16;
 /**
  * The pairs x + y = 1 among ± monomials in pairwise coprime generators, lightest first, one for each sum m₁ ± m₂ = ±m₃ of coprime
  * products: those of few generators, found by values at a point and tested as polynomials, and those in which an entry of the
- * statement, or a quotient of two, is x. With a limited budget it gives those that were found.
+ * statement, or a quotient of two, is x. With a limited budget it gives those that were found; `complete` says whether it was enough.
  */
 export function steinbergPairs(
   ring: LetterRing,
   generators: readonly Generator[],
   entries: readonly Monomial[],
   budget: Budget,
-): readonly SteinbergPair[] {
+): { readonly pairs: readonly SteinbergPair[]; readonly complete: boolean } {
   const p = ring.characteristic;
   const triples = new Map<string, Triple>();
   const limited = { ...ring, budget };
-  unlessExhausted(
+  const joined = joinedGenerators(ring, generators);
+  const complete = unlessExhausted(
     () => {
-      entryTriples(limited, generators, entries, triples, budget);
+      entryTriples(limited, generators, joined, entries, triples, budget);
       if (p === 0n || (p > 1_000_000n && p < 1n << 26n))
-        lightTriples(limited, generators, pointValues(ring, generators), MONOMIAL_LIMIT, triples, budget);
+        lightTriples(limited, generators, joined, pointValues(ring, generators), MONOMIAL_LIMIT, triples, budget);
       else
-        lightTriples(limited, generators, polynomialValues(limited, generators), MONOMIAL_LIMIT_EXACT, triples, budget);
+        lightTriples(
+          limited,
+          generators,
+          joined,
+          polynomialValues(limited, generators),
+          MONOMIAL_LIMIT_EXACT,
+          triples,
+          budget,
+        );
+      return true;
     },
-    () => undefined, // what was found is there
+    () => false,
   );
-  return [...triples.values()].map(pairOf).sort((a, b) => a.weight - b.weight);
+  return { pairs: [...triples.values()].map(pairOf).sort((a, b) => a.weight - b.weight), complete };
 }
 
 /** A ring in which generators have values, those of different polynomials different as a rule. */
@@ -108,10 +119,28 @@ function polynomialValues(ring: LetterRing, generators: readonly Generator[]): V
   };
 }
 
+/**
+ * The generators that can occur in a sum m₁ ± m₂ = ±m₃ of coprime products. One that has a letter for itself cannot: only one of the
+ * products would have the letter.
+ */
+function joinedGenerators(ring: LetterRing, generators: readonly Generator[]): readonly number[] {
+  let left = generators.map((generator, index) => ({
+    index,
+    letters: generator.kind === 'integer' ? [] : lettersIn(ring, generator.value),
+  }));
+  for (;;) {
+    const counts = ring.letters.map((_, letter) => left.filter(({ letters }) => letters.includes(letter)).length);
+    const next = left.filter(({ letters }) => letters.every((letter) => (counts[letter] ?? 0) > 1));
+    if (next.length === left.length) return left.map(({ index }) => index);
+    left = next;
+  }
+}
+
 /** Adds the sums of light products. */
 function lightTriples<V>(
   ring: LetterRing,
   generators: readonly Generator[],
+  joined: readonly number[],
   values: Values<V>,
   limit: number,
   triples: Map<string, Triple>,
@@ -123,7 +152,7 @@ function lightTriples<V>(
       for (let k = 0; k < e; k += 1) result = values.multiply(result, values.generators[i] ?? values.one);
       return result;
     }, values.one);
-  const list = lightProducts(generators.length, limit).map((product) => ({
+  const list = lightProducts(generators.length, joined, limit).map((product) => ({
     product,
     value: valueOf(product),
     support: product.reduce((bits, e, i) => (e > 0 ? bits | (1 << (i & 31)) : bits), 0),
@@ -156,15 +185,15 @@ function lightTriples<V>(
   }
 }
 
-/** Products of generators by rising weight, 1 among them, as many as there may be. */
-function lightProducts(count: number, limit: number): readonly Product[] {
+/** Products of the joined generators by rising weight, 1 among them, as many as there may be. */
+function lightProducts(count: number, joined: readonly number[], limit: number): readonly Product[] {
   const all: Product[] = [];
   let layer: readonly Product[] = [new Array<number>(count).fill(0)];
   for (let weight = 0; weight <= WEIGHT_LIMIT && all.length + layer.length <= limit; weight += 1) {
     all.push(...layer);
     layer = layer.flatMap((product) => {
       const last = product.findLastIndex((e) => e > 0);
-      return product.flatMap((_, i) => (i < last ? [] : [product.map((e, k) => (k === i ? e + 1 : e))]));
+      return joined.flatMap((i) => (i < last ? [] : [product.map((e, k) => (k === i ? e + 1 : e))]));
     });
   }
   return all;
@@ -174,14 +203,17 @@ function lightProducts(count: number, limit: number): readonly Product[] {
 function entryTriples(
   ring: LetterRing,
   generators: readonly Generator[],
+  joined: readonly number[],
   entries: readonly Monomial[],
   triples: Map<string, Triple>,
   budget: Budget,
 ): void {
+  const among = new Set(joined);
   const few = entries.slice(0, ENTRY_LIMIT);
   const candidates = [...few, ...few.flatMap((a, i) => few.slice(i + 1).map((b) => quotient(a, b)))];
   const seen = new Set<string>();
   for (const candidate of candidates) {
+    if ([...candidate.exponents].some(([i, e]) => e !== 0n && !among.has(i))) continue;
     const [above, below] = [side(generators, candidate, 1n), side(generators, candidate, -1n)];
     if (above === undefined || below === undefined) continue;
     const name = nameOfTriple([above, below]);

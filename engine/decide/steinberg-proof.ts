@@ -18,6 +18,8 @@ export interface ProofSearch {
   readonly proof?: readonly UsedRelation[];
   /** How many multiples were looked at. */
   readonly relations: number;
+  /** Whether there were more of them than may be looked at. */
+  readonly cut: boolean;
 }
 
 /** At most this many multiples of relations enter the linear system of one degree. */
@@ -48,10 +50,10 @@ export function searchProof(
   for (const [beside, words] of besideOthers(target, degree, inner)) {
     const found = solve(char, degree - countBits(beside), words, pairs, insideHulls, budget);
     relations += found.relations;
-    if (found.proof === undefined) return { relations };
+    if (found.proof === undefined) return { relations, cut: found.cut };
     for (const relation of found.proof) proof.push({ ...relation, beside });
   }
-  return { proof, relations };
+  return { proof, relations, cut: false };
 }
 
 /** A class as Σ words·[p_S] over the sets S of generators outside of `inner`; the words hold generators of `inner` only. */
@@ -75,7 +77,7 @@ function solve(
   pairs: readonly SteinbergPair[],
   hulls: readonly bigint[],
   budget: Budget,
-): { readonly proof?: readonly Omit<UsedRelation, 'beside'>[]; readonly relations: number } {
+): Omit<ProofSearch, 'proof'> & { readonly proof?: readonly Omit<UsedRelation, 'beside'>[] } {
   const spend = (): void => budget.spend('solving for Steinberg relations');
   const ring = wordRing(char, budget);
   const rows = new Rows(char, degree);
@@ -89,7 +91,8 @@ function solve(
     return value === undefined ? [] : [{ pair, value, support, tried: new Set<bigint>() }];
   });
   const supports = relators.map(({ support }) => support);
-  for (const hull of growing(hulls, supports).slice(0, HULL_LIMIT)) {
+  const sets = growing(hulls, supports);
+  for (const hull of sets.slice(0, HULL_LIMIT)) {
     let added = false;
     for (const { pair, value, support, tried } of relators) {
       if ((support & ~hull) !== 0n || used.length >= RELATION_LIMIT) continue;
@@ -111,6 +114,7 @@ function solve(
     if (found !== undefined)
       return {
         relations: used.length,
+        cut: false,
         proof: found.flatMap(([label, coefficient]) => {
           const relation = used[label];
           return relation === undefined ? [] : [{ ...relation, coefficient }];
@@ -118,7 +122,7 @@ function solve(
       };
     if (used.length >= RELATION_LIMIT) break;
   }
-  return { relations: used.length };
+  return { relations: used.length, cut: used.length >= RELATION_LIMIT || sets.length > HULL_LIMIT };
 }
 
 /** The coordinates of words of one degree: one for each coefficient; torsion enters the lattice with the first use of a row. */

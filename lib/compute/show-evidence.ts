@@ -11,7 +11,11 @@ export const showEvidence = ({ separating, counterexample, relations, tried, ...
   }),
   ...(counterexample && { counterexample: showCounterexample(counterexample) }),
   ...(relations && {
-    relations: relations.map(({ left, right }) => ({ left: showElement(left), right: showElement(right) })),
+    relations: relations.map(({ times, left, right }) => ({
+      times: showExpression(times),
+      left: showElement(left),
+      right: showElement(right),
+    })),
   }),
   ...(tried && { tried: showTried(tried) }),
 });
@@ -24,7 +28,8 @@ const showCounterexample = ({ field, values, statement }: Counterexample): Count
   statement: showStatement(statement),
 });
 
-const showTried = ({ fields, proof }: Tried): TriedAnswer => ({
+const showTried = ({ fields, limit, proof }: Tried): TriedAnswer => ({
+  limit,
   fields: fields.map(({ field, values }) => ({ field: showNamed(field), values })),
-  proof: { ...proof, generators: proof.generators.map(showElement) },
+  ...(proof && { proof: { ...proof, generators: proof.generators.map(showElement) } }),
 });

@@ -85,16 +85,26 @@ export const counterexample = z.object({
 });
 export type CounterexampleAnswer = z.infer<typeof counterexample>;
 
+const searchLimit = z.object({
+  steps: z.int().min(0).describe('How many steps the search may take.'),
+  reached: z.boolean().describe('Whether it ended because of that, or of a limit on size.'),
+});
+
 export const tried = z.object({
   fields: z
     .array(z.object({ field: typeset, values: z.int().min(0) }))
     .describe('The fields in which letters got values, and how many lawful ones did not separate the sides.'),
-  proof: z.object({
-    generators: z.array(typeset).describe('The units of which all entries are products.'),
-    pairs: z.int().min(0).describe('How many Steinberg pairs x + y = 1 there are among their products.'),
-    relations: z.int().min(0).describe('How many multiples of Steinberg relations were combined.'),
-    chains: z.int().min(0).describe('How many chains of residues and specialisations were followed to their ends.'),
-  }),
+  limit: searchLimit.describe('The budget of the search for such values.'),
+  proof: z
+    .object({
+      limit: searchLimit.describe('The budget of the search for a proof, with one choice of units in one degree.'),
+      generators: z.array(typeset).describe('The units of which all entries are products.'),
+      pairs: z.int().min(0).describe('How many Steinberg pairs x + y = 1 there are among their products.'),
+      relations: z.int().min(0).describe('How many multiples of Steinberg relations were combined.'),
+      chains: z.int().min(0).describe('How many chains of residues and specialisations were followed to their ends.'),
+    })
+    .optional()
+    .describe('Left out where no proof was looked for, since the sides were compared completely.'),
 });
 export type TriedAnswer = z.infer<typeof tried>;
 
@@ -119,12 +129,14 @@ export const evidence = z.object({
   modH: z.boolean().optional().describe('Equal modulo h, that is in the Witt ring; left out where it is not known.'),
   counterexample: counterexample
     .optional()
-    .describe('Over `any`: values at which the statement fails. What is compared then belongs to that field.'),
+    .describe(
+      'Over `any`: a field and values at which the statement fails. What is compared, and `separating` with both values, then belongs to that field.',
+    ),
   relations: z
-    .array(z.object({ left: typeset, right: typeset }))
+    .array(z.object({ times: typeset, left: typeset, right: typeset }))
     .optional()
     .describe(
-      'Over `any`: Steinberg relations [left][right] = 0 of which the difference of the sides is a combination.',
+      'Over `any`: Steinberg relations, left + right = 1. In canonical words the difference of the sides is the sum of all times·[left][right].',
     ),
   tried: tried.optional().describe('Over `any`: how far the searches for a proof and for a counterexample went.'),
 });
