@@ -150,6 +150,11 @@ function measure<E>(base: Field<E>, powers: readonly FunctionPower<E>[]): void {
   for (const { base: f, exponent } of powers) {
     degree = addInt(degree, multiplyInt(exponent, f.length - 1));
     if (base.size === undefined) continue;
+    // the powers of a monomial have one coefficient
+    if (f.every((c, i) => i === f.length - 1 || base.isZero(c))) {
+      bits = addInt(bits, multiplyInt(exponent, base.size(f[f.length - 1]!) - 1));
+      continue;
+    }
     const largest = f.reduce((most, c) => Math.max(most, base.size?.(c) ?? 0), 0);
     bits = addInt(bits, multiplyInt(exponent, largest + 32 - Math.clz32(f.length)));
   }

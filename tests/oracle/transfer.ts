@@ -1,6 +1,18 @@
 import type { Expression } from '@/engine/expression/expression';
 import type { Element } from '@/engine/expression/element';
-import type { Field } from '@/engine/field/field';
+
+/** What is needed of a field. */
+export interface Coefficients<E> {
+  readonly zero: E;
+  readonly one: E;
+  readonly characteristic: bigint;
+  add(a: E, b: E): E;
+  subtract(a: E, b: E): E;
+  multiply(a: E, b: E): E;
+  negate(a: E): E;
+  inverse(a: E): E;
+  isZero(a: E): boolean;
+}
 
 /** A formal sum of units, each with its coefficient. */
 export type FormalForm<E> = readonly (readonly [coefficient: bigint, unit: E])[];
@@ -9,7 +21,7 @@ export type FormalForm<E> = readonly (readonly [coefficient: bigint, unit: E])[]
  * The form of a word in which only η, symbols, forms and integers occur, by [a] ↦ ⟨a⟩ − 1 and η ↦ 1: over a field this is the map of
  * K^MW_n to the Witt ring, and in degree 0 to the Grothendieck–Witt ring.
  */
-export function formOf<E>(e: Expression, field: Field<E>, read: (entry: Element) => E): FormalForm<E> {
+export function formOf<E>(e: Expression, field: Coefficients<E>, read: (entry: Element) => E): FormalForm<E> {
   const one: FormalForm<E> = [[1n, field.one]];
   const scaled = (c: bigint, x: FormalForm<E>): FormalForm<E> => x.map(([k, u]) => [c * k, u]);
   const times = (x: FormalForm<E>, y: FormalForm<E>): FormalForm<E> =>
@@ -61,7 +73,7 @@ export function formOf<E>(e: Expression, field: Field<E>, read: (entry: Element)
  * Grothendieck–Witt ring; planes are left over in characteristic 2 only. J. Milnor, D. Husemoller, Symmetric Bilinear Forms, I.3.
  */
 export function diagonalised<E>(
-  field: Field<E>,
+  field: Coefficients<E>,
   gram: readonly (readonly E[])[],
 ): { readonly entries: readonly E[]; readonly planes: number } {
   let rows = gram.map((row) => [...row]);
@@ -90,9 +102,10 @@ export function diagonalised<E>(
 }
 
 /** An extension k[y]/(P) whose elements are polynomials in y. */
-export interface Extension<E> extends Field<readonly E[]> {
-  readonly base: Field<E>;
+export interface Extension<E> extends Coefficients<readonly E[]> {
+  readonly base: Coefficients<E>;
   readonly modulus: readonly E[];
+  letter(name: string): readonly E[] | undefined;
 }
 
 /** The Scharlau transfer of ⟨u⟩ along s(y^(d−1)) = 1, s(yⁱ) = 0 for i < d − 1. W. Scharlau, Quadratic and Hermitian Forms, 2.5. */

@@ -20,12 +20,12 @@ const baseField = (name: string): Field<unknown> =>
   name === 'Q' ? (rationals as Field<unknown>) : (resolveFiniteField(readFieldName(name)) as FiniteField<unknown>);
 
 /** The residue field of a residue as an extension of the constants; `undefined` at places of degree 1. */
-function extensionOf(residueField: string, base: string): Extension<unknown> | undefined {
+function extensionOf(residueField: string, base: string): (Extension<unknown> & Field<readonly unknown[]>) | undefined {
   if (residueField === base) return undefined;
   const name = readFieldName(residueField);
   const found =
     base === 'Q' && name.kind === 'extension' ? resolveNumberField(name, unlimited) : resolveFiniteField(name);
-  return found as unknown as Extension<unknown>;
+  return found as unknown as Extension<unknown> & Field<readonly unknown[]>;
 }
 
 /** η^k times the transfer of a residue of degree −k ≤ 0. */
