@@ -89,10 +89,12 @@ function targetsOf({ conditions, statement, patience, degrees }: Question, budge
     () => {
       const free = [...freeTargets(statement, patience, budget)];
       const concrete = concreteTargets(statement.characteristic, excluded, patience, budget);
-      const functions = concrete.filter(({ name }) => name.kind === 'functions');
-      const small = concrete.filter(({ name }) => name.kind !== 'functions');
-      // symbols of degree ≥ 3 have little or nothing left of them over finite fields, Q and F_p(t)
-      return Math.min(...degrees) > 2 ? [...free, ...small, ...functions] : [...small, ...free, ...functions];
+      const of = (kind: Target['name']['kind']): readonly Target[] => concrete.filter(({ name }) => name.kind === kind);
+      const [rationals, functions] = [of('rationals'), of('functions')];
+      // of symbols of degree ≥ 3 nothing is left over finite fields, and little over Q and F_p(t)
+      return Math.min(...degrees) > 2
+        ? [...rationals, ...free, ...functions, ...of('finite')]
+        : [...of('finite'), ...rationals, ...free, ...functions];
     },
     () => [],
   );

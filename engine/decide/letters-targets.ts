@@ -9,6 +9,7 @@ import {
   sumElement,
   type Element,
 } from '../expression/element';
+import { randomBetween, seeded } from '../arith/seeded';
 import type { FieldName } from '../expression/field-name';
 import type { Field } from '../field/field';
 import { finiteField, primePower } from '../field/finite';
@@ -100,7 +101,7 @@ function finiteTarget(order: bigint, limit: number, budget: Budget): Target {
   return fieldTarget({ kind: 'finite', order }, field, [...units.slice(1), ...units.slice(0, 1)], limit, budget);
 }
 
-/** Small values first, then different primes with all signs: these are independent, and little is true of them by chance. */
+/** Small values first, then different primes with all signs, which have little in common by chance, then fractions of all signs and sizes. */
 function rationalTarget(limit: number, budget: Budget): Target {
   const target = fieldTarget({ kind: 'rationals' }, rationals, RATIONAL_VALUES, limit, budget);
   return {
@@ -110,21 +111,40 @@ function rationalTarget(limit: number, budget: Budget): Target {
       yield* tuples(letters, RATIONAL_VALUES, few, () => true);
       if (letters.length < 2) return;
       yield* independentTuples(letters, limit >> 2);
-      let seen = 0;
-      for (const assignment of tuples(letters, RATIONAL_VALUES, limit, () => true)) {
-        seen += 1;
-        if (seen > few) yield assignment;
-      }
+      yield* seededTuples(letters, limit >> 1);
     },
   };
 }
 
+/** Fractions of small size, from a fixed stream. */
+function* seededTuples(letters: readonly string[], limit: number): Generator<Assignment> {
+  const stream = seeded(letters.length);
+  const draw = (low: bigint, high: bigint): number => Number(randomBetween(low, high, stream));
+  for (let i = 0; i < limit; i += 1)
+    yield new Map(
+      letters.map((name) => {
+        const size = quotientElement(number(draw(1n, 12n)), number(draw(1n, 6n)));
+        return [name, draw(0n, 1n) === 0 ? size : negateElement(size)];
+      }),
+    );
+}
+
+/** t for one letter and different primes for the others: in degree 3 little is true of these by chance. */
+function* besideLetter(letters: readonly string[]): Generator<Assignment> {
+  for (const shift of [1, 3, 4])
+    for (const free of letters)
+      yield new Map(
+        letters.map((name, k) => [name, name === free ? t : number(PRIMES[(k + shift) % PRIMES.length] ?? 2)]),
+      );
+}
+
+const PRIMES = [2, 3, 5, 7, 11, 13, 17, 19, 23, 29] as const;
+
 /** Values ±2, ±3, ±5, … for the letters, every sign in turn. */
 function* independentTuples(letters: readonly string[], limit: number): Generator<Assignment> {
-  const primes = [2, 3, 5, 7, 11, 13, 17, 19, 23, 29];
-  if (letters.length > primes.length) return;
+  if (letters.length > PRIMES.length) return;
   for (let i = 0; i < limit && i < 1 << letters.length; i += 1)
-    yield new Map(letters.map((name, k) => [name, number(((i >> k) & 1 ? -1 : 1) * (primes[k] ?? 1))]));
+    yield new Map(letters.map((name, k) => [name, number(((i >> k) & 1 ? -1 : 1) * (PRIMES[k] ?? 1))]));
 }
 
 function fieldTarget<E>(
@@ -151,8 +171,15 @@ function functionTarget(characteristic: bigint, limit: number, budget: Budget): 
   return {
     name: { kind: 'functions', base, letter: 't' },
     // a value without t alone is one in a smaller field
-    assignments: (letters) =>
-      tuples(letters, FUNCTION_VALUES, limit, (chosen) => chosen.some((element) => element.kind !== 'integer')),
+    *assignments(letters) {
+      const moving = (chosen: readonly Element[]): boolean => chosen.some((element) => element.kind !== 'integer');
+      const several = characteristic === 0n && letters.length > 1;
+      if (several) {
+        yield* tuples(letters, FUNCTION_VALUES, 4, moving);
+        yield* besideLetter(letters);
+      }
+      yield* tuples(letters, FUNCTION_VALUES, several ? limit - 4 : limit, moving);
+    },
     value,
   };
 }
