@@ -24,6 +24,7 @@ import {
   type LetterRing,
   type MultiPolynomial,
 } from '../field/multivariate';
+import { multiplicity } from '../field/multivariate-division';
 import { readLetterFunction } from '../field/read-letter-function';
 import { forEachElement, lettersOfElement } from './letters-seen';
 
@@ -80,10 +81,12 @@ export function letterValues(
       );
     for (const [name, value] of solved) {
       const next = substituteInFunction(ring, value, solution.letter, solution.value);
-      if (next === undefined)
+      if (next === undefined || isZeroFunction(next))
         throw new Refusal(
           'hypothesis',
-          `Under the condition ${shownCondition(condition)} a denominator of another condition is 0.`,
+          next === undefined
+            ? `Under the condition ${shownCondition(condition)} a denominator of another condition is 0.`
+            : `Under the condition ${shownCondition(condition)} the letter ${name} would be 0, and letters are units.`,
           condition.at,
         );
       solved.set(name, next);
@@ -102,17 +105,22 @@ interface Solution {
 }
 
 /**
- * Solves f = 0 for a letter of which the numerator, multiplied out, has degree 1, with ± a product of letters in front of it and
- * something beside it.
+ * Solves f = 0 for a letter of which the numerator, multiplied out, has degree 1, with something beside it, and in front of it ± a
+ * product of letters and of denominators of f: what a condition divides by is a unit.
  */
 function solve(ring: LetterRing, f: LetterFunction, first: readonly string[]): Solution | undefined {
   const { num } = f.constant;
   if (ring.characteristic === 0n && num !== 1n && num !== -1n) return undefined;
   let numerator: MultiPolynomial = constantPolynomial(ring, 1n);
+  const denominators: MultiPolynomial[] = [];
   for (const { base, exponent } of f.factors.values()) {
     const isLetter = base.length === 1;
     // letters are units, so they may be left out; repeated factors have no degree 1
-    if (exponent < 0n || isLetter) continue;
+    if (isLetter) continue;
+    if (exponent < 0n) {
+      denominators.push(base);
+      continue;
+    }
     if (exponent > 1n) return undefined;
     numerator = multiplyMulti(ring, numerator, base);
   }
@@ -121,8 +129,9 @@ function solve(ring: LetterRing, f: LetterFunction, first: readonly string[]): S
     if (degreeIn(numerator, letter) !== 1) continue;
     const parts = coefficientsIn(numerator, letter);
     const [coefficient, rest] = [parts.get(1), parts.get(0)];
-    const [term, more] = coefficient ?? [];
-    if (coefficient === undefined || term === undefined || more !== undefined || rest === undefined) continue;
+    if (coefficient === undefined || rest === undefined) continue;
+    const [term, more] = denominators.reduce((left, base) => multiplicity(ring, left, base).rest, coefficient);
+    if (term === undefined || more !== undefined) continue;
     const unit = term.coefficient === 1n || term.coefficient === -1n || ring.characteristic !== 0n;
     if (!unit) continue;
     const value = multiplyFunctions(
