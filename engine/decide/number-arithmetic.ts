@@ -2,6 +2,7 @@ import type { Budget } from '../arith/budget';
 import { addInt, isOddInt, multiplyInt, negateInt, type Int } from '../arith/int';
 import { primitiveOfRational } from '../field/integer-polynomial';
 import type { NumberField, NumberFieldElement } from '../field/number-field';
+import { isProductOne } from '../field/number-field-products';
 import { isSquareInNumberField } from '../field/number-field-squares';
 import { SIZE_LIMIT, tooLarge } from '../field/read-element';
 import { realRoots, type RealRoot } from '../field/real-roots';
@@ -88,7 +89,9 @@ export class NumberArithmetic {
   }
 
   isOne(exponents: ReadonlyMap<number, Int>): boolean {
-    return exponents.size === 0 || this.field.equal(this.unit(exponents), this.field.one);
+    if (this.bits(exponents) > SIZE_LIMIT) throw tooLarge(undefined);
+    const factors = [...exponents].map(([i, e]) => [this.generators[i]!, e] as const);
+    return isProductOne(this.field, factors, this.budget);
   }
 }
 

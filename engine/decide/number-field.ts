@@ -7,7 +7,7 @@ import { NumberArithmetic } from './number-arithmetic';
 import { numberFindings } from './number-findings';
 import { numberStatement } from './number-statement';
 import { NumberValue } from './number-value';
-import { numberWords, writeNumberWords } from './number-writing';
+import { numberWords, writeWords } from './number-writing';
 
 /** A number field: complete but for degree 2, where K_2 is seen modulo squares and by tame symbols only. */
 export function decidableNumberField(field: NumberField): DecidableField {
@@ -30,7 +30,7 @@ export function decidableNumberField(field: NumberField): DecidableField {
       return classes.degrees(terms).flatMap((degree) => {
         const words = numberWords(value, degree, classes, arithmetic);
         if (words.length === 0) return [];
-        return [{ degree, normalForm: total([writeNumberWords(words, (a) => field.write(a))]), canonical: false }];
+        return [{ degree, normalForm: total([writeWords(words, (a) => field.write(a))]), canonical: false }];
       });
     },
     derivation: () => undefined,

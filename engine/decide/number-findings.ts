@@ -7,7 +7,7 @@ import type { Finding } from './finding';
 import type { NumberArithmetic } from './number-arithmetic';
 import type { NumberClasses, NumberUnit } from './number-classes';
 import { NumberValue } from './number-value';
-import { numberWords, writeNumberWords } from './number-writing';
+import { numberWords, writeWords } from './number-writing';
 import { zeroTest, type ZeroTest } from './number-zero';
 import type { MapName } from './outcome';
 
@@ -43,7 +43,7 @@ export function numberFindings<A, B extends NumberUnit>(
   for (const own of classes.degrees([...left, ...right])) {
     const test = zeroTest(difference, own, arithmetic);
     const write = (side: 0 | 1): Expression =>
-      writeNumberWords(numberWords(written[side]!, own, classes, arithmetic), (a) => classes.field.write(a));
+      writeWords(numberWords(written[side]!, own, classes, arithmetic), (a) => classes.field.write(a));
     if (test.zero !== undefined) {
       const bothZero = (): boolean => test.zero === true && zeroTest(written[0]!, own, arithmetic).zero === true;
       findings.push(new NumberFinding(origin, own, classes.field.tex, test, bothZero, write));

@@ -11,13 +11,16 @@ import type { NumberClasses, NumberUnit } from './number-classes';
 import type { NumberValue } from './number-value';
 import { isZeroModCube } from './number-zero';
 
-/** coefficient · η^eta · [symbols] · ⟨angle⟩ over a number field. */
-export interface NumberWord {
+/** coefficient · η^eta · [symbols] · ⟨angle⟩. */
+export interface FieldWord<E> {
   readonly coefficient: bigint;
   readonly eta: number;
-  readonly symbols: readonly NumberFieldElement[];
-  readonly angle?: NumberFieldElement;
+  readonly symbols: readonly E[];
+  readonly angle?: E;
 }
+
+/** A word over a number field. */
+export type NumberWord = FieldWord<NumberFieldElement>;
 
 /**
  * Words that add up to the part of degree n of a class over a number field. Where it is 0, [u], n·1 + ⟨d⟩ or ηᵏ times that, it is given so;
@@ -44,9 +47,9 @@ export function numberWords<A, B extends NumberUnit>(
 }
 
 /** The words as they are written, with `prefix` in front of each. */
-export const writeNumberWords = (
-  words: readonly NumberWord[],
-  write: (a: NumberFieldElement) => Element,
+export const writeWords = <E>(
+  words: readonly FieldWord<E>[],
+  write: (a: E) => Element,
   prefix: readonly Expression[] = [],
 ): Expression =>
   total(
@@ -60,10 +63,10 @@ export const writeNumberWords = (
     ),
   );
 
-/** Canonical words in generators, by their letters; generator i is letter i − 1. */
-function spelled(words: Words, degree: number, generators: readonly NumberFieldElement[]): readonly NumberWord[] {
+/** Canonical words in generators, by their letters; generator 0 is −1 and generator i is letter i − 1. */
+export function spelled<E>(words: Words, degree: number, generators: readonly E[]): readonly FieldWord<E>[] {
   const minusOne = generators[0]!;
-  return [...words].flatMap(([mask, { x, y }]): readonly NumberWord[] => {
+  return [...words].flatMap(([mask, { x, y }]): readonly FieldWord<E>[] => {
     const own = degree - countBits(mask);
     const tail = lettersOf(mask).map((i) => generators[i + 1]!);
     const signs = Array.from({ length: own > 0 ? own : 0 }, () => minusOne);

@@ -17,7 +17,7 @@ import type { NormalizedDegree } from './outcome';
 import { overRationals, type OverRationals, type WriteSide } from './over-rationals-finding';
 import type { RationalClasses } from './rational-classes';
 import { rationalFindings } from './rational-findings';
-import { rationalNormalForm } from './rational-normal-form';
+import { writtenOverRationals } from './rational-writing';
 
 /**
  * What decides equality in K^MW_n(ℚ(t)): the specialisation at infinity and the residues at t − a, by what decides over ℚ; the residues at
@@ -57,11 +57,11 @@ type Classes = RationalClasses<FunctionEntry<Rational>, ReducedEntry>;
 const overQ = (origin: Omit<OverRationals, 'write'>, classes: Classes, budget: Budget): readonly Finding[] =>
   overRationals({ ...origin, write: formWriter(classes, budget) }, rationalFindings(classes, budget));
 
-/** Writes canonical forms, each side at once when one of its degrees is asked for. */
+/** Writes each side at once when one of its degrees is asked for. */
 function formWriter(classes: Classes, budget: Budget): WriteSide {
   const forms: (readonly NormalizedDegree[] | undefined)[] = [];
   return (side, own) => {
-    const found = (forms[side] ??= rationalNormalForm(classes, side, budget));
+    const found = (forms[side] ??= writtenOverRationals(classes, side, budget));
     return found.find((part) => part.degree === own)?.normalForm ?? total([]);
   };
 }

@@ -13,17 +13,17 @@ import { numberPlaces } from './function-number-classes';
 import type { FunctionStatement } from './function-statement';
 import { NumberArithmetic } from './number-arithmetic';
 import { NumberValue } from './number-value';
-import { numberWords, writeNumberWords, type NumberWord } from './number-writing';
+import { numberWords, writeWords, type NumberWord } from './number-writing';
 import type { NormalizedDegree } from './outcome';
 import { prefixed } from './prefixed';
-import { rationalNormalForm } from './rational-normal-form';
+import { writtenOverRationals } from './rational-writing';
 
 type Terms = readonly Term<FunctionEntry<Rational>>[];
 
 /**
  * The tower over ℚ(t): α = s_∞(α) + Σ_P [P]·r̃_P, a true equality. The places are taken by decreasing degree, those of one degree by the
  * coefficients of their primitive multiples from the top; written are the constant first and then the places upwards. At places of
- * degree 1 and for the constant the values have canonical forms over ℚ. At other places r̃_P lifts words over a number field, which are not
+ * degree 1 and for the constant the values have canonical forms over ℚ, where no large numbers are in them. At other places r̃_P lifts words over a number field, which are not
  * canonical: the form is not promised to be the same for equal elements.
  * J. Milnor, Invent. Math. 9 (1970), Theorem 2.3 with its proof; F. Morel, LNM 2052, Theorem 3.24 (number from memory).
  */
@@ -40,7 +40,7 @@ export function rationalFunctionNormalForm(
   };
   for (const [degree, word] of tower(statement, budget)) put(degree, word);
   const constants = specialisationClasses(statement.sides, reductionsAtInfinity());
-  for (const { degree, normalForm } of rationalNormalForm(constants, 0, budget)) put(degree, normalForm);
+  for (const { degree, normalForm } of writtenOverRationals(constants, 0, budget)) put(degree, normalForm);
   return [...parts]
     .sort(([a], [b]) => b - a)
     .map(([degree, words]) => ({ degree, normalForm: total(words.reverse()), canonical: false }));
@@ -77,7 +77,7 @@ function* tower(statement: FunctionStatement<Rational>, budget: Budget): Generat
     const sides: readonly Terms[] = [pending[index] ?? []];
     if (degreeOf(place) === 1) {
       const classes = residueClasses(sides, reductionsAt(sight.places, index));
-      for (const { degree, normalForm } of rationalNormalForm(classes, 0, budget))
+      for (const { degree, normalForm } of writtenOverRationals(classes, 0, budget))
         yield [degree + 1, prefixed(prefix, normalForm)];
       continue;
     }
@@ -87,7 +87,7 @@ function* tower(statement: FunctionStatement<Rational>, budget: Budget): Generat
     for (const own of classes.degrees(sides[0] ?? [])) {
       const words = numberWords(value, own, classes, arithmetic);
       if (words.length === 0) continue;
-      yield [own + 1, writeNumberWords(words, (a) => writePolynomial(rationals, a, functions.generator), [prefix])];
+      yield [own + 1, writeWords(words, (a) => writePolynomial(rationals, a, functions.generator), [prefix])];
       for (const word of words) {
         const term = lifted(word, entryOf(place), entryOf);
         for (const f of [...word.symbols, ...(word.angle === undefined ? [] : [word.angle])]) {

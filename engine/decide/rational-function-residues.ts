@@ -19,11 +19,11 @@ import type { FunctionStatement } from './function-statement';
 import { NumberArithmetic } from './number-arithmetic';
 import type { NumberClasses, NumberUnit } from './number-classes';
 import { NumberValue } from './number-value';
-import { numberWords, writeNumberWords } from './number-writing';
+import { numberWords, writeWords } from './number-writing';
 import { zeroTest } from './number-zero';
 import type { Residue, ResiduesOutcome } from './outcome';
 import { rationalFindings } from './rational-findings';
-import { rationalNormalForm } from './rational-normal-form';
+import { writtenOverRationals } from './rational-writing';
 import { unitReader } from './read-unit';
 
 type Terms = readonly Term<FunctionEntry<Rational>>[];
@@ -127,8 +127,11 @@ class RationalFunctionResidues {
   private overRationals(place: Placed, uniformizer: Element, parameter?: FunctionEntry<Rational>): Residue {
     const { terms, budget } = this;
     const w = parameter && this.reductions(place).at(parameter).rational.value;
-    const residue = rationalNormalForm(residueClasses([terms], this.reductions(place, w)), 0, budget);
-    const special = rationalNormalForm(specialisationClasses([terms], this.reductions(place, w)), 0, budget);
+    const classes = residueClasses([terms, []], this.reductions(place, w));
+    const findings = rationalFindings(classes, budget);
+    const ramified = new Set(findings.filter(({ same }) => !same).map(({ degree }) => degree));
+    const residue = writtenOverRationals(classes, 0, budget).filter(({ degree }) => ramified.has(degree));
+    const special = writtenOverRationals(specialisationClasses([terms], this.reductions(place, w)), 0, budget);
     return {
       place: this.nameOf(place),
       residueField: rationals.name,
@@ -171,7 +174,7 @@ class RationalFunctionResidues {
     const words = classes.degrees(terms).map((own) => {
       const zero = tested && this.settled(zeroTest(value, own, arithmetic).zero, place);
       if (!zero) top ??= own;
-      return writeNumberWords(zero ? [] : numberWords(value, own, classes, arithmetic), (a) => field.write(a));
+      return writeWords(zero ? [] : numberWords(value, own, classes, arithmetic), (a) => field.write(a));
     });
     return { field: field.name, value: total(words), top };
   }

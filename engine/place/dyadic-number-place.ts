@@ -14,7 +14,25 @@ export function dyadicNumberPlace(prime: PrimeIdeal): NumberPlace {
   const units = new DyadicUnits(prime);
   // values of norm forms that have a higher order than this are passed over
   const bound = 4 * prime.ramification + 8;
-  let rows: readonly bigint[] | undefined;
+  const digits = bound + units.digits;
+  let representatives: readonly Coordinates[] | undefined;
+  const conditions = new Map<bigint, bigint>();
+  const conditionOf = (x: bigint): bigint => {
+    const known = conditions.get(x);
+    if (known !== undefined) return known;
+    representatives ??= units.representatives(digits);
+    const { order } = prime;
+    const m = 2n ** BigInt(digits);
+    const chosen = representatives.filter((_, i) => ((x >> BigInt(i)) & 1n) === 1n);
+    const found = normCondition(
+      prime,
+      units,
+      chosen.reduce((product, a) => order.multiply(product, a, m)),
+      bound,
+    );
+    conditions.set(x, found);
+    return found;
+  };
   return {
     classOf(a, most) {
       const found = units.classOf(prime.order.coordinates(a), most);
@@ -22,12 +40,8 @@ export function dyadicNumberPlace(prime: PrimeIdeal): NumberPlace {
       return found;
     },
     hilbert(x, y) {
-      rows ??= units.representatives(bound + units.digits).map((a) => normCondition(prime, units, a, bound));
-      let condition = 0n;
-      rows.forEach((row, i) => {
-        if (((x >> BigInt(i)) & 1n) === 1n) condition ^= row;
-      });
-      return parity(condition, y);
+      if (x === 0n || y === 0n) return 0;
+      return conditions.has(y) ? parity(conditionOf(y), x) : parity(conditionOf(x), y);
     },
   };
 }
