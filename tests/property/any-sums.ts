@@ -40,3 +40,8 @@ export const smallValues = (letters: readonly string[]): fc.Arbitrary<ReadonlyMa
   fc
     .array(fc.constantFrom(2, 3, -1, -2, 5, 7, -3, 4, 6, 11), { minLength: letters.length, maxLength: letters.length })
     .map((values) => new Map(letters.map((name, i) => [name, integer(values[i] ?? 1)])));
+
+/** Large integers for all letters of one character: what they have in common by chance is of no use to a proof. */
+export const largeValues: fc.Arbitrary<ReadonlyMap<string, Element>> = fc
+  .array(fc.integer({ min: 1_000_000, max: 1_000_000_000 }), { minLength: 26, maxLength: 26 })
+  .map((values) => new Map(values.map((value, i) => [String.fromCharCode(97 + i), integer(value)])));

@@ -120,3 +120,23 @@ export function substitute(expression: Expression, values: ReadonlyMap<string, E
       return expression;
   }
 }
+
+/** The entries of symbols and forms, as they stand. */
+export function entriesOf(node: Expression): readonly Element[] {
+  switch (node.kind) {
+    case 'symbol':
+    case 'angle':
+    case 'pfister':
+      return node.entries;
+    case 'negate':
+      return entriesOf(node.of);
+    case 'sum':
+      return node.terms.flatMap(entriesOf);
+    case 'product':
+      return node.factors.flatMap(entriesOf);
+    case 'power':
+      return entriesOf(node.base);
+    default:
+      return [];
+  }
+}
