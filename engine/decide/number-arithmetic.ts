@@ -1,4 +1,5 @@
 import type { Budget } from '../arith/budget';
+import { limitedBudget, unlessExhausted } from '../arith/limited-budget';
 import { addInt, isOddInt, multiplyInt, negateInt, type Int } from '../arith/int';
 import { primitiveOfRational } from '../field/integer-polynomial';
 import type { NumberField, NumberFieldElement } from '../field/number-field';
@@ -6,9 +7,15 @@ import { isProductOne } from '../field/number-field-products';
 import { isSquareInNumberField } from '../field/number-field-squares';
 import { SIZE_LIMIT, tooLarge } from '../field/read-element';
 import { realRoots, type RealRoot } from '../field/real-roots';
+import { tameSymbolsVanish, type WeightedSymbol } from '../place/number-prime';
 import { FinitePlaces, splitsAtFinitePlaces } from '../place/number-symbols';
 import { unitPower } from '../place/unit-power';
 import { bitsOf, symbolPairs } from '../ring/witt-symbol-ring';
+import { lettersOf, type Words } from '../ring/word-ring';
+import { vanishesBySteinberg } from './number-steinberg';
+
+/** Steps that looking at tame symbols may take. */
+const TAME_STEPS = 50_000;
 
 /** What is asked about products of generators of units of a number field; masks say which generators are taken. */
 export class NumberArithmetic {
@@ -63,6 +70,28 @@ export class NumberArithmetic {
       .map(([j, mask]) => [this.product(mask), this.generators[j]!] as const)
       .filter(([a, b]) => !this.field.equal(a, this.field.one) && !this.field.equal(b, this.field.one));
     return pairs.length === 0 || splitsAtFinitePlaces(this.places, pairs);
+  }
+
+  /** Whether the tame symbols of words of degree 2 in the generators vanish; also when that takes too long to say. */
+  tameSymbolsVanish(words: Words): boolean {
+    const symbols: WeightedSymbol[] = [];
+    for (const [mask, { x }] of words) {
+      const entries = lettersOf(mask).map((i) => this.generators[i + 1]!);
+      // words with η vanish modulo η
+      if (x === 0n || entries.length > 2) continue;
+      const [a = this.generators[0]!, b = this.generators[0]!] = entries;
+      symbols.push({ coefficient: x, a, b: entries.length === 1 ? this.generators[0]! : b });
+    }
+    const limited = limitedBudget(this.budget, TAME_STEPS);
+    return unlessExhausted(
+      () => tameSymbolsVanish(this.field, symbols, limited),
+      () => true,
+    );
+  }
+
+  /** Whether words in the generators are seen to be 0 by Steinberg relations. */
+  vanishesBySteinberg(words: Words, degree: number): boolean {
+    return vanishesBySteinberg(words, degree, this.field, this.generators, this.budget);
   }
 
   /** About how many binary digits a product of powers of generators has. */

@@ -19,8 +19,8 @@ export interface ZeroTest {
  * W(L): iff the rank is even, the signed discriminant a square, all signatures are 0 and the Hasse invariant is that of hyperbolic planes at
  * every finite place (Hasse–Minkowski: T. Y. Lam, Introduction to Quadratic Forms over Fields, VI.3, number from memory). K^M_1 = L^×. For n ≥ 3
  * the signatures see both: K^M_n(L) is a sum of groups ℤ/2, one for each real place (H. Bass, J. Tate, The Milnor ring of a global field,
- * Theorem II.2.1, number from memory), and Iⁿ(L) has no torsion. For n = 2 what W(L) and the tame symbols do not see is left open, unless
- * the class is zero formally.
+ * Theorem II.2.1, number from memory), and Iⁿ(L) has no torsion. For n = 2 tame symbols are looked at as well (that all is seen but for a finite group is J. Tate's theorem, Symbols in arithmetic, ICM
+ * 1970, number from memory), and a proof by Steinberg relations is looked for; what is left is open.
  */
 export function zeroTest<A, B extends NumberUnit>(
   value: NumberValue<A, B>,
@@ -36,21 +36,29 @@ export function zeroTest<A, B extends NumberUnit>(
   }
   const witt = value.witt(degree);
   const graded = !flat ? false : isZeroModCube(witt, arithmetic);
-  if (degree === 2) return symbolTest(graded, flat, arithmetic, signatures, witt);
+  if (degree === 2) return symbolTest(graded, flat, value, arithmetic, signatures, witt);
   const modEta = degree < 0 || (degree === 0 ? value.rank() === 0n : arithmetic.isOne(value.unit()));
   return { zero: modEta && graded, modEta, modH: graded };
 }
 
-function symbolTest(
+function symbolTest<A, B extends NumberUnit>(
   modH: boolean,
   flat: boolean,
+  value: NumberValue<A, B>,
   arithmetic: NumberArithmetic,
   signatures: readonly bigint[],
   witt: WittSymbols | undefined,
 ): ZeroTest {
   const seenModTwo = !signatures.every((s) => s % 8n === 0n) || !(flat ? modH : isZeroModCube(witt, arithmetic));
-  const modEta = seenModTwo ? false : undefined;
-  return { zero: !modH || modEta === false ? false : undefined, modEta, modH };
+  if (seenModTwo) return { zero: false, modEta: false, modH };
+  const words = value.words(2);
+  if (words === undefined) return { zero: true, modEta: true, modH: true };
+  if (words === 'too long') return { zero: modH ? undefined : false, modEta: undefined, modH };
+  if (!arithmetic.tameSymbolsVanish(words)) return { zero: false, modEta: false, modH };
+  if (!modH) return { zero: false, modEta: undefined, modH };
+  return arithmetic.vanishesBySteinberg(words, 2)
+    ? { zero: true, modEta: true, modH: true }
+    : { zero: undefined, modEta: undefined, modH };
 }
 
 /** Whether a Witt class is zero modulo I³ at all finite places. */

@@ -6,6 +6,7 @@ import { primitiveOfRational, type IntegerPolynomial } from '@/engine/field/inte
 import { numberField, type NumberField, type NumberFieldElement } from '@/engine/field/number-field';
 import { realRoots } from '@/engine/field/real-roots';
 import { rational } from '@/engine/field/rational';
+import { tameSymbolsVanish } from '@/engine/place/number-prime';
 import { FinitePlaces, splitsAtFinitePlaces, symbolSum } from '@/engine/place/number-symbols';
 import { gpLines } from './arith-gp';
 
@@ -126,6 +127,42 @@ describe('Hilbert symbols of number fields', () => {
         for (const symbol of trivial) expect(splitsAtFinitePlaces(places, [symbol])).toBe(true);
       }
     }
+  });
+});
+
+describe('tame symbols of number fields', () => {
+  it('vanish where those that PARI/GP computes do', () => {
+    const program =
+      'tame(nf,a,b)={my(ok=1,P=Set(concat(idealfactor(nf,a)[,1]~,idealfactor(nf,b)[,1]~)));' +
+      'for(i=1,#P,my(q=P[i],x=idealval(nf,a,q),y=idealval(nf,b,q));' +
+      'if(nfmodpr(nf,a^y/b^x*(-1)^(x*y),nfmodprinit(nf,q))!=1,ok=0));ok};';
+    const cases = fields.flatMap((field) =>
+      list(6, (i) => {
+        const [a, b] = [drawElement(field), drawElement(field)];
+        const other = field.subtract(field.one, a);
+        if (i === 0) return { field, a, b: field.negate(a), power: 1n };
+        if (i === 1 && !field.isZero(other)) return { field, a, b: other, power: 1n };
+        return { field, a, b, power: i < 4 ? 1n : 24n };
+      }),
+    );
+    const lines = gpLines(
+      [
+        program,
+        ...cases.map(({ field, a, b, power }) => {
+          const [x, y] = [a, b].map((c) => {
+            const { numerator, denominator } = field.model.integral(c);
+            return `Mod((${spelled(numerator)})/${denominator},P)`;
+          });
+          return `P=${spelled(field.model.modulus)};print(tame(nfinit(P),${x},${y}^${power}))`;
+        }),
+      ].join('\n'),
+    );
+    cases.forEach(({ field, a, b, power }, i) => {
+      const name = `${spelled(numerators(a))}, ${spelled(numerators(b))} in ${field.name}`;
+      expect(tameSymbolsVanish(field, [{ coefficient: power, a, b }], unlimited), name).toBe(lines[i] === '1');
+    });
+    expect(lines.filter((line) => line === '0').length).toBeGreaterThan(50);
+    expect(lines.filter((line) => line === '1').length).toBeGreaterThan(80);
   });
 });
 

@@ -1,0 +1,50 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { expressionText } from '@/engine/expression/to-text';
+import { elementText } from '@/engine/expression/to-text';
+import { expectVerdict, judge, verdict, whereDefined } from './kmw-engine';
+import { fieldRow } from './kmw-fields';
+
+/** What is known of K_2 of residue fields of ℚ(t), and of number fields themselves. */
+describe('K_2 of number fields', () => {
+  it.each([
+    ['Q(t)', '[t^2+1][t][1-t]', '0'],
+    ['Q(t)', '[t^2-2][t/(t+3)][3/(t+3)]', '0'],
+    ['Q(t)', '[t^3-2][5t][5t+1]', '[t^3-2][-1][1+5t]'],
+    ['Q(t)', '[t^2+1][t+2][t+3]', '[t^2+1][t+3][t+2]'],
+    ['Q[w]/(w^3-2)', '[w][1-w]', '0'],
+    ['Q[w]/(w^2-5)', '[w+2][-w-1]', '0'],
+  ])('over %s a Steinberg relation is found: %s = %s', (name, left, right) => {
+    expectVerdict('equal', name, left, right);
+    expect(verdict(name, left, right)).toBe('equal');
+  });
+
+  it.each([
+    ['Q(t)', '[t^2+1][2][3]', '0', '[2][3]'], // −1 in the field with 9 elements
+    ['Q(t)', '[t^2+1][-1][3]', '0', '[-1][3]'],
+    ['Q[s]/(s^2-2)', '[s+3][2]', '0', ''], // 2 is a square, and 2 modulo a prime above 7 is not 1
+    ['Q[w]/(w^2+w+1)', '[2][5]', '0', ''],
+  ])('over %s tame symbols separate: %s ≠ %s', (name, left, right, value) => {
+    const { verdict: found, evidence } = judge(name, left, right);
+    expect(found).toBe('different');
+    if (value !== '') expect(expressionText(evidence.separating!.left)).toBe(value);
+  });
+
+  it('a statement that follows from the relations is never different', () => {
+    for (const name of ['Q[w]/(w^2-5)', 'Q[w]/(w^3-2)', 'Q[w]/(w^2+7)']) {
+      const { unit } = fieldRow(name);
+      fc.assert(
+        fc.property(unit, unit, (x, y) => {
+          const [a, b] = [elementText(x), elementText(y)];
+          const found = whereDefined(() => [
+            verdict(name, `[${a}][1-(${a})]`, '0'),
+            verdict(name, `[(${a})/((${a})+(${b}))][(${b})/((${a})+(${b}))]`, '0'),
+            verdict(name, `[${a}][${b}]`, `[(${a})+(${b})][-(${b})/(${a})]`),
+          ]);
+          for (const judged of found ?? []) expect(judged).not.toBe('different');
+        }),
+        { numRuns: 12 },
+      );
+    }
+  });
+});
