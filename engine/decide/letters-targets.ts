@@ -50,6 +50,8 @@ const FUNCTION_VALUES: readonly Element[] = [
   number(-1),
   sumElement([t, one]),
   sumElement([one, negateElement(t)]),
+  sumElement([powerElement(t, 2), one]),
+  sumElement([powerElement(t, 2), t, one]),
   number(3),
   powerElement(t, 2),
   sumElement([t, number(2)]),
@@ -66,7 +68,7 @@ const LARGEST_EXTENSION = 130n;
 const FINITE_ASSIGNMENTS = 12;
 const RATIONAL_ASSIGNMENTS = 60;
 const FIRST_ASSIGNMENTS = 16;
-const FUNCTION_ASSIGNMENTS = 16;
+const FUNCTION_ASSIGNMENTS = 36;
 
 /** The fields of this characteristic and kind that letters get values in: `excluded` says which characteristics are ruled out. */
 export function concreteTargets(

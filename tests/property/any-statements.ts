@@ -66,3 +66,19 @@ export const falsehoods: readonly Claim[] = [
   claim('a symbol is additive in sums', '[a+b]', '[a] + [b]'),
   claim('a constant beside letters', '[3][a][-1][1-b]', '0'),
 ];
+
+/** The statements that come from an equality by one sign: + for −, − for +, a − left out, or one put before an entry. */
+export function variations({ name, left, right }: Claim): readonly Claim[] {
+  const text = `${left} = ${right}`;
+  const texts = [...text].flatMap((character, i) => {
+    const put = (sign: string): string => text.slice(0, i) + sign + text.slice(i + 1);
+    if (character === '+') return [put('-')];
+    if (character === '-') return [put('+'), ...(/[a-z0-9]/.test(text[i - 1] ?? '') ? [] : [put('')])];
+    const opens = ['[', '<', ','].includes(character) && !['<', '-', ' '].includes(text[i + 1] ?? '');
+    return opens ? [put(`${character}-`)] : [];
+  });
+  return [...new Set(texts)].map((varied) => {
+    const [l = '', r = ''] = varied.split(' = ');
+    return { name: `${name}: ${varied}`, left: l, right: r };
+  });
+}
