@@ -2,8 +2,11 @@ import { execFileSync } from 'node:child_process';
 import { unlimited } from '@/engine/arith/budget';
 import { randomBetween, seeded } from '@/engine/arith/seeded';
 import { factorOverFinite } from '@/engine/field/factor-finite';
+import { factorOverRationals } from '@/engine/field/factor-rational';
+import { multiplyIntegers } from '@/engine/field/integer-polynomial';
 import type { Polynomial } from '@/engine/field/polynomial';
 import { primeField } from '@/engine/field/prime-field';
+import { rational } from '@/engine/field/rational';
 
 // Polynomials factored here and by PARI/GP, the same ones in the same run: CPU time for one, median of rounds taken in turn.
 
@@ -46,4 +49,36 @@ for (const p of [2n, 3n, 7n, 101n, 65537n, 33554393n, 1000000007n]) {
     return `${d}: ${mine!.toFixed(0)}/${theirs!.toFixed(1)} = ${(mine! / theirs!).toFixed(1)}`;
   });
   console.log(`p = ${p}`.padEnd(16), cells.join('   '));
+}
+
+console.log('over Q: milliseconds for one polynomial here, for PARI/GP factor, and their ratio');
+const integers = (d: number, digits: number): readonly bigint[] => {
+  const size = 10n ** BigInt(digits);
+  return [...Array.from({ length: d }, () => randomBetween(-size, size, stream)), 1n + randomBetween(0n, size, stream)];
+};
+for (const [name, pieces] of [
+  ['random', 1],
+  ['products of two', 2],
+  ['products of five', 5],
+] as const) {
+  for (const digits of [2, 20, 100]) {
+    const cells = [10, 20, 40].map((d) => {
+      const polynomials = Array.from({ length: 10 }, () =>
+        Array.from({ length: pieces }, () =>
+          integers(d / pieces, digits / pieces < 1 ? 1 : Math.ceil(digits / pieces)),
+        ).reduce(multiplyIntegers),
+      );
+      const read = polynomials.map((f) => f.map((c) => rational(c)));
+      const times = d < 40 && digits < 100 ? 5 : 1;
+      const work = (): void => read.forEach((f) => factorOverRationals(f, unlimited));
+      work();
+      const pairs = Array.from({ length: rounds }, () => [
+        here(work, polynomials.length, times),
+        there(polynomials.map(spelled).join(',\\\n'), 'factor(v[i])', polynomials.length, 4 * times),
+      ]);
+      const [mine, theirs] = [0, 1].map((k) => median(pairs.map((pair) => pair[k]!)) / 1000);
+      return `${d}: ${mine!.toFixed(2)}/${theirs!.toFixed(2)} = ${(mine! / theirs!).toFixed(1)}`;
+    });
+    console.log(`${name}, ${digits} digits`.padEnd(30), cells.join('   '));
+  }
 }
