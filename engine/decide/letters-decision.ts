@@ -66,11 +66,12 @@ export function decideLetters(claim: Claim, decideOver: DecideOver, budget: Budg
   const { counterexample } = refutation;
   const equal = [...verdicts.values()].every((verdict) => verdict === 'equal');
   const byRelations = equal && named;
-  const modulo = (not: ReadonlySet<number> | undefined, there: boolean): boolean | undefined => {
+  const modulo = (what: 'eta' | 'h', not: ReadonlySet<number> | undefined, there: boolean): boolean | undefined => {
     if (equal) return true;
     if ((not?.size ?? 0) > 0 || !there) return false;
-    const complete = seen !== undefined && [...seen.open].every((degree) => verdicts.get(degree) === 'equal');
-    return complete ? true : undefined;
+    const complete = (degree: number): boolean =>
+      verdicts.get(degree) === 'equal' || (seen !== undefined && !seen.open.has(degree));
+    return degrees.every((degree) => complete(degree) || searcher.provesModulo(what, degree)) ? true : undefined;
   };
   return {
     findings: counterexample === undefined ? shown(statement, verdicts, seen, searcher.words) : refutation.findings,
@@ -85,10 +86,12 @@ export function decideLetters(claim: Claim, decideOver: DecideOver, budget: Budg
     search: {
       verdicts,
       modEta: modulo(
+        'eta',
         seen?.notModEta,
         refutation.findings.every((finding) => finding.sameModEta),
       ),
       modH: modulo(
+        'h',
         seen?.notModH,
         refutation.findings.every((finding) => finding.sameModH),
       ),

@@ -15,7 +15,7 @@ import { monomialAt, type LettersStatement } from './letters-statement';
 import { writeWords } from './letters-words';
 import type { SteinbergRelation } from './outcome';
 import { steinbergPairs } from './steinberg-pairs';
-import { searchProof, type UsedRelation } from './steinberg-proof';
+import { searchProof, type Modulo, type UsedRelation } from './steinberg-proof';
 import type { SteinbergPair } from './steinberg-triples';
 
 /** How many steps may be taken: writing words, looking for pairs, solving in one degree. */
@@ -33,6 +33,8 @@ export interface ProofSearcher {
    * factors of the entries are the generators, with 2 letters and completed squares are added, with 3 partial sums too.
    */
   prove(degree: number, effort: 1 | 2 | 3): readonly SteinbergRelation[] | undefined;
+  /** Whether the same proves them equal modulo η, or modulo h. */
+  provesModulo(modulo: 'eta' | 'h', degree: number): boolean;
   /** What has been looked at so far. */
   readonly looked: { readonly pairs: number; readonly relations: number };
   /** Whether a limit ended something. */
@@ -79,20 +81,22 @@ export function proofSearcher(statement: LettersStatement, budget: Budget): Proo
       return sums.units.length === 0 ? undefined : extended([...squares, sums]);
     }),
   ];
+  const searched = (degree: number, effort: number, modulo: Modulo): readonly SteinbergRelation[] | undefined => {
+    for (const next of frames.slice(0, effort)) {
+      const frame = next();
+      if (frame === undefined) continue;
+      looked.pairs = Math.max(looked.pairs, frame.pairs.length);
+      const found = search(statement, frame, degree, modulo, looked, ended, budget);
+      if (found !== undefined) return found;
+    }
+    return undefined;
+  };
   return {
     words: plain?.words,
     looked,
     reached: () => ended.early,
-    prove(degree, effort) {
-      for (const next of frames.slice(0, effort)) {
-        const frame = next();
-        if (frame === undefined) continue;
-        looked.pairs = Math.max(looked.pairs, frame.pairs.length);
-        const found = search(statement, frame, degree, looked, ended, budget);
-        if (found !== undefined) return found;
-      }
-      return undefined;
-    },
+    prove: (degree, effort) => searched(degree, effort, 'nothing'),
+    provesModulo: (modulo, degree) => searched(degree, 2, modulo) !== undefined,
   };
 }
 
@@ -100,6 +104,7 @@ function search(
   { characteristic }: LettersStatement,
   { generators, words: [left, right], pairs, hulls }: Frame,
   degree: number,
+  modulo: Modulo,
   looked: Looked,
   ended: Ended,
   budget: Budget,
@@ -111,7 +116,7 @@ function search(
     const minus = r && ring.negate(degree, r);
     const target = l === undefined || minus === undefined ? (l ?? minus) : ring.add(degree, l, minus);
     if (target === undefined) return { relations: [] };
-    const found = searchProof(char, degree, target, pairs, hulls, limited);
+    const found = searchProof(char, degree, target, pairs, hulls, limited, modulo);
     looked.relations += found.relations;
     if (found.cut) ended.early = true;
     return { relations: found.proof && writeProof(ring, generators, degree, found.proof) };

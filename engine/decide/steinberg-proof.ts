@@ -22,6 +22,9 @@ export interface ProofSearch {
   readonly cut: boolean;
 }
 
+/** What is set to zero beside Steinberg relations: nothing, or the multiples of η, or those of h. */
+export type Modulo = 'nothing' | 'eta' | 'h';
+
 /** At most this many multiples of relations enter the linear system of one degree. */
 const RELATION_LIMIT = 2_500;
 /** … and so many sets of generators are looked at. */
@@ -42,13 +45,14 @@ export function searchProof(
   pairs: readonly SteinbergPair[],
   hulls: readonly bigint[],
   budget: Budget,
+  modulo: Modulo = 'nothing',
 ): ProofSearch {
   const inner = pairs.reduce((mask, { x, y }) => mask | supportOf(x) | supportOf(y), 0n);
   const insideHulls = [...new Set(hulls.map((hull) => hull & inner))];
   const proof: UsedRelation[] = [];
   let relations = 0;
   for (const [beside, words] of besideOthers(target, degree, inner)) {
-    const found = solve(char, degree - countBits(beside), words, pairs, insideHulls, budget);
+    const found = solve(char, degree - countBits(beside), words, pairs, insideHulls, modulo, budget);
     relations += found.relations;
     if (found.proof === undefined) return { relations, cut: found.cut };
     for (const relation of found.proof) proof.push({ ...relation, beside });
@@ -76,14 +80,16 @@ function solve(
   target: Words,
   pairs: readonly SteinbergPair[],
   hulls: readonly bigint[],
+  modulo: Modulo,
   budget: Budget,
 ): Omit<ProofSearch, 'proof'> & { readonly proof?: readonly Omit<UsedRelation, 'beside'>[] } {
   const spend = (): void => budget.spend('solving for Steinberg relations');
   const ring = wordRing(char, budget);
-  const rows = new Rows(char, degree);
+  const rows = new Rows(char, degree, modulo);
   const lattice = new IntegerLattice(spend);
   const used: Pick<UsedRelation, 'word' | 'pair'>[] = [];
   const goal = rows.vector(target, lattice);
+  if (lattice.express(goal) !== undefined) return { relations: 0, cut: false, proof: [] };
   const relators = pairs.flatMap((pair) => {
     const [x, y] = [ring.symbol(pair.x), ring.symbol(pair.y)];
     const value = x && y && ring.multiply(1, x, 1, y);
@@ -132,6 +138,7 @@ class Rows {
   constructor(
     private readonly char: CharacteristicClass,
     private readonly degree: number,
+    private readonly modulo: Modulo,
   ) {}
 
   vector(words: Words, lattice: IntegerLattice): SparseVector {
@@ -149,8 +156,19 @@ class Rows {
     if (known !== undefined) return known;
     const place = this.places.size;
     this.places.set(name, place);
-    const order = orderOf(this.char, this.degree - countBits(mask), coordinate);
+    const own = this.degree - countBits(mask);
+    const order = orderModulo(this.modulo, this.char, own, coordinate);
     if (order !== 0n) lattice.insert([[place, order]]);
+    // h = 2 + η[−1]
+    if (this.modulo === 'h' && own === 0) {
+      const other = this.place(mask, coordinate === 'x' ? 'y' : 'x', lattice);
+      const [here, there] = coordinate === 'x' ? [2n, 1n] : [1n, 2n];
+      if (other > place)
+        lattice.insert([
+          [place, here],
+          [other, there],
+        ]);
+    }
     return place;
   }
 }
@@ -162,6 +180,16 @@ function orderOf(char: CharacteristicClass, degree: number, coordinate: 'x' | 'y
   if (degree === 0) return 0n;
   if (degree < 0) return char === 'three-mod-four' ? 4n : 2n;
   return degree === 1 && char !== 'two' ? 2n : 1n;
+}
+
+/** The same modulo η, where 2[−1] = −η[−1][−1] is zero, or modulo h, but for h itself; √−1 = i makes [−1] = h[i]. */
+function orderModulo(modulo: Modulo, char: CharacteristicClass, degree: number, coordinate: 'x' | 'y'): bigint {
+  const order = orderOf(char, degree, coordinate);
+  if (modulo === 'eta') {
+    if (degree < 0 || coordinate === 'y') return 1n;
+    return degree > 0 && order === 0n ? 2n : order;
+  }
+  return modulo === 'h' && degree > 0 && char === 'one-mod-four' ? 1n : order;
 }
 
 /** The canonical words with these generators in a degree: one coefficient spans them, in its degree 0 two do. */
