@@ -41,7 +41,7 @@ export function resolveField(name: FieldName, budget: Budget): DecidableField {
     case 'extension':
       if (bottom(name).kind === 'finite') return decidableFiniteField(resolveFiniteField(name, budget));
       if (name.base.kind === 'rationals') return decidableNumberField(resolveNumberField(name, budget));
-      throw notYet(name, 'Fields over number fields');
+      throw notYet(name, 'Extensions of other fields');
     case 'functions':
       if (isFiniteTower(name.base)) return finiteFunctionField(constantsOf(name, budget), name.letter);
       if (name.base.kind === 'rationals') return rationalFunctionField(name.letter);

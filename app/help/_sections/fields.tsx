@@ -99,6 +99,59 @@ const rows: readonly FieldRow[] = [
     example: { field: 'Q_5', statement: '[5][2] = [5][7]' },
   },
   {
+    name: <Formula tex="\F_q(t)" />,
+    write: ['F_7(t)', 'F_9(t)'],
+    compared: (
+      <>
+        Every degree: the specialisation at infinity and the residue at every monic irreducible polynomial that divides
+        an entry. Canonical forms are promised in every degree.
+      </>
+    ),
+    why: (
+      <>
+        The sequence <Formula tex="0 \to \K_n(k) \to \K_n(k(t)) \to \bigoplus_P \K_{n-1}(k[t]/P) \to 0" /> is exact and
+        split (Milnor, Invent. Math. 9, 1970, Theorem 2.3; Morel, ch. 3), and the residue fields are finite.
+      </>
+    ),
+    example: { field: 'F_7(t)', statement: '[t][1-t] = 0' },
+  },
+  {
+    name: <Formula tex="\Q(t)" />,
+    write: ['Q(t)'],
+    compared: (
+      <>
+        Every degree by the same sequence. In degree 3 a residue at a place of degree 2 or more lies in{' '}
+        <Formula tex="K_2" /> of a number field: where symbols do not separate and no proof is found, the verdict is
+        <i> undecided</i>, and the place is named.
+      </>
+    ),
+    why: (
+      <>
+        Residues over <Formula tex="\Q" /> are compared as over <Formula tex="\Q" />, residues over number fields as
+        over number fields. Canonical forms are not promised.
+      </>
+    ),
+    example: { field: 'Q(t)', statement: '[t^2+1][t] = [t^2+1][-t] + [t^2+1][-1] + eta[t^2+1][-1][-t]' },
+  },
+  {
+    name: <>number fields</>,
+    write: ['Q[w]/(w^2-5)'],
+    compared: (
+      <>
+        Degree 1 exactly; in degrees 0 and below rank, discriminant, signatures and Hilbert symbols at every prime; from
+        degree 3 on signatures. In degree 2 Hilbert and tame symbols separate, and an equality needs a proof by
+        Steinberg relations; otherwise it stays undecided. Residues at primes of a number field are not offered yet.
+      </>
+    ),
+    why: (
+      <>
+        Hasse and Minkowski (Lam, <i>Introduction to Quadratic Forms over Fields</i>, VI.3), Bass and Tate for{' '}
+        <Formula tex="n \ge 3" />, and the pull-back theorem.
+      </>
+    ),
+    example: { field: 'Q[w]/(w^2-5)', statement: '<w> + <-w> = h' },
+  },
+  {
     name: <i>any field</i>,
     write: ['any'],
     compared: (
@@ -129,10 +182,11 @@ export function Fields() {
     <Row side="fields" id="fields" className="sec ruled">
       <div className="prose">
         <p>
-          Over each of these fields the comparison is complete: when no difference is found, there is none. The{' '}
-          <b>pull-back theorem</b> stands behind all of them: two classes of degree <Formula tex="n" /> are equal if and
-          only if they are equal in Milnor K-theory <Formula tex="K_n^{\mathrm M}(F)" /> and in the Witt ring{' '}
-          <Formula tex="W(F)" /> (Morel, Comment. Math. Helv. 79, 2004; Gille, Scully and Zhong, Adv. Math. 286, 2016).
+          Over each of these fields the comparison is complete, but where the table says what stays open: when no
+          difference is found, there is none. The <b>pull-back theorem</b> stands behind all of them: two classes of
+          degree <Formula tex="n" /> are equal if and only if they are equal in Milnor K-theory{' '}
+          <Formula tex="K_n^{\mathrm M}(F)" /> and in the Witt ring <Formula tex="W(F)" /> (Morel, Comment. Math. Helv.
+          79, 2004; Gille, Scully and Zhong, Adv. Math. 286, 2016).
         </p>
         <Ledger
           caption="Fields and what is compared over them"
@@ -165,9 +219,8 @@ export function Fields() {
           do.
         </p>
         <p id="not-decided">
-          Function fields <code>Q(t)</code>, <code>F_7(t)</code>, number fields <code>Q[w]/(w^2-5)</code>, and entries
-          over <code>any</code> that are sums, such as <code>[1+a]</code>, are read in full and then refused. They are
-          not answered by a guess.
+          Rational functions over a number field or over rational functions, such as <code>Q(s)(t)</code>, and number
+          fields over number fields are read in full and then refused. They are not answered by a guess.
         </p>
       </div>
     </Row>

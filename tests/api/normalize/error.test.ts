@@ -47,7 +47,7 @@ test('a denominator that is zero in the field, and a letter it does not have', a
   await expectProblem(path, await ask('Q', '[a]'), 422, 'unknown-letter', { column: 2 });
 });
 
-test.each(['Q(t)', 'Q[w]/(w^2-5)'])('%s is understood and not decided', async (field) => {
+test.each(['Q(s)(t)', 'Q[w]/(w^2-5)(t)'])('%s is understood and not decided', async (field) => {
   await expectProblem(path, await ask(field, '[2]'), 422, 'not-yet');
 });
 
