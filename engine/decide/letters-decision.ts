@@ -26,7 +26,9 @@ const RESIDUES =
   'signs and residues at primes. A statement in letters holds over every field iff it holds over this one of rational functions.';
 
 const NEITHER =
-  'No lawful values at hand separate the sides, and no relations at hand join them; both searches ended at their limits.';
+  'No lawful values at hand separate the sides, and no relations at hand join them. Values were looked for in small fields, so many in each ' +
+  `and for at most ${STEPS.values} steps; proofs among sums of products of the factors of the entries, for at most ${PROOF_STEPS} steps with each ` +
+  'choice of factors.';
 
 /**
  * Decides over ℚ(letters), or 𝔽_p(letters), where entries are no products of letters alone: residues along one letter after the other

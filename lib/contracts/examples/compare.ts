@@ -1,4 +1,5 @@
 import type { Example } from '../contract';
+import { compareAnyExamples } from './compare-any';
 
 /** Worked exchanges for `compare`; a test holds them against the engine. */
 export const compareExamples: readonly Example[] = [
@@ -267,4 +268,5 @@ export const compareExamples: readonly Example[] = [
       ],
     },
   },
+  ...compareAnyExamples,
 ];
