@@ -129,24 +129,6 @@ export function resultant<E>(field: Field<E>, f: Polynomial<E>, g: Polynomial<E>
   return result;
 }
 
-/** f^n modulo m for n ≥ 0. `spend` is called at each step. */
-export function powerPolynomial<E>(
-  field: Field<E>,
-  f: Polynomial<E>,
-  n: bigint,
-  m: Polynomial<E>,
-  spend: () => void = () => undefined,
-): Polynomial<E> {
-  let result = remainderPolynomial(field, [field.one], m);
-  const base = remainderPolynomial(field, f, m);
-  for (const bit of n.toString(2)) {
-    spend();
-    result = remainderPolynomial(field, multiplyPolynomials(field, result, result), m);
-    if (bit === '1') result = remainderPolynomial(field, multiplyPolynomials(field, result, base), m);
-  }
-  return result;
-}
-
 /** f(a). */
 export function valueAt<E>(field: Field<E>, f: Polynomial<E>, a: E): E {
   let value = field.zero;

@@ -110,7 +110,7 @@ test('what the engine does not decide, or not in time, is kept as a draft', asyn
   const stopped = await keep(author, { field: 'Q', statement: '[(((2^64)^64)^64)^64] = [3]', hypotheses: [] });
   expect(stopped).toMatchObject({ state: 'draft', degrees: [], lastCheck: { verdict: 'stopped' } });
   expect(stopped.evidence?.problem?.code).toBe('size');
-  const refusal = await keep(author, { field: 'Q(t)', statement: '[t][1-t] = 0', hypotheses: [] });
+  const refusal = await keep(author, { field: 'Q(s)(t)', statement: '[t][1-t] = 0', hypotheses: [] });
   expect(refusal).toMatchObject({ state: 'draft', lastCheck: { verdict: 'refused' } });
 });
 

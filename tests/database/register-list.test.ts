@@ -33,7 +33,7 @@ beforeAll(async () => {
     tags: ['residue', 'degree-2'],
     remark: 'By "hand" & <b>twice</b>.',
   });
-  await keep(author, { name: 'Rational functions', field: 'Q(t)', statement: '[t][1-t] = 0', hypotheses: [] });
+  await keep(author, { name: 'Rational functions', field: 'Q(s)(t)', statement: '[t][1-t] = 0', hypotheses: [] });
   const { key } = await keep(author, {
     name: 'Six as a product',
     field: 'Q',
@@ -66,7 +66,7 @@ test.each([
   [{ state: 'withdrawn' }, [5]],
   [{ field: 'Q' }, [1, 3, 5]],
   [{ field: '\\mathbb{Q}' }, [1, 3, 5]],
-  [{ field: 'Q(t)' }, [4]],
+  [{ field: 'Q(s)(t)' }, [4]],
   [{ degree: '2' }, [1, 2, 3]],
   [{ degree: '1' }, [5]],
   [{ verdict: 'refused' }, [4]],
@@ -204,7 +204,7 @@ test('what there is to choose from', async () => {
   expect(await registerChoices(author)).toEqual({
     fields: [
       { text: 'Q', tex: '\\mathbb{Q}' },
-      { text: 'Q(t)', tex: '\\mathbb{Q}(t)' },
+      { text: 'Q(s)(t)', tex: '\\mathbb{Q}(s)(t)' },
       { text: 'any', tex: '\\mathrm{any}' },
     ],
     tags: ['degree-2', 'residue', 'steinberg'],

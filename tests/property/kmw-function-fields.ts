@@ -45,7 +45,7 @@ export const functionRows: readonly FunctionRow[] = [
   {
     name: 'Q(t)',
     base: 'Q',
-    places: at('Q', ['t-1', '1'], ['t+1/2', '-1/2'], ['t^2+1'], ['t^2-2'], ['t^3-2']),
+    places: at('Q', ['t-1', '1'], ['t+1/2', '-1/2'], ['t^2+1'], ['t^2-2'], ['t^2+1/3'], ['t^3-2']),
     top: 2,
   },
 ];

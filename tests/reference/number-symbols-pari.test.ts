@@ -46,12 +46,19 @@ function drawField(d: number): IntegerPolynomial {
   }
 }
 
-const fields: readonly NumberField[] = [...chosen, ...list(24, (i) => drawField(2 + (i % 4)))].map((f) =>
-  numberField(
-    'y',
-    f.map((c) => rational(c)),
-  ),
-);
+/** Moduli that are not integral. */
+const fractional = [
+  [rational(1n, 3n), rational(0n), rational(1n)],
+  [rational(-5n, 4n), rational(0n), rational(1n)],
+  [rational(3n, 2n), rational(1n, 6n), rational(1n)],
+  [rational(7n, 8n), rational(-1n, 2n), rational(0n), rational(1n)],
+  [rational(2n, 9n), rational(0n), rational(1n, 3n), rational(5n), rational(1n)],
+];
+
+const fields: readonly NumberField[] = [
+  ...[...chosen, ...list(24, (i) => drawField(2 + (i % 4)))].map((f) => f.map((c) => rational(c))),
+  ...fractional,
+].map((f) => numberField('y', f));
 
 /** Elements with zeros at small primes more often than others. */
 function drawElement(field: NumberField): NumberFieldElement {

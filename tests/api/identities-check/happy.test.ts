@@ -25,7 +25,7 @@ test('the current revision is checked again, and the check is added to the histo
 
 test('what is not decided stays a draft', async () => {
   const room = await newRoom();
-  const { key } = await kept(room, { field: 'Q(t)', statement: '[t][1-t] = 0', hypotheses: [] });
+  const { key } = await kept(room, { field: 'Q(s)(t)', statement: '[t][1-t] = 0', hypotheses: [] });
   const answer = await post(path.replace('{key}', key), {}, room.token);
   expect(answer).toMatchObject({ status: 200, body: { state: 'draft', lastCheck: { verdict: 'refused' } } });
 });

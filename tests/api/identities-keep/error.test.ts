@@ -57,7 +57,7 @@ test('a key that came with another request, or is none, is refused', async () =>
 });
 
 test('what the engine does not decide, or not within its limits, is a draft and no problem', async () => {
-  const refusal = await ask({ field: 'Q(t)', statement: '[t][1-t] = 0', hypotheses: [] });
+  const refusal = await ask({ field: 'Q(s)(t)', statement: '[t][1-t] = 0', hypotheses: [] });
   expect(refusal).toMatchObject({ status: 201, body: { state: 'draft', lastCheck: { verdict: 'refused' } } });
   const stopped = await ask({ field: 'Q', statement: '[(((2^64)^64)^64)^64] = [3]', hypotheses: [] });
   expect(stopped).toMatchObject({ status: 201, body: { state: 'draft', lastCheck: { verdict: 'stopped' } } });

@@ -18,7 +18,7 @@ beforeAll(async () => {
     tags: ['x'],
   });
   await kept(room, { name: 'Square' });
-  await kept(room, { name: 'Rational functions', field: 'Q(t)', statement: '[t][1-t] = 0', hypotheses: [] });
+  await kept(room, { name: 'Rational functions', field: 'Q(s)(t)', statement: '[t][1-t] = 0', hypotheses: [] });
 });
 
 async function list(query = '') {
