@@ -6,6 +6,7 @@ import {
   multiplyMulti,
   reduced,
   scaleMulti,
+  spendOn,
   type LetterRing,
   type MultiPolynomial,
   type MultiTerm,
@@ -46,7 +47,7 @@ export function exactQuotient(ring: LetterRing, f: MultiPolynomial, g: MultiPoly
   const quotient: MultiTerm[] = [];
   let rest = f;
   for (let first = rest[0]; first !== undefined; first = rest[0]) {
-    ring.budget.spend('dividing polynomials in several letters');
+    spendOn(ring, rest.length + g.length, 'dividing polynomials in several letters');
     const exponents = first.exponents.map((e, i) => e - (divisor.exponents[i] ?? 0));
     if (exponents.some((e) => e < 0)) return undefined;
     const coefficient = quotientOf(ring, first.coefficient, divisor.coefficient);

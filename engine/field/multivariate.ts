@@ -90,10 +90,15 @@ export function scaleMulti(ring: LetterRing, c: bigint, f: MultiPolynomial): Mul
   return f.map(({ exponents, coefficient }) => ({ exponents, coefficient: reduced(ring, coefficient * factor) }));
 }
 
+/** Work on so many terms: a step for each thousand, one at least. */
+export function spendOn(ring: LetterRing, terms: number, doing: string): void {
+  for (let done = 0; done <= terms; done += 1_000) ring.budget.spend(doing);
+}
+
 /** Refuses a product of too many terms. */
 export function multiplyMulti(ring: LetterRing, f: MultiPolynomial, g: MultiPolynomial): MultiPolynomial {
-  ring.budget.spend('multiplying polynomials in several letters');
   if (f.length * g.length > PRODUCT_LIMIT) throw tooMany();
+  spendOn(ring, f.length * g.length, 'multiplying polynomials in several letters');
   return collected(ring, products(f, g));
 }
 

@@ -1,7 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { integer as coefficient, product, sum } from '@/engine/expression/expression';
+import type { Element } from '@/engine/expression/element';
 import { elementText } from '@/engine/expression/to-text';
+import { readExpression } from '@/grammar/read';
 import { decideRational } from '../oracle/pull-back';
 import { identitiesInLetters, theorems, type Claim } from './any-statements';
 import { smallValues, sumUnit } from './any-sums';
@@ -36,6 +38,31 @@ describe('what holds over every field', () => {
     }
   });
 });
+
+describe('a theorem about letters', () => {
+  const value = fc.constantFrom('2', '-1', '3', '1/2', 'x_1', "y'", '-z', 'x_1^2', '2z', 'x_1+z', '1-z', "x_1/y'");
+
+  it.each(rows(theorems))('%s, holds with other units for its letters', (_, { left, right }) => {
+    fc.assert(
+      fc.property(fc.array(value, { minLength: 6, maxLength: 6 }), (texts) => {
+        const at = new Map(['a', 'b', 'c', 'x', 'y', 'k'].map((name, i) => [name, entry(texts[i] ?? '2')] as const));
+        const [l, r] = [left, right].map((side) => substitute(readExpression(side), at));
+        const found = whereDefined(() => l && r && judge('any', l, r).verdict);
+        fc.pre(found !== undefined);
+        expect(found).not.toBe('different');
+      }),
+      { numRuns: 8 },
+    );
+  });
+});
+
+/** An entry that is typed. */
+function entry(text: string): Element {
+  const read = readExpression(`[${text}]`);
+  const found = read.kind === 'symbol' ? read.entries[0] : undefined;
+  if (found === undefined) throw new Error('no entry');
+  return found;
+}
 
 describe('random words with sums for entries', () => {
   const letters = ['a', 'b'];
@@ -74,6 +101,27 @@ describe('random words with sums for entries', () => {
       { numRuns: 60 },
     );
     expect(verdicts.equal).toBeGreaterThan(20 * (verdicts.undecided + 1));
+  });
+
+  it.each([2n, 3n, 5n])('nor are they different in characteristic %s', (prime) => {
+    const conditions = [{ kind: 'characteristic', is: true, prime }] as const;
+    const verdicts = { equal: 0, different: 0, undecided: 0 };
+    const small = word(unit, TINY);
+    fc.assert(
+      fc.property(fc.constantFrom(...names), at, small, small, (identity, values, u, w) => {
+        const numbers = { n: 3, m: -2 };
+        const [left, right] = [identity.left, identity.right].map((side) => substitute(sideOf(side, numbers), values));
+        if (left === undefined || right === undefined) return;
+        const found = whereDefined(
+          () => judge('any', sum([product([u, left]), w]), sum([w, product([u, right])]), conditions).verdict,
+        );
+        fc.pre(found !== undefined);
+        if (found !== undefined) verdicts[found] += 1;
+        expect(found).not.toBe('different');
+      }),
+      { numRuns: 30 },
+    );
+    expect(verdicts.equal).toBeGreaterThan(9 * verdicts.undecided);
   });
 
   it('are never equal where values separate them, nor alike modulo η or h', () => {
