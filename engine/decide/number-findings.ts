@@ -2,12 +2,13 @@ import type { Budget } from '../arith/budget';
 import { negateInt } from '../arith/int';
 import type { Expression } from '../expression/expression';
 import type { Term } from '../ring/term';
+import { zeroExpression } from '../ring/write-word';
 import type { Open } from './decidable-field';
 import type { Finding } from './finding';
 import type { NumberArithmetic } from './number-arithmetic';
 import type { NumberClasses, NumberUnit } from './number-classes';
 import { NumberValue } from './number-value';
-import { numberWords, writeWords } from './number-writing';
+import { writeNumberClass } from './number-writing';
 import { zeroTest, type ZeroTest } from './number-zero';
 import type { MapName } from './outcome';
 
@@ -42,8 +43,7 @@ export function numberFindings<A, B extends NumberUnit>(
   const open: Open[] = [];
   for (const own of classes.degrees([...left, ...right])) {
     const test = zeroTest(difference, own, arithmetic);
-    const write = (side: 0 | 1): Expression =>
-      writeWords(numberWords(written[side]!, own, classes, arithmetic), (a) => classes.field.write(a));
+    const write = (side: 0 | 1): Expression => writeNumberClass(written[side]!, own, classes, arithmetic);
     if (test.zero !== undefined) {
       const bothZero = (): boolean => test.zero === true && zeroTest(written[0]!, own, arithmetic).zero === true;
       findings.push(new NumberFinding(origin, own, classes.field.tex, test, bothZero, write));
@@ -95,10 +95,10 @@ class NumberFinding implements Finding {
     return this.test.modH !== false;
   }
   left(): Expression {
-    return this.write(0);
+    return this.zero ? zeroExpression : this.write(0);
   }
   right(): Expression {
-    return this.write(1);
+    return this.zero ? zeroExpression : this.write(1);
   }
   target(): string {
     return `K^{\\mathrm{MW}}_{${this.own}}(${this.fieldTex})`;

@@ -1,7 +1,11 @@
 import type { Budget } from '../arith/budget';
 import type { Int } from '../arith/int';
 import { Exhausted, limitedBudget } from '../arith/limited-budget';
+import { integerElement, powerElement, productElement, type Element } from '../expression/element';
+import type { Expression } from '../expression/expression';
 import { Refusal } from '../expression/refusal';
+import { expressionRing, type Sized } from '../ring/expression-ring';
+import { zeroExpression } from '../ring/write-word';
 import type { Graded } from '../ring/graded-ring';
 import { productRing, type ProductClass } from '../ring/product-ring';
 import { residueRing } from '../ring/residue-ring';
@@ -22,6 +26,7 @@ export class NumberValue<A, B extends NumberUnit> {
   private units: Graded<ProductClass> | undefined;
   private symbols: Graded<WittSymbols> | undefined;
   private signs: readonly Graded<Int>[] | undefined;
+  private unsimplified: Graded<Sized> | undefined;
   private written: Graded<Words> | 'too long' | undefined;
 
   constructor(
@@ -84,6 +89,22 @@ export class NumberValue<A, B extends NumberUnit> {
   words(degree: number): Words | undefined | 'too long' {
     this.written ??= this.writeOut();
     return this.written === 'too long' ? this.written : this.written.get(degree);
+  }
+
+  /** The part of a degree as an expression that is not simplified, and may be that of 0. Refused when it is too long, too. */
+  expression(degree: number): Expression {
+    const { classes, terms, budget } = this;
+    const { field, generators } = classes;
+    const write = (unit: B): Element => {
+      const found: Element[] = [];
+      forEachGenerator(unit, (i, e) => {
+        const base = field.write(generators[i]!);
+        found.push(e === 1 ? base : powerElement(base, Number(e)));
+      });
+      return found.length === 0 ? integerElement(1n) : found.length === 1 ? found[0]! : productElement(found);
+    };
+    this.unsimplified ??= classes.image(terms, residueRing(expressionRing(write), classes.minusOne), budget);
+    return this.unsimplified.get(degree)?.expression ?? zeroExpression;
   }
 
   private writeOut(): Graded<Words> | 'too long' {

@@ -30,9 +30,32 @@ export type NumberWord = FieldWord<NumberFieldElement>;
 export function numberWords<A, B extends NumberUnit>(
   value: NumberValue<A, B>,
   degree: number,
-  { field, generators }: NumberClasses<A, B>,
+  classes: NumberClasses<A, B>,
   arithmetic: NumberArithmetic,
 ): readonly NumberWord[] {
+  const words = wordsOf(value, degree, classes, arithmetic);
+  if (words === 'too long')
+    throw new Refusal('size', 'A class over a number field has too many words to be written. Use smaller words.');
+  return words;
+}
+
+/** The part of degree n of a class over a number field as it is shown: by these words, or unsimplified where they are too many. */
+export function writeNumberClass<A, B extends NumberUnit>(
+  value: NumberValue<A, B>,
+  degree: number,
+  classes: NumberClasses<A, B>,
+  arithmetic: NumberArithmetic,
+): Expression {
+  const words = wordsOf(value, degree, classes, arithmetic);
+  return words === 'too long' ? value.expression(degree) : writeWords(words, (a) => classes.field.write(a));
+}
+
+function wordsOf<A, B extends NumberUnit>(
+  value: NumberValue<A, B>,
+  degree: number,
+  { field, generators }: NumberClasses<A, B>,
+  arithmetic: NumberArithmetic,
+): readonly NumberWord[] | 'too long' {
   const short =
     degree === 1
       ? asSymbol(value, field, arithmetic)
@@ -41,9 +64,7 @@ export function numberWords<A, B extends NumberUnit>(
         : undefined;
   if (short !== undefined) return short;
   const words = value.words(degree);
-  if (words === 'too long')
-    throw new Refusal('size', 'A class over a number field has too many words to be written. Use smaller words.');
-  return words === undefined ? [] : spelled(words, degree, generators);
+  return words === 'too long' ? words : words === undefined ? [] : spelled(words, degree, generators);
 }
 
 /** The words as they are written, with `prefix` in front of each. */

@@ -11,7 +11,7 @@ import type { FunctionEntry } from '../place/function-entry';
 import { reductionsAt, reductionsAtInfinity, type Reductions } from '../place/reduced-entry';
 import { degreesOf } from '../ring/degrees';
 import type { Term } from '../ring/term';
-import { total } from '../ring/write-word';
+import { total, zeroExpression } from '../ring/write-word';
 import { checkOnePlace, noUniformizer, readFunctionPlaces, type AskedPlace } from './asked-place';
 import { residueClasses, specialisationClasses } from './function-classes';
 import { numberPlaces } from './function-number-classes';
@@ -19,7 +19,7 @@ import type { FunctionStatement } from './function-statement';
 import { NumberArithmetic } from './number-arithmetic';
 import type { NumberClasses, NumberUnit } from './number-classes';
 import { NumberValue } from './number-value';
-import { numberWords, writeWords } from './number-writing';
+import { writeNumberClass } from './number-writing';
 import { zeroTest } from './number-zero';
 import type { Residue, ResiduesOutcome } from './outcome';
 import { rationalFindings } from './rational-findings';
@@ -174,7 +174,7 @@ class RationalFunctionResidues {
     const words = classes.degrees(terms).map((own) => {
       const zero = tested && this.settled(zeroTest(value, own, arithmetic).zero, place);
       if (!zero) top ??= own;
-      return writeWords(zero ? [] : numberWords(value, own, classes, arithmetic), (a) => field.write(a));
+      return zero ? zeroExpression : writeNumberClass(value, own, classes, arithmetic);
     });
     return { field: field.name, value: total(words), top };
   }

@@ -1,8 +1,13 @@
 import type { Budget } from '../arith/budget';
 import { integerElement } from '../expression/element';
+import type { Expression } from '../expression/expression';
+import { Refusal } from '../expression/refusal';
+import { rationals } from '../field/rational';
 import { exponentMap } from '../place/rational-entry';
 import { see } from '../place/sight';
 import type { Visited } from '../place/theta-ring';
+import { expressionRing } from '../ring/expression-ring';
+import type { Graded, GradedRing } from '../ring/graded-ring';
 import { mappedRing } from '../ring/mapped-ring';
 import { residueRing } from '../ring/residue-ring';
 import { wordRing, type Monomial, type Words } from '../ring/word-ring';
@@ -17,7 +22,8 @@ const LARGE = 1n << 128n;
 
 /**
  * A side of what is compared over ℚ as it is shown: its canonical form, or, where large numbers are in it, canonical words in a coprime base of
- * its entries, which are the same element and need not be the shortest.
+ * its entries, which are the same element and need not be the shortest; and the
+ * words as they stand where these are too many.
  */
 export function writtenOverRationals<A, B extends Visited>(
   classes: RationalClasses<A, B>,
@@ -33,15 +39,22 @@ export function writtenOverRationals<A, B extends Visited>(
       exponents: new Map([...exponentMap(entry)].map(([i, e]) => [i, BigInt(e)])),
     };
   };
-  const ring = mappedRing(wordRing('zero', budget), monomial);
-  const image = classes.image(classes.sides[side] ?? [], residueRing<B, Words>(ring, classes.minusOne), budget);
   const generators = [minusOneElement, ...base.map(({ value }) => integerElement(value))];
-  return [...image]
-    .sort(([a], [b]) => b - a)
-    .map(([degree, words]) => ({
-      degree,
-      normalForm: writeWords(spelled(words, degree, generators), (a) => a),
-      canonical: false,
-    }))
-    .filter(({ normalForm }) => !isZero(normalForm));
+  const write = (words: Words, degree: number): Expression => writeWords(spelled(words, degree, generators), (a) => a);
+  const terms = classes.sides[side] ?? [];
+  const image = <H>(ring: GradedRing<B, H>): Graded<H> =>
+    classes.image(terms, residueRing<B, H>(ring, classes.minusOne), budget);
+  try {
+    return parts(image(mappedRing(wordRing('zero', budget), monomial)), write);
+  } catch (error) {
+    if (!(error instanceof Refusal) || error.code !== 'size') throw error;
+  }
+  const asItStands = expressionRing<B>((unit) => rationals.write(classes.rational(unit).value));
+  return parts(image(asItStands), ({ expression }) => expression);
 }
+
+const parts = <H>(image: Graded<H>, write: (value: H, degree: number) => Expression): readonly NormalizedDegree[] =>
+  [...image]
+    .sort(([a], [b]) => b - a)
+    .map(([degree, value]) => ({ degree, normalForm: write(value, degree), canonical: false }))
+    .filter(({ normalForm }) => !isZero(normalForm));

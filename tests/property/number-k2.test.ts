@@ -1,9 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { expressionText } from '@/engine/expression/to-text';
-import { elementText } from '@/engine/expression/to-text';
+import { elementText, expressionText } from '@/engine/expression/to-text';
 import { expectVerdict, judge, verdict, whereDefined } from './kmw-engine';
 import { fieldRow } from './kmw-fields';
+import { atPlace } from './kmw-function-fields';
 
 /** What is known of K_2 of residue fields of ℚ(t), and of number fields themselves. */
 describe('K_2 of number fields', () => {
@@ -46,5 +46,28 @@ describe('K_2 of number fields', () => {
         { numRuns: 12 },
       );
     }
+  });
+});
+
+describe('classes with too many words', () => {
+  const product = (letter: string, from: number, count: number): string =>
+    Array.from({ length: count }, (_, i) => `(${letter}+${from + i})`).join('*');
+  const [a, b] = [product('t', 1, 7), product('t', 8, 7)];
+  const [x, y] = [product('y', 1, 7), product('y', 8, 7)];
+
+  it.each([
+    [`[t^2+1][${a}][${b}]`, `[${x}][${y}]`],
+    [`eta[t^2+1][${a}][${b}]`, `eta[${x}][${y}]`],
+    [`eta^2<t+3>[(t^2+1)^3][${a}][${b}]`, `eta^2<y+3>3_eps[${x}][${y}]`],
+  ])('are shown as they stand: the residue of %s', (alpha, value) => {
+    expect(verdict('Q(t)', alpha, '0')).toBe('different');
+    const { answer, d } = atPlace('Q(t)', 't^2+1', alpha);
+    expect(answer.zero).toBe(false);
+    expectVerdict('equal', 'Q[y]/(y^2+1)', d, value);
+  });
+
+  it('are compared all the same', () => {
+    expect(verdict('Q(t)', `eta[t^2+1][${a}][${b}]`, `eta[t^2+1][${b}][${a}]`)).toBe('equal');
+    expect(verdict('Q(t)', `eta[t^2+1][${a}][${b}]`, `eta[t^2+1][${b}][(t-1)*${a}]`)).toBe('different');
   });
 });
