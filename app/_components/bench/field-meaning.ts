@@ -97,9 +97,26 @@ export function fieldWords(name: FieldName, answer?: FieldAnswer): Phrase {
 
 /** The same, with what is decided over the field. */
 export function fieldMeaning(name: FieldName, answer?: FieldAnswer): Phrase {
-  const decided =
-    name.kind !== 'any' && name.kind !== 'functions' && (name.kind !== 'extension' || orderOf(name) !== undefined);
-  return decided ? [...fieldWords(name, answer), ': complete in every degree'] : fieldWords(name, answer);
+  const decided = decidedOver(name);
+  return decided === undefined ? fieldWords(name, answer) : [...fieldWords(name, answer), decided];
+}
+
+const inEveryDegree = ': complete in every degree';
+
+/** In which degrees everything is decided; nothing for letters and for fields over which nothing is. */
+function decidedOver(name: FieldName): string | undefined {
+  switch (name.kind) {
+    case 'any':
+      return undefined;
+    case 'functions':
+      if (orderOf(name.base) !== undefined) return inEveryDegree;
+      return name.base.kind === 'rationals' ? ': complete but for degree 3, which may stay undecided' : undefined;
+    case 'extension':
+      if (orderOf(name) !== undefined) return inEveryDegree;
+      return name.base.kind === 'rationals' ? ': complete but for degree 2, which may stay undecided' : undefined;
+    default:
+      return inEveryDegree;
+  }
 }
 
 /** Whether the service has something to add to what the name tells. */
