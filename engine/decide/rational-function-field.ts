@@ -8,7 +8,8 @@ import { rationalFunctionResidues } from './rational-function-residues';
 import { rationalConstants, rationalFunctionStatement } from './rational-function-statement';
 
 /**
- * ℚ(letter): complete but for residues that land in K_2 of a number field, in degree 3, at places of degree ≥ 2.
+ * ℚ(letter): complete but for residues that land in K_2 of a number field, in degree 3, at places of degree ≥ 2; these are settled as
+ * far as `zeroTest` goes.
  */
 export function rationalFunctionField(letter: string): DecidableField {
   const { name, tex } = rationalConstants(letter, unlimited).functions;
