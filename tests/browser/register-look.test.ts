@@ -91,7 +91,7 @@ test.each([320, 390, 900, 1280])('words without a place to break stay within %i 
     expect.soft(await findings(page), path).toEqual([]);
     expect.soft(await scrollsSideways(page), path).toBe(false);
     // The number fills its lines.
-    for (const box of await page.locator('main .long-number').all())
+    for (const box of await page.locator(':is(.set, .register) .long-number').all())
       expect.soft((await box.boundingBox())?.width, path).toBeGreaterThan(100);
   }
 });
