@@ -28,10 +28,10 @@ interface Props {
 
 /** Who is in the group, and as what; for stewards with what they can change. */
 export function MembersLedger({ slug, members, self, manages }: Props) {
-  const [open, setOpen] = useState<{ readonly leaf: 'role' | 'remove'; readonly id: string }>();
+  // The member as chosen: whoever is removed leaves the list before the leaf has said so.
+  const [open, setOpen] = useState<{ readonly leaf: typeof RoleLeaf; readonly member: MemberLine }>();
   const [said, setSaid] = useState<string>();
   const place = useRef<HTMLDivElement>(null);
-  const chosen = members.find(({ id }) => id === open?.id);
   const close = () => setOpen(undefined);
   const done = (words: string | undefined) => {
     close();
@@ -57,7 +57,7 @@ export function MembersLedger({ slug, members, self, manages }: Props) {
               <span className="nm">{member.email}</span>
             </th>
             <td>{member.role}</td>
-            <td data-label="since">{member.since}</td>
+            <td data-label="since" className="whitespace-nowrap">{member.since}</td>
             {manages && (
               <td>
                 <span className="acts">
@@ -65,7 +65,7 @@ export function MembersLedger({ slug, members, self, manages }: Props) {
                     kind="plain"
                     aria-haspopup="dialog"
                     aria-label={`Change the role of ${member.name}`}
-                    onClick={() => setOpen({ leaf: 'role', id: member.id })}
+                    onClick={() => setOpen({ leaf: RoleLeaf, member })}
                   >
                     Change role
                   </Button>
@@ -74,7 +74,7 @@ export function MembersLedger({ slug, members, self, manages }: Props) {
                       kind="plain"
                       aria-haspopup="dialog"
                       aria-label={`Remove ${member.name}`}
-                      onClick={() => setOpen({ leaf: 'remove', id: member.id })}
+                      onClick={() => setOpen({ leaf: RemoveLeaf, member })}
                     >
                       Remove
                     </Button>
@@ -85,12 +85,7 @@ export function MembersLedger({ slug, members, self, manages }: Props) {
           </tr>
         ))}
       </Ledger>
-      {chosen !== undefined && open?.leaf === 'role' && (
-        <RoleLeaf slug={slug} member={chosen} onClose={close} onDone={done} />
-      )}
-      {chosen !== undefined && open?.leaf === 'remove' && (
-        <RemoveLeaf slug={slug} member={chosen} onClose={close} onDone={done} />
-      )}
+      {open !== undefined && <open.leaf slug={slug} member={open.member} onClose={close} onDone={done} />}
     </div>
   );
 }

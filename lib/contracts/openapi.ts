@@ -15,7 +15,7 @@ export const openApiContract: Contract<undefined, typeof openApiAnswer> = {
   method: 'GET',
   path: '/api/v1/openapi.json',
   operation: 'describe',
-  summary: 'This document',
+  summary: 'The description of the API, for programs',
   description: 'The OpenAPI 3.1 document of the API.',
   permission: 'service-state',
   request: undefined,

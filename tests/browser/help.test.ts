@@ -1,6 +1,7 @@
 import { expect, test } from 'vitest';
+import { permissionNames } from '@/lib/contracts/permission-name';
 import { problemKinds } from '@/lib/contracts/problem';
-import { openPage } from '../harness/browser';
+import { findings, openPage } from '../harness/browser';
 import { post } from '../harness/http';
 
 test('every kind of problem has its place, where its type leads', async () => {
@@ -57,4 +58,18 @@ test('the index marks the subject that is read', async () => {
   await expect
     .poll(() => index.getByRole('link', { name: 'conventions' }).getAttribute('aria-current'))
     .toBe('location');
+});
+
+test('the page can be read on the narrowest phone', async () => {
+  const page = await openPage('/help', { width: 320, height: 700 });
+  expect(await page.evaluate(() => document.documentElement.scrollWidth - innerWidth)).toBe(0);
+  expect(await findings(page)).toEqual([]);
+});
+
+test('the table of roles says what each permission opens, from the table that decides', async () => {
+  const page = await openPage('/help');
+  const rows = page.getByRole('table', { name: 'Who may do what' }).getByRole('row');
+  expect(await rows.count()).toBe(permissionNames.length + 1);
+  expect(await rows.filter({ hasText: 'keep, revise' }).innerText()).toMatch(/author\s+scope write/);
+  expect(await rows.filter({ hasText: 'invite and remove' }).innerText()).toMatch(/steward\s+no token/);
 });

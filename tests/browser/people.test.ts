@@ -16,10 +16,10 @@ test('a group is started, a member invited by mail, seated, given a role, and re
   const mail = mailbox();
   const steward = await openPage('/start');
   await signUp(steward, { group: 'Skerry seminar' });
-  expect(await steward.title()).toBe('Skerry seminar · Quadrel');
+  await expect.poll(() => steward.title()).toBe('Skerry seminar · Quadrel');
   const email = freshAddress();
   await steward.getByLabel('Invite by e-mail').fill(` ${email.toUpperCase()} `);
-  await steward.getByLabel('Role').selectOption('reader');
+  await steward.getByLabel('Role', { exact: true }).selectOption('reader');
   await steward.getByRole('button', { name: 'Send the invitation' }).click();
   await steward
     .getByRole('status')
@@ -93,7 +93,7 @@ test('a password is set anew by mail, and every session from before is over', as
 
   const link = pathOf((await mail.waitForMail(person.email)).links.find((one) => one.includes('/reset/')));
   await page.goto(link);
-  await page.getByLabel('New password').fill('basalt and heather');
+  await page.getByLabel('New password', { exact: true }).fill('basalt and heather');
   await page.getByRole('button', { name: 'Set the password' }).click();
   await page.waitForURL('**/account?said=password');
   await page.getByRole('status').filter({ hasText: 'Your password is set.' }).waitFor();

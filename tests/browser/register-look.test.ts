@@ -2,6 +2,8 @@ import type { Page } from 'playwright-core';
 import { beforeAll, describe, expect, test } from 'vitest';
 import type { Member } from '@/lib/people/caller';
 import { errorsOf, findings, type Sight } from '../harness/browser';
+import { newGroup } from '../harness/people';
+import { newAccount } from '../harness/sign-in';
 import { eventually, scrollsSideways } from './bench-page';
 import { formOf, keptBy, newKeeper, pageOf } from './register-page';
 
@@ -69,6 +71,29 @@ describe.each(sights)('%s', (_, sight) => {
     await page.getByLabel('Place', { exact: true }).waitFor();
     await expectWell(page);
   });
+});
+
+test.each([320, 390, 900, 1280])('words without a place to break stay within %i pixels', async (width) => {
+  const group = await newGroup(undefined, `Seminar${'g'.repeat(70)}`);
+  const steward = await newAccount(group, 'steward', `Wide${'w'.repeat(70)}`);
+  const one = await keptBy(steward, {
+    name: 'N'.repeat(120),
+    statement: `[${'7'.repeat(400)}] = [${'3'.repeat(400)}]`,
+    tags: ['t'.repeat(40)],
+    remark: 'R'.repeat(200),
+    reference: 'S'.repeat(120),
+    warning: true,
+  });
+  const page = await pageOf(steward, '/register', { width, height: 800 });
+  for (const path of ['/register', `/identities/${one.key}`, `/identities/${one.key}/revise`, '/group/audit']) {
+    await page.goto(path);
+    await page.getByRole('heading', { level: 1 }).waitFor();
+    expect.soft(await findings(page), path).toEqual([]);
+    expect.soft(await scrollsSideways(page), path).toBe(false);
+    // The number fills its lines.
+    for (const box of await page.locator(':is(.set, .register) .long-number').all())
+      expect.soft((await box.boundingBox())?.width, path).toBeGreaterThan(100);
+  }
 });
 
 describe('by keyboard alone', () => {

@@ -185,14 +185,14 @@ describe('the audit trail', () => {
     await page.getByLabel('Deed', { exact: true }).selectOption('revised');
     await page.getByLabel('From', { exact: true }).fill('2026-10-02');
     await page.getByLabel('To, that day included').fill('2026-10-02');
-    await page.getByLabel('Words in what it was done to').fill('skerry');
+    await page.getByLabel('Words in the subject').fill('skerry');
     await page.getByRole('button', { name: 'Look' }).click();
     await page.waitForURL('**action=identity-revised**');
     // 2 October begins 16 hours after the first deed, and half of its 24 deeds are revisions.
     expect(await rows.count()).toBe(12);
     expect(await page.getByLabel('From', { exact: true }).inputValue()).toBe('2026-10-02');
     expect(await findings(page)).toEqual([]);
-    await page.getByLabel('Words in what it was done to').fill('nothing of that name');
+    await page.getByLabel('Words in the subject').fill('nothing of that name');
     await page.keyboard.press('Enter');
     await page.getByText('Nothing like that was done.').waitFor();
     await page.getByRole('link', { name: 'See everything' }).click();

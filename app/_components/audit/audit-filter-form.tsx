@@ -34,7 +34,7 @@ export function AuditFilterForm({ filter, people }: Props) {
       <Field label="From" name="from" type="date" defaultValue={filter.from} />
       <Field label="To, that day included" name="to" type="date" defaultValue={filter.to} />
       <Field
-        label="Words in what it was done to"
+        label="Words in the subject"
         name="words"
         defaultValue={filter.words}
         placeholder="for instance: skerry-6"

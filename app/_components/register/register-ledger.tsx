@@ -71,7 +71,7 @@ function Entry({ identity }: { readonly identity: IdentitySummary }) {
       <td className="over">
         <FieldName field={field} />
       </td>
-      <td className="when opt" title={keeper}>
+      <td className="keeper opt" title={keeper}>
         {shortName(keeper)}
       </td>
       <td className="when num opt">

@@ -18,26 +18,26 @@ interface Props {
 /** The list of rooms, the group and the person, and the theme. */
 export function RoomsLeaf({ open, onClose, who: { person, group } }: Props) {
   const pathname = usePathname();
-  const current = (href: string) => (isIn(pathname, { href }) ? 'page' : undefined);
+  const current = (room: Parameters<typeof isIn>[1]) => (isIn(pathname, room) ? 'page' : undefined);
   return (
     <Leaf open={open} onClose={onClose} title="Rooms">
       <nav className="room-list" aria-label="Rooms">
         {rooms.map((room) => (
-          <Link key={room.href} href={room.href} aria-current={current(room.href)} onClick={onClose}>
+          <Link key={room.href} href={room.href} aria-current={current(room)} onClick={onClose}>
             {room.name}
           </Link>
         ))}
       </nav>
       <nav className="room-list mt-6" aria-label="Group and person">
         {group !== undefined && (
-          <Link className="italic" href="/group" aria-current={current('/group')} onClick={onClose}>
+          <Link className="italic" href="/group" aria-current={current({ href: '/group' })} onClick={onClose}>
             {group}
           </Link>
         )}
         {person === undefined ? (
           <SignInLink onClick={onClose} />
         ) : (
-          <Link href="/account" aria-current={current('/account')} onClick={onClose}>
+          <Link href="/account" aria-current={current({ href: '/account' })} onClick={onClose}>
             {person}
           </Link>
         )}

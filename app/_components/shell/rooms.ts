@@ -5,6 +5,8 @@ export interface Room {
   readonly name: string;
   /** What one does there, for the contents. */
   readonly says: string;
+  /** Pages of the room that stand elsewhere. */
+  readonly also?: string;
 }
 
 /** The rooms, in the order of the running head. A new room is one line here. */
@@ -14,6 +16,7 @@ export const rooms: readonly Room[] = [
     href: '/register',
     name: 'Register',
     says: 'the identities a group keeps: stated, checked, citable, found again by their words',
+    also: '/identities',
   },
   {
     href: '/help',
@@ -22,5 +25,5 @@ export const rooms: readonly Room[] = [
   },
 ];
 
-export const isIn = (pathname: string, room: Pick<Room, 'href'>): boolean =>
-  pathname === room.href || pathname.startsWith(`${room.href}/`);
+export const isIn = (pathname: string, room: Pick<Room, 'href' | 'also'>): boolean =>
+  [room.href, room.also].some((path) => path !== undefined && (pathname === path || pathname.startsWith(`${path}/`)));

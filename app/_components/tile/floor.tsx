@@ -39,11 +39,24 @@ interface Props {
 const firings: readonly Firing[] = ['a', 'b', 'c'];
 const largeUpTo = 10;
 const shownUpTo = 16;
+/** Digits that stand over a tile; a longer number is shown by its ends, and in full in the table of evidence. */
+const widestNumber = 6;
 
 const isQuiet = (cell: FloorCell | undefined) => cell === undefined || cell.state === 'agree' || cell.state === 'none';
 
-const placeLabel = (place: FloorPlace): ReactNode =>
-  place.word ?? (/^\d+$/.test(place.tex ?? '') ? place.tex : <Formula tex={place.tex ?? place.key} />);
+const placeLabel = ({ key, word, tex = key }: FloorPlace): ReactNode => {
+  if (word !== undefined) return word;
+  if (!/^\d+$/.test(tex)) return <Formula tex={tex} />;
+  if (tex.length <= widestNumber) return tex;
+  return (
+    <>
+      <span aria-hidden="true">
+        {tex.slice(0, 2)}…{tex.slice(-2)}
+      </span>
+      <span className="sr">{tex}</span>
+    </>
+  );
+};
 
 /** Degrees down, places across; the canonical form ends each row. One tab stop a row, arrows walk, Enter shows. */
 export function Floor({ label, places, rows, heading, onShow }: Props) {
@@ -86,7 +99,12 @@ export function Floor({ label, places, rows, heading, onShow }: Props) {
 
   return (
     <>
-      <div className={`floor ${small ? 'small-tiles' : ''}`} role="table" aria-label={label} ref={table}>
+      <div
+        className={`floor ${small ? 'small-tiles' : ''} ${columns.length > shownUpTo ? 'long' : ''}`}
+        role="table"
+        aria-label={label}
+        ref={table}
+      >
         <div role="row">
           <span className="deg" role="columnheader">
             <span className="sr">degree</span>

@@ -40,7 +40,7 @@ export function Groups() {
               <tr key={permission}>
                 <td className="text">{opens[permission]}</td>
                 <td data-label="from">{roleWord(from)}</td>
-                <td data-label="with" className={scope === 'none' ? 'quiet' : ''}>
+                <td data-label="with" className={scope === 'none' ? 'quiet' : 'whitespace-nowrap'}>
                   {scope === 'any' || scope === 'none' ? scopeWord[scope] : <>scope {<code>{scope}</code>}</>}
                 </td>
               </tr>

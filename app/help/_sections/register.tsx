@@ -79,8 +79,8 @@ export function Register() {
           <div>
             <dt>Checked again</dt>
             <dd>
-              Any revision can be checked again, by a later version of the engine for instance. The history of checks
-              stays; the state follows the last one.
+              The current revision can be checked again, by a later version of the engine for instance. The history of
+              checks stays; the state follows the last one.
             </dd>
           </div>
           <div>

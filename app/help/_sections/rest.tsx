@@ -42,10 +42,10 @@ export function Rest() {
         </pre>
         <Calls open />
         <p>
-          With a <a href="#tokens">token</a> of a member it also reads and fills the register. A call that makes
-          something takes an <code>Idempotency-Key</code>: sent again within a day with the same body it makes nothing
-          new. A revision names in <code>base</code> the one it was begun from; if there is a newer one, the answer is a
-          409 with it in <code>current</code>. Lists come in pages, with a cursor for the next one.
+          With a <a href="#tokens">token</a> of a member it also reads and fills the register. To keep one takes an{' '}
+          <code>Idempotency-Key</code>: sent again within a day with the same body it makes nothing new. A revision
+          names in <code>base</code> the one it was begun from; if there is a newer one, the answer is a 409 with it in{' '}
+          <code>current</code>. Lists come in pages, with a cursor for the next one.
         </p>
         <Calls open={false} />
         <p>

@@ -42,6 +42,8 @@ function attributes(labelledBy: string, describedBy: string, invalid: boolean) {
     autocorrect: 'off',
     spellcheck: 'false',
     enterkeyhint: 'enter',
+    // It takes the focus without; so says it to whoever asks whether the box that scrolls can be reached.
+    tabindex: '0',
   });
 }
 

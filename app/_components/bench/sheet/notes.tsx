@@ -98,6 +98,7 @@ export function Notes({ answer, current, meaning, onWrite }: Props) {
   return (
     <aside className="notes" aria-label={statement ? 'With this statement' : 'With this expression'}>
       <SideConditions answer={answer} />
+      <KeepWarning answer={answer} current={current} />
       {statement && statement.evidence.theorem !== '' && (
         <div>
           <h2>why this is enough</h2>
@@ -131,7 +132,6 @@ export function Notes({ answer, current, meaning, onWrite }: Props) {
           </p>
         </div>
       )}
-      <KeepWarning answer={answer} current={current} />
       <KeepResidue answer={answer} current={current} />
     </aside>
   );

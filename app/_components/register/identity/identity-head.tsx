@@ -58,7 +58,7 @@ export function IdentityHead({ identity, viewer, past }: Props) {
     <section className="slab" aria-label="The identity">
       <div className="row">
         <p className="side to-title">identity {identity.number}</p>
-        <div className="named">
+        <div className="headed">
           <div>
             <h1>{identity.name}</h1>
             <Stands identity={identity} viewer={viewer} past={past} />

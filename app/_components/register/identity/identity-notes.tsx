@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { IdentityAnswer } from '@/lib/contracts/identity-answer';
 import { VerdictMark } from '../../marks/verdict-mark';
 import { PageIndex } from '../../shell/page-index';
@@ -8,15 +9,18 @@ const shownChecks = 12;
 
 interface Props {
   readonly identity: IdentityAnswer;
+  /** What can be done with it. */
+  readonly children: ReactNode;
 }
 
-/** The notes at the edge: the index of the page, and the history of checks. */
-export function IdentityNotes({ identity }: Props) {
+/** The notes at the edge: what can be done, the index of the page, and the history of checks. */
+export function IdentityNotes({ identity, children }: Props) {
   const { checks, revision, remark } = identity;
   const subjects = ['statement', 'evidence', 'revisions', ...(remark === undefined ? [] : ['remark']), 'cite'];
   const several = new Set(checks.map((check) => check.revision)).size > 1;
   return (
-    <aside className="notes" aria-label="About this identity">
+    <aside className="notes from-top" aria-label="About this identity">
+      {children}
       <PageIndex subjects={subjects.map((id) => ({ id, name: id }))} />
       <div>
         <h2>history of checks</h2>

@@ -53,18 +53,6 @@ export function IdentityPage({ identity, viewer, bibtex, tex }: Props) {
             <Reference identity={identity} />
           </Row>
         </div>
-        <IdentityDeeds
-          identityKey={identity.key}
-          revision={identity.revision}
-          past={past}
-          text={saying.text}
-          tex={saying.tex}
-          field={identity.field.text}
-          line={lineOf(identity)}
-          visibility={identity.visibility}
-          tags={identity.tags}
-          viewer={viewer}
-        />
         <EvidenceRows identity={identity} mayCheck={mayCheck} />
         <Row side="revisions" id="revisions" className="sec ruled">
           <RevisionsTable identity={identity} />
@@ -77,7 +65,20 @@ export function IdentityPage({ identity, viewer, bibtex, tex }: Props) {
         <Row side="cite" id="cite" className="sec ruled">
           <Citations bibtex={bibtex} tex={tex} />
         </Row>
-        <IdentityNotes identity={identity} />
+        <IdentityNotes identity={identity}>
+          <IdentityDeeds
+            identityKey={identity.key}
+            revision={identity.revision}
+            past={past}
+            text={saying.text}
+            tex={saying.tex}
+            field={identity.field.text}
+            line={lineOf(identity)}
+            visibility={identity.visibility}
+            tags={identity.tags}
+            viewer={viewer}
+          />
+        </IdentityNotes>
       </main>
       <Colophon />
     </>

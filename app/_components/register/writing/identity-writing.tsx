@@ -125,13 +125,13 @@ function Writing(props: Props) {
       <section className="slab writing-slab" aria-label="What it says">
         <div className="row">
           <p className="side to-title">{side}</p>
-          <div className="named">
+          <div className="headed">
             <h1>{title}</h1>
             <Course label="What is kept" options={kinds} value={form.kind} onChange={(kind) => write({ kind })} />
           </div>
         </div>
         {offer && (
-          <div className="bench-slip">
+          <div className="writing-slip">
             <Slip
               kind="ask"
               onClose={kept.leave}
