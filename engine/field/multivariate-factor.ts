@@ -17,7 +17,11 @@ import { primeField } from './prime-field';
 
 /** Images in one letter up to this degree are factored, and so many factors of an image are combined. */
 const IMAGE_DEGREE = 160;
-const IMAGE_FACTORS = 12;
+const IMAGE_FACTORS = 20;
+/** With no more of them than this an image is good enough; otherwise others are looked at. */
+const FEW_FACTORS = 8;
+/** So many products of factors of an image are tested. */
+const TRIALS = 2_500;
 /** Numbers that stand for coefficients in other letters have at most this many digits to their large base. */
 const DIGITS = 64;
 
@@ -45,13 +49,18 @@ export function factorsOf(ring: LetterRing, f: MultiPolynomial): readonly MultiP
       ? factored(ring, numberImage(ring, f, letters))
       : ordersOf(letters)
           .map((order) => () => factored(ring, letterImage(ring, f, order)))
-          .reduce<FactoredImage | undefined>((found, next) => found ?? next(), undefined);
+          .reduce<FactoredImage | undefined>((best, next) => {
+            if (best !== undefined && best.pieces.length <= FEW_FACTORS) return best;
+            const found = next();
+            return best === undefined || (found && found.pieces.length < best.pieces.length) ? found : best;
+          }, undefined);
   if (image === undefined) return [f];
   let { pieces } = image;
   const found: MultiPolynomial[] = [];
   let rest = f;
-  for (let size = 1; 2 * size <= pieces.length;) {
-    const divisor = firstDivisor(ring, rest, image, pieces, size);
+  const trials = { left: TRIALS };
+  for (let size = 1; 2 * size <= pieces.length && trials.left > 0;) {
+    const divisor = firstDivisor(ring, rest, image, pieces, size, trials);
     if (divisor === undefined) {
       size += 1;
       continue;
@@ -230,8 +239,11 @@ function firstDivisor(
   image: Image,
   pieces: readonly IntegerPolynomial[],
   size: number,
+  trials: { left: number },
 ): Divisor | undefined {
   for (const used of choices(pieces.length, size)) {
+    trials.left -= 1;
+    if (trials.left < 0) return undefined;
     ring.budget.spend('factoring a polynomial in several letters');
     const candidate = image.preimage(used.map((i) => pieces[i] ?? [1n]).reduce(multiplyIntegers));
     if (candidate === undefined || isConstant(candidate)) continue;
