@@ -47,5 +47,6 @@ export function decidableNumberField(field: NumberField): DecidableField {
 const THEOREM =
   'Over a number field the product of entries sees K_1 and rank, discriminant, signatures and Hilbert symbols see the Witt ring ' +
   '(Hasse–Minkowski: T. Y. Lam, Introduction to Quadratic Forms over Fields, VI.3, number from memory); from degree 3 on signatures see everything ' +
-  '(H. Bass, J. Tate, The Milnor ring of a global field, Theorem II.2.1, number from memory). In degree 2 tame symbols are compared and a proof by Steinberg relations is looked for. Together by the pull-back theorem (F. Morel, ' +
+  '(H. Bass, J. Tate, The Milnor ring of a global field, Theorem II.2.1, number from memory). ' +
+  'In degree 2 tame symbols are compared and a proof by Steinberg relations is looked for. Together by the pull-back theorem (F. Morel, ' +
   'Comment. Math. Helv. 79, 2004).';

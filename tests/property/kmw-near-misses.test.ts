@@ -87,7 +87,7 @@ describe('three symbols turned round', () => {
   it('differ in letters, though over every finite field and over Q_p nothing is left of them', () => {
     expectVerdict('different', 'any', '[a][b][c]', '[b][a][c]');
     for (const { name, unit, sums } of fieldRows.filter(
-      (row) => row.sums && !['Q', 'R', 'C', 'Q(t)'].includes(row.name),
+      (row) => row.sums && !['Q', 'R', 'C', 'Q(t)'].includes(row.name) && !row.name.startsWith('Q['),
     )) {
       expect(sums).toBe(true);
       fc.assert(
