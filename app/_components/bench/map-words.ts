@@ -40,7 +40,9 @@ export function contributions(maps: readonly MapName[]): string {
   return parts.length < 2 ? last : `${parts.slice(0, -1).join(', ')}, and ${last}`;
 }
 
-/** How a place is written over a tile: ∞ for the real place, a prime by its digits. */
-export const placeTex = (place: string): string => (place === 'real' || place === 'infinity' ? '\\infty' : place);
+/** How a place is written over a tile: ∞ for the real place and that of degree −1, a prime by its digits, a polynomial set. */
+export const placeTex = (place: string): string =>
+  place === 'real' || place === 'infinity' ? '\\infty' : place.replaceAll('*', '').replace(/\^(\d{2,})/g, '^{$1}');
 
-export const placeWords = (place: string): string => (place === 'real' ? 'the real place' : place);
+export const placeWords = (place: string): string =>
+  place === 'real' ? 'the real place' : place === 'infinity' ? 'infinity' : place;

@@ -4,6 +4,7 @@ import type { Answer } from './ask';
 import { degreeName, degreesName, inDegrees } from './degrees';
 import { contributions, mapWord, placeWords } from './map-words';
 import { type Phrase, tex, withFormulas } from './phrase';
+import { valuesTex } from './values-tex';
 
 export const verdictWord = { equal: 'Equal', different: 'Different', undecided: 'Undecided' } as const;
 
@@ -42,9 +43,19 @@ function differentPhrase(answer: CompareAnswer): Phrase {
   const { separating } = answer.evidence;
   const degrees = degreesOf(answer.parts.filter((part) => part.verdict === 'different'));
   if (!separating) return [`${inDegrees(degrees)}.`];
+  const { counterexample } = answer.evidence;
+  const failing: Phrase = counterexample
+    ? [
+        '. It fails over ',
+        tex(counterexample.field.tex),
+        ...(counterexample.values.length === 0 ? [] : [' with ', tex(valuesTex(counterexample.values))]),
+      ]
+    : [];
   const at = separating.place === undefined ? '. The' : `, at ${placeWords(separating.place)}. There the`;
   return [
-    `in ${degreeName(separating.degree)}${at} left side has ${nounOf(separating.map)} `,
+    `in ${degreeName(separating.degree)}`,
+    ...failing,
+    `${at} left side has ${nounOf(separating.map)} `,
     tex(separating.left.tex),
     ' and the right side ',
     tex(separating.right.tex),
@@ -65,7 +76,11 @@ export function verdictPhrase(answer: CompareAnswer): Phrase {
   if (answer.verdict === 'equal') return equalPhrase(answer);
   if (answer.verdict === 'different') return differentPhrase(answer);
   const open = degreesOf(answer.parts.filter((part) => part.verdict === 'undecided'));
-  return [`${inDegrees(open)}. No invariant at hand separates the sides, and no relation at hand joins them.`];
+  const { tried } = answer.evidence;
+  const none = tried ? 'No lawful substitution at hand' : 'No invariant at hand';
+  const reached = [tried?.limit.reached, tried?.proof?.limit.reached].filter(Boolean).length;
+  const ended = ['', ' One of the two searches ended at its limit.', ' Both searches ended at their limits.'][reached];
+  return [`${inDegrees(open)}. ${none} separates the sides, and no relation at hand joins them.${ended}`];
 }
 
 /** The same for a chain, of which the first wrong step is shown. */

@@ -1,4 +1,5 @@
 import type { ComparedMap, ComparedPart } from '@/lib/contracts/compare';
+import { placeTex } from '../bench/map-words';
 import type { FloorCell, FloorPlace, FloorRow } from './floor';
 import type { TileState } from './tile';
 
@@ -19,15 +20,14 @@ const placeKey = (entry: ComparedMap) => entry.place ?? `map:${entry.map}`;
 
 /** ∞ first, then the primes by size, then what belongs to no place in the order it came. */
 function rank(key: string): [number, bigint] {
-  if (key === 'real') return [0, 0n];
+  if (key === 'real' || key === 'infinity') return [0, 0n];
   if (/^\d+$/.test(key)) return [1, BigInt(key)];
   return key.startsWith('map:') ? [3, 0n] : [2, 0n];
 }
 
 function columnOf(key: string): FloorPlace {
-  if (key === 'real') return { key, tex: '\\infty' };
   if (key.startsWith('map:')) return { key, word: mapWords[key.slice(4) as ComparedMap['map']] };
-  return { key, tex: key };
+  return { key, tex: placeTex(key) };
 }
 
 function stateOf(entries: readonly ComparedMap[]): TileState {

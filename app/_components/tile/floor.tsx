@@ -41,12 +41,26 @@ const largeUpTo = 10;
 const shownUpTo = 16;
 /** Digits that stand over a tile; a longer number is shown by its ends, and in full in the table of evidence. */
 const widestNumber = 6;
+/** Characters of a polynomial that stand over a tile; of a longer one its first term does. */
+const widestPolynomial = 7;
 
 const isQuiet = (cell: FloorCell | undefined) => cell === undefined || cell.state === 'agree' || cell.state === 'none';
 
 const placeLabel = ({ key, word, tex = key }: FloorPlace): ReactNode => {
   if (word !== undefined) return word;
-  if (!/^\d+$/.test(tex)) return <Formula tex={tex} />;
+  if (!/^\d+$/.test(tex)) {
+    const head = key.length > widestPolynomial ? /^.[^+-]*[+-]/.exec(tex)?.[0] : undefined;
+    return head === undefined ? (
+      <Formula tex={tex} />
+    ) : (
+      <span title={key}>
+        <span aria-hidden="true">
+          <Formula tex={`${head}\\cdots`} />
+        </span>
+        <span className="sr">{key}</span>
+      </span>
+    );
+  }
   if (tex.length <= widestNumber) return tex;
   return (
     <>

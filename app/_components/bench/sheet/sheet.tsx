@@ -1,11 +1,13 @@
 'use client';
 
+import Link from 'next/link';
 import { useMemo } from 'react';
 import { readFieldName } from '@/grammar/read';
 import { Button } from '../../button/button';
 import { useKey } from '../../keys/keys-provider';
 import { Formula } from '../../math/formula';
 import type { Answer } from '../ask';
+import { benchAddress } from '../bench-address';
 import { fieldMeaning } from '../field-meaning';
 import type { Phrase } from '../phrase';
 import { KeepButton } from '../keeping';
@@ -41,7 +43,8 @@ function meaningOf(answer: Answer): Phrase | undefined {
 function Repair({ bench, answer }: { readonly bench: BenchState; readonly answer: Answer }) {
   const { line, asked } = bench;
   const statement = answer.kind === 'statement' && answer.body.sides.length === 2 ? answer.body : undefined;
-  const different = statement?.verdict === 'different';
+  const counterexample = statement?.evidence.counterexample;
+  const different = statement?.verdict === 'different' && !counterexample;
   const form = useDifference(
     answer.body.field.text,
     statement?.sides[0],
@@ -69,6 +72,14 @@ function Repair({ bench, answer }: { readonly bench: BenchState; readonly answer
         <Button wide keyName="=" tip="Put it on the left of an equation" unavailable={unavailable} onClick={compare}>
           Compare it with another
         </Button>
+      </p>
+    );
+  if (counterexample)
+    return (
+      <p>
+        <Link className="btn wide" href={benchAddress(counterexample.field.text, counterexample.statement.text)}>
+          Open it over <Formula tex={counterexample.field.tex} />
+        </Link>
       </p>
     );
   if (!different || !form?.repairs || answer.question.text.includes(';')) return null;

@@ -10,11 +10,15 @@ import { ApartTable } from './apart-table';
 import { ChainTable } from './chain-table';
 import { Difference } from './difference';
 import { EvidenceFloor } from './evidence-floor';
+import { Formula } from '../../math/formula';
+import { valuesTex } from '../values-tex';
+import { OpenRows, RelationRows } from './proof-rows';
+import { TriedStrip } from './tried-strip';
 
 /** A statement longer than this is not asked about once more for its difference. */
 const shortEnough = 2000;
 
-/** What a verdict rests on: the chain, the floor of tiles, left and right apart, left minus right. */
+/** What a verdict rests on: the chain, the fields that were tried, the floor of tiles, left and right apart, left minus right. */
 export function StatementEvidence({ answer }: { readonly answer: CompareAnswer }) {
   const chain = answer.chain && answer.chain.length > 1 ? answer.chain : undefined;
   const begin = chain ? Math.max(0, answer.firstWrong ?? chain.findIndex((step) => step.verdict !== 'equal')) : 0;
@@ -28,6 +32,8 @@ export function StatementEvidence({ answer }: { readonly answer: CompareAnswer }
   const verdict = judged?.verdict ?? answer.verdict;
   const left = judged?.left ?? answer.sides[0];
   const right = judged?.right ?? answer.sides[1];
+  const { counterexample, relations, tried } = (judged ?? answer).evidence;
+  const compared = parts.some((part) => part.compared.length > 0);
   const shown = open ?? verdict !== 'equal';
 
   const toggle = useCallback(() => {
@@ -47,39 +53,64 @@ export function StatementEvidence({ answer }: { readonly answer: CompareAnswer }
           <ChainTable chain={chain} firstWrong={answer.firstWrong} shown={step} onShow={setStep} />
         </Row>
       )}
-      <Row label={chain ? `Evidence for step ${step + 1}` : 'Evidence'}>
-        {chain && (
-          <p className="text quiet floor-of">
-            Step {step + 1} of {chain.length}:
-          </p>
-        )}
-        {parts.length === 0 ? (
-          <p className="text quiet">Both sides are zero in every degree.</p>
-        ) : (
-          <EvidenceFloor parts={parts} onShow={showCell}>
-            {verdict === 'equal' && (
-              <Button kind="plain" keyName="W" tip="Why" aria-expanded={shown} className="legend-act" onClick={toggle}>
-                Left and right apart
-              </Button>
-            )}
-          </EvidenceFloor>
-        )}
-        {chosen && (
-          <p className="text cell-said" role="status">
-            {chosen.name}.
-          </p>
-        )}
-      </Row>
-      {shown && parts.length > 0 && (
+      {tried && <TriedStrip tried={tried} counterexample={counterexample} />}
+      {verdict === 'undecided' && tried && <OpenRows tried={tried} />}
+      {(compared || parts.length === 0 || chain) && (
+        <Row label={chain ? `Evidence for step ${step + 1}` : 'Evidence'}>
+          {chain && (
+            <p className="text quiet floor-of">
+              Step {step + 1} of {chain.length}:
+            </p>
+          )}
+          {counterexample && (
+            <p className="lead floor-of">
+              {counterexample.values.length > 0 && (
+                <>
+                  At <Formula tex={valuesTex(counterexample.values)} />:{' '}
+                </>
+              )}
+              <Formula tex={counterexample.statement.tex} /> over <Formula tex={counterexample.field.tex} />
+            </p>
+          )}
+          {parts.length === 0 && <p className="text quiet">Both sides are zero in every degree.</p>}
+          {compared && (
+            <EvidenceFloor parts={parts} onShow={showCell}>
+              {verdict === 'equal' && (
+                <Button
+                  kind="plain"
+                  keyName="W"
+                  tip="Why"
+                  aria-expanded={shown}
+                  className="legend-act"
+                  onClick={toggle}
+                >
+                  Left and right apart
+                </Button>
+              )}
+            </EvidenceFloor>
+          )}
+          {chosen && (
+            <p className="text cell-said" role="status">
+              {chosen.name}.
+            </p>
+          )}
+        </Row>
+      )}
+      {relations && relations.length > 0 && <RelationRows relations={relations} />}
+      {shown && compared && (
         <Row side="left and right apart" sideClass="to-table" id="apart">
           <div ref={apart}>
             <ApartTable parts={parts} chosen={chosen?.key} />
           </div>
         </Row>
       )}
-      {verdict === 'different' && left && right && left.text.length + right.text.length <= shortEnough && (
-        <Difference field={answer.field.text} left={left} right={right} evidence={(judged ?? answer).evidence} />
-      )}
+      {verdict === 'different' &&
+        !counterexample &&
+        left &&
+        right &&
+        left.text.length + right.text.length <= shortEnough && (
+          <Difference field={answer.field.text} left={left} right={right} evidence={(judged ?? answer).evidence} />
+        )}
     </>
   );
 }
