@@ -37,7 +37,6 @@ export const realField: DecidableField = {
   tex: '\\mathbb{R}',
   decide(left, right, conditions, budget) {
     const statement = read([left, right], conditions, budget);
-    const [l = [], r = []] = statement.sides;
     return {
       findings: [
         ...realFindings(wordClasses(statement), budget),
