@@ -33,7 +33,14 @@ export function answerCompare(body: CompareRequest, reader: Reader, budget: Budg
   }));
   // The forms are an extra: they are made after every verdict is there, from what is left of the budget.
   const forms = body.forms === true ? formsOf(field, statement, budget) : undefined;
-  const shown = judged.map((step, index) => showStep(field, step, forms?.[index], forms?.[index + 1]));
+  const shown = judged.map((step, index) => {
+    const { counterexample } = step.outcome.evidence;
+    if (forms === undefined || counterexample === undefined)
+      return showStep(field, step, forms?.[index], forms?.[index + 1]);
+    // What is compared belongs to the field of the counterexample; so do the forms beside it.
+    const there = fieldOf(reader.fieldName(counterexample.field.name), budget).field;
+    return showStep(field, step, ...formsOf(there, counterexample.statement, budget));
+  });
   const firstWrong = judged.findIndex(({ outcome }) => outcome.verdict === 'different');
   const leading =
     shown[

@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
-import { errorsOf } from '../harness/browser';
-import { eventually, expectWord, openBench } from './bench-page';
+import { errorsOf, findings } from '../harness/browser';
+import { eventually, expectWord, openBench, scrollsSideways } from './bench-page';
 
 /** Each is true or false by a one-line reason. */
 const cases: readonly (readonly [field: string, statement: string, word: string, reason: string])[] = [
@@ -24,6 +24,11 @@ const cases: readonly (readonly [field: string, statement: string, word: string,
   ['Q_5', '<2> = 1', 'Different', '2 is no square modulo 5'],
   ['any', '[a b] = [a] + <a>[b]', 'Equal', 'twisted additivity'],
   ['any', '[a b] = [a] + [b]', 'Different', 'the term with η is missing'],
+  ['any', '[a][1+a] = [-1][1+a]', 'Equal', 'Steinberg at -a and 1 + a'],
+  ['F_7(t)', '[t][1-t] = 0', 'Equal', 'Steinberg'],
+  ['F_7(t)', '[t][2] = 0', 'Different', 'the residue at t is [2], and 2 is not 1'],
+  ['Q(t)', '[t^2+1][-t^2] = 0', 'Equal', 'Steinberg'],
+  ['Q(t)', '<t^2+1> = 1', 'Different', 't^2 + 1 is no square'],
 ];
 
 describe('the bench decides', () => {
@@ -86,27 +91,48 @@ describe('the bench decides', () => {
     await expectWord(bench, 'Equal');
   });
 
-  test('what cannot be decided is called undecided', async () => {
-    const { page, line, word } = await openBench();
-    const value = { text: '0', tex: '0' };
-    const evidence = { kind: 'invariants', theorem: '', modEta: false, modH: false };
-    await page.route('**/api/v1/compare', (route) =>
-      route.fulfill({
-        json: {
-          engine: '0',
-          field: { text: 'any', tex: '\\text{any field}' },
-          statement: { text: '[a] = 0', tex: '[a] = 0' },
-          sides: [{ text: '[a]', tex: '[a]' }, value],
-          verdict: 'undecided',
-          parts: [{ degree: 1, verdict: 'undecided', group: { tex: 'K^{\\mathrm{MW}}_1' }, compared: [] }],
-          sideConditions: [{ text: 'a != 0', tex: 'a \\ne 0' }],
-          evidence,
-        },
-      }),
-    );
-    await line.fill('[a] = 0');
-    await eventually(() => word.innerText()).toBe('Undecided');
+  test('what fails over some field says where, shows what was tried, and opens there', async () => {
+    const bench = await openBench({ field: 'any', statement: '[a][b] = [a+b][-ab]' });
+    await expectWord(bench, 'Different');
+    const { page } = bench;
+    expect(await page.locator('.verdict .lead').innerText()).toMatch(/It fails over/);
+    // Finite fields have no K_2: they cannot separate symbols, so the tile that is cut stands for another field.
+    const cells = page.getByRole('table', { name: 'Substitutions tried' }).getByRole('cell');
+    expect(await cells.filter({ hasText: 'different' }).count()).toBe(1);
+    expect(await findings(page)).toEqual([]);
+    await page.getByRole('link', { name: /^Open it over/ }).click();
+    await page.waitForURL(/field=Q/);
+    await eventually(() => page.locator('.verdict h2').innerText()).toBe('Different');
+    expect(await page.getByRole('link', { name: /^Open it over/ }).count()).toBe(0);
+    expect(errorsOf(page)).toEqual([]);
+  });
+
+  test('what holds over every field shows the relations that add up to it', async () => {
+    const bench = await openBench({ field: 'any', statement: '[a][b] = [a+b][-b/a]' });
+    await expectWord(bench, 'Equal');
+    // [a/(a+b)][b/(a+b)] = 0, since the two add up to 1.
+    await eventually(() => bench.page.locator('#relations tbody tr').count()).toBe(1);
+    expect(await findings(bench.page)).toEqual([]);
+  });
+
+  test('what cannot be decided is called undecided, with what was sought and what can be done', async () => {
+    const bench = await openBench({ field: 'any', statement: 'eta[-1][a^4+3a^2b^2+b^4+2ab+1] = 0' });
+    await expectWord(bench, 'Undecided');
+    const { page } = bench;
     expect(await page.locator('[data-mark=undecided]').count()).toBe(1);
-    expect(await page.locator('.notes').innerText()).toMatch(/side conditions/);
+    expect(await page.locator('.verdict .lead').innerText()).toMatch(/ended at/);
+    for (const side of ['substitutions tried', 'proof sought', 'what can be done'])
+      expect(await page.getByRole('heading', { name: side }).count(), side).toBe(1);
+    expect(await page.locator('.notes').innerText()).toMatch(/side conditions[^]*how far it was looked/);
+    expect(await findings(page)).toEqual([]);
+    expect(await scrollsSideways(page)).toBe(false);
+  });
+
+  test('over rational functions an expression shows its residues, infinity among them', async () => {
+    const { page } = await openBench({ field: 'F_7(t)', statement: '[t^2+1][t]' });
+    // Modulo t^2+1 the other entry is a root of it; at t it is 1, whose symbol is zero.
+    await eventually(() => page.locator('#residues tbody tr').count()).toBe(2);
+    expect(await page.locator('#residues').innerText()).toMatch(/At every place not listed the residue is zero/);
+    expect(errorsOf(page)).toEqual([]);
   });
 });

@@ -7,7 +7,8 @@ const columnOf = (one: ComparedMap): string => one.place ?? one.map;
 
 /** ∞ first, then the primes ascending, then maps that belong to no place, as they come. */
 function order(a: ComparedMap, b: ComparedMap): number {
-  const rank = (one: ComparedMap) => (one.place === 'real' ? 0 : one.place === undefined ? 2 : 1);
+  const rank = (one: ComparedMap) =>
+    one.place === 'real' || one.place === 'infinity' ? 0 : one.place === undefined ? 2 : 1;
   if (rank(a) !== rank(b)) return rank(a) - rank(b);
   if (a.place === undefined || b.place === undefined || a.place === b.place) return 0;
   return a.place.length - b.place.length || (a.place < b.place ? -1 : 1);

@@ -2,7 +2,7 @@ import type { CompareAnswer, ComparedPart } from '@/lib/contracts/compare';
 import type { NormalizeAnswer } from '@/lib/contracts/normalize';
 import type { Answer } from './ask';
 import { degreeName, degreesName, inDegrees } from './degrees';
-import { contributions, mapWord, placeWords } from './map-words';
+import { contributions, mapWord, placeTex, placeWords } from './map-words';
 import { type Phrase, tex, withFormulas } from './phrase';
 import { valuesTex } from './values-tex';
 
@@ -33,11 +33,21 @@ const nounOf = (map: keyof typeof mapWord): string =>
   map === 'class' ? 'class' : map === 'word' ? 'the term' : mapWord[map];
 
 /** Why the two values differ: what the service says after naming them. */
-function reasonOf({ sentence, right }: NonNullable<CompareAnswer['evidence']['separating']>): Phrase {
+function reasonOf({ sentence, right, place }: NonNullable<CompareAnswer['evidence']['separating']>): Phrase {
   const named = `right side ${right.text}. `;
   const end = sentence.lastIndexOf(named);
-  return end < 0 ? [] : withFormulas(` ${sentence.slice(end + named.length)}`);
+  if (end < 0) return [];
+  const said = ` ${sentence.slice(end + named.length)}`;
+  if (place === undefined || !isPolynomial(place)) return withFormulas(said);
+  return said
+    .split(place)
+    .flatMap((words, index) => [...(index > 0 ? placePhrase(place) : []), ...withFormulas(words)]);
 }
+
+/** Whether a place is written as a polynomial, to be set. */
+const isPolynomial = (place: string): boolean => !/^(\d+|real|infinity)$/.test(place);
+
+const placePhrase = (place: string): Phrase => [isPolynomial(place) ? tex(placeTex(place)) : placeWords(place)];
 
 function differentPhrase(answer: CompareAnswer): Phrase {
   const { separating } = answer.evidence;
@@ -51,11 +61,13 @@ function differentPhrase(answer: CompareAnswer): Phrase {
         ...(counterexample.values.length === 0 ? [] : [' with ', tex(valuesTex(counterexample.values))]),
       ]
     : [];
-  const at = separating.place === undefined ? '. The' : `, at ${placeWords(separating.place)}. There the`;
+  const at: Phrase =
+    separating.place === undefined ? ['. The'] : [', at ', ...placePhrase(separating.place), '. There the'];
   return [
     `in ${degreeName(separating.degree)}`,
     ...failing,
-    `${at} left side has ${nounOf(separating.map)} `,
+    ...at,
+    ` left side has ${nounOf(separating.map)} `,
     tex(separating.left.tex),
     ' and the right side ',
     tex(separating.right.tex),

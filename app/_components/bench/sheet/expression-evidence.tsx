@@ -2,6 +2,7 @@
 
 import { useQuery } from '@tanstack/react-query';
 import { useCallback, useRef, useState } from 'react';
+import { readFieldName } from '@/grammar/read';
 import type { ComparedPart } from '@/lib/contracts/compare';
 import type { NormalizeAnswer } from '@/lib/contracts/normalize';
 import { Button } from '../../button/button';
@@ -38,7 +39,7 @@ function InvariantsFloor({
           const form = formOf(row.degree);
           return { ...row, of: form && <LongFormula text={form.text} tex={form.tex} /> };
         })}
-        heading="canonical form"
+        heading={answer.parts.every(({ canonical }) => canonical) ? 'canonical form' : 'as a word'}
         onShow={setChosen}
       />
       <p className="legend">
@@ -54,6 +55,12 @@ function InvariantsFloor({
   );
 }
 
+/** Whether residues at all places of the field are offered. */
+function hasPlaces(field: string): boolean {
+  const name = readFieldName(field);
+  return name.kind === 'rationals' || name.kind === 'functions';
+}
+
 interface Props {
   readonly answer: NormalizeAnswer;
   /** The expression as it was typed. */
@@ -63,7 +70,7 @@ interface Props {
 /** What there is to see of one class: its floor, its form in degree 0, its derivation, its residues. */
 export function ExpressionEvidence({ answer, expression }: Props) {
   const field = answer.field.text;
-  const rational = field === 'Q';
+  const placed = hasPlaces(field);
   const [open, setOpen] = useState(true);
   const why = useRef<HTMLDivElement>(null);
   const residueMatter = useRef<HTMLDivElement>(null);
@@ -75,7 +82,7 @@ export function ExpressionEvidence({ answer, expression }: Props) {
   const residues = useQuery({
     queryKey: ['residues', field, expression],
     queryFn: ({ signal }) => askResidues(field, expression, signal),
-    enabled: rational,
+    enabled: placed,
     ...once,
   });
 
@@ -93,7 +100,7 @@ export function ExpressionEvidence({ answer, expression }: Props) {
     keyName: 'R',
     label: 'residues of this class',
     act: () => residueMatter.current?.scrollIntoView({ block: 'center' }),
-    enabled: rational,
+    enabled: placed,
   });
 
   const seen = invariants.data?.parts.filter((part) => part.compared.length > 0) ?? [];
@@ -114,7 +121,7 @@ export function ExpressionEvidence({ answer, expression }: Props) {
           </div>
         </Row>
       )}
-      {rational && (
+      {placed && (
         <Row side="residues" sideClass="to-table" id="residues">
           <div ref={residueMatter}>
             {residues.data ? (

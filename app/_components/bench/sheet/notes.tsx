@@ -49,28 +49,6 @@ function Degrees({ answer }: { readonly answer: Answer }) {
   );
 }
 
-/** How far the searches over unnamed fields could go. */
-function Limits({ answer }: { readonly answer: Answer }) {
-  const tried = answer.kind === 'statement' ? answer.body.evidence.tried : undefined;
-  if (!tried || answer.kind !== 'statement' || answer.body.verdict !== 'undecided') return null;
-  const ended = (reached: boolean) => (reached ? 'ended there' : 'ended before');
-  return (
-    <div>
-      <h2>limits</h2>
-      <p>
-        Substitutions: {tried.limit.steps.toLocaleString('en-GB')} steps, {ended(tried.limit.reached)}.
-        {tried.proof && (
-          <>
-            {' '}
-            Proof: {tried.proof.limit.steps.toLocaleString('en-GB')} steps with each choice of units,{' '}
-            {ended(tried.proof.limit.reached)}.
-          </>
-        )}
-      </p>
-    </div>
-  );
-}
-
 /** A pair that differs can be kept too, and then says so. */
 function KeepWarning({ answer, current }: { readonly answer: Answer; readonly current: boolean }) {
   const keep = useKeep(answer.question);
@@ -120,11 +98,10 @@ export function Notes({ answer, current, meaning, onWrite }: Props) {
   return (
     <aside className="notes" aria-label={statement ? 'With this statement' : 'With this expression'}>
       <SideConditions answer={answer} />
-      <Limits answer={answer} />
       <KeepWarning answer={answer} current={current} />
       {statement && statement.evidence.theorem !== '' && (
         <div>
-          <h2>why this is enough</h2>
+          <h2>{statement.verdict === 'undecided' ? 'how far it was looked' : 'why this is enough'}</h2>
           <p>
             <Said phrase={withFormulas(statement.evidence.theorem)} />
           </p>

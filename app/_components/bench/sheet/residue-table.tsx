@@ -1,6 +1,7 @@
 import type { ResiduesAnswer } from '@/lib/contracts/residues';
 import { Ledger } from '../../ledger/ledger';
 import { Formula } from '../../math/formula';
+import { placeTex } from '../map-words';
 import { LongFormula } from './long-formula';
 
 interface Props {
@@ -13,14 +14,14 @@ interface Props {
 export function ResidueTable({ answer, only = false }: Props) {
   const elsewhere = !only && answer.unramifiedElsewhere ? 'At every place not listed the residue is zero.' : '';
   if (answer.residues.length === 0)
-    return <p className="lead">The class is unramified: its residue is zero at every prime.</p>;
+    return <p className="lead">The class is unramified: its residue is zero at every place.</p>;
   return (
     <div>
       <Ledger head={['place', 'residue field', 'uniformizer', 'residue', 'specialisation']} caption="Residues">
         {answer.residues.map((residue) => (
           <tr key={residue.place}>
             <td className="st">
-              <Formula tex={residue.place} />
+              <Formula tex={placeTex(residue.place)} />
             </td>
             <td className="st">
               <Formula tex={residue.residueFieldTex} />

@@ -39,6 +39,9 @@ function meaningOf(answer: Answer): Phrase | undefined {
   }
 }
 
+/** A term longer than this is not written on a button. */
+const shortTerm = 24;
+
 /** The one thing an answer calls for: the missing term, or another side to compare with. */
 function Repair({ bench, answer }: { readonly bench: BenchState; readonly answer: Answer }) {
   const { line, asked } = bench;
@@ -86,7 +89,7 @@ function Repair({ bench, answer }: { readonly bench: BenchState; readonly answer
   return (
     <p>
       <Button wide keyName="A" tip="Put the missing term on the right side" unavailable={unavailable} onClick={add}>
-        Add <Formula tex={form.tex} /> on the right
+        Add {form.text.length <= shortTerm ? <Formula tex={form.tex} /> : 'the missing term'} on the right
       </Button>
     </p>
   );
