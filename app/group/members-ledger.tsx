@@ -57,7 +57,9 @@ export function MembersLedger({ slug, members, self, manages }: Props) {
               <span className="nm">{member.email}</span>
             </th>
             <td>{member.role}</td>
-            <td data-label="since" className="whitespace-nowrap">{member.since}</td>
+            <td data-label="since" className="whitespace-nowrap">
+              {member.since}
+            </td>
             {manages && (
               <td>
                 <span className="acts">

@@ -93,8 +93,8 @@ test('the register shows the identities in the states that their checks give', a
   expect(states).toEqual({
     ...Object.fromEntries(Array.from({ length: 12 }, (_, index) => [`skerry-${index + 1}`, ['checked', 'equal']])),
     'skerry-7': ['withdrawn', 'different'],
-    'skerry-10': ['draft', 'refused'],
     'skerry-12': ['checked', 'different'],
+    'skerry-13': ['draft', 'undecided'],
   });
 });
 

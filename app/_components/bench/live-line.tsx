@@ -10,6 +10,7 @@ import { Formula } from '../math/formula';
 import { Row } from '../shell/row';
 import { Announcer } from './announcer';
 import { AskClient } from './ask-client';
+import { benchAddress } from './bench-address';
 import type { Draft } from './drafts';
 import { Said } from './phrase';
 import { EvidenceFloor } from './sheet/evidence-floor';
@@ -120,7 +121,7 @@ export function LiveTry({ examples }: { readonly examples: readonly Draft[] }) {
   const { field, text, write } = useLive();
   return (
     <p className="acts live-try">
-      <Link className="plain" href={`/bench?${new URLSearchParams({ field, statement: text }).toString()}`}>
+      <Link className="plain" href={benchAddress(field, text)}>
         Open on the bench
       </Link>
       <span className="quiet small">or try</span>

@@ -43,7 +43,7 @@ test('what was changed last comes first, with counts by state', async () => {
 test('filters, words and orders', async () => {
   expect(await names('?state=draft')).toEqual(['Rational functions']);
   expect(await names('?field=Q')).toEqual(['Steinberg at six']);
-  expect(await names('?field=%5Cmathbb%7BQ%7D(t)')).toEqual(['Rational functions']);
+  expect(await names('?field=%5Cmathbb%7BQ%7D(s)(t)')).toEqual(['Rational functions']);
   expect(await names('?tag=x')).toEqual(['Steinberg at six']);
   expect(await names('?words=stein+6')).toEqual(['Steinberg at six']);
   expect(await names('?degree=2&sort=name')).toEqual(['Square', 'Steinberg at six']);

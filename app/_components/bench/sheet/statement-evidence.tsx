@@ -1,17 +1,19 @@
 'use client';
 
+import Link from 'next/link';
 import { useCallback, useRef, useState } from 'react';
 import type { CompareAnswer } from '@/lib/contracts/compare';
 import { Button } from '../../button/button';
 import { useKey } from '../../keys/keys-provider';
+import { Formula } from '../../math/formula';
 import { Row } from '../../shell/row';
 import type { FloorCell } from '../../tile/floor';
+import { benchAddress } from '../bench-address';
+import { valuesTex } from '../values-tex';
 import { ApartTable } from './apart-table';
 import { ChainTable } from './chain-table';
 import { Difference } from './difference';
 import { EvidenceFloor } from './evidence-floor';
-import { Formula } from '../../math/formula';
-import { valuesTex } from '../values-tex';
 import { OpenRows, RelationRows } from './proof-rows';
 import { TriedStrip } from './tried-strip';
 
@@ -69,7 +71,9 @@ export function StatementEvidence({ answer }: { readonly answer: CompareAnswer }
                   At <Formula tex={valuesTex(counterexample.values)} />:{' '}
                 </>
               )}
-              <Formula tex={counterexample.statement.tex} /> over <Formula tex={counterexample.field.tex} />
+              <Link href={benchAddress(counterexample.field.text, counterexample.statement.text)}>
+                <Formula tex={counterexample.statement.tex} /> over <Formula tex={counterexample.field.tex} />
+              </Link>
             </p>
           )}
           {parts.length === 0 && <p className="text quiet">Both sides are zero in every degree.</p>}

@@ -3,6 +3,7 @@
 import Link from 'next/link';
 import { useRouter } from 'next/navigation';
 import { makeLink } from '@/app/bench/actions';
+import { benchAddress } from '../../bench/bench-address';
 import { Button } from '../../button/button';
 
 /** An address longer than this is not carried everywhere; past it the statement travels under a code. */
@@ -13,10 +14,10 @@ type Href = Parameters<ReturnType<typeof useRouter>['push']>[0];
 /** The bench, with what an identity says in its line. */
 export function OpenOnBench({ field, line }: { readonly field: string; readonly line: string }) {
   const router = useRouter();
-  const address = `/bench?${new URLSearchParams({ field, statement: line }).toString()}`;
+  const address = benchAddress(field, line);
   if (address.length <= longestAddress)
     return (
-      <Link className="plain quietly" href={address as Href}>
+      <Link className="plain quietly" href={address}>
         Open on the bench
       </Link>
     );
