@@ -94,9 +94,10 @@ export default async function Landing() {
           <div>
             <h2>what is decided</h2>
             <p>
-              Everything over <Formula tex="\Q" />, <Formula tex="\R" />, <Formula tex="\C" />, <Formula tex="\Q_p" />{' '}
-              and <Formula tex="\F_q" />, in every degree; and over every field at once, where the entries are monomials
-              in letters. <Link href="/help#fields">Why that is complete</Link>
+              Everything over <Formula tex="\Q" />, <Formula tex="\R" />, <Formula tex="\C" />, <Formula tex="\Q_p" />,{' '}
+              <Formula tex="\F_q" /> and <Formula tex="\F_q(t)" />, in every degree; over <Formula tex="\Q(t)" /> and
+              number fields almost everything; and over every field at once, with letters: proved by relations, or
+              refuted at values. <Link href="/help#fields">What is complete, and why</Link>
             </p>
           </div>
           <div>

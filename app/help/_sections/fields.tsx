@@ -156,14 +156,17 @@ const rows: readonly FieldRow[] = [
     write: ['any'],
     compared: (
       <>
-        Every degree, for entries that are monomials: ± a product of powers of letters. Letters are units of a field
-        that is not specified; <code>char = p</code> may be assumed. A statement without letters is decided over{' '}
-        <Formula tex="\Q" />.
+        Every degree. Letters are units of a field that is not specified, and so is every entry; <code>char = p</code>{' '}
+        may be assumed. Entries that are monomials, ± a product of powers of letters, are complete; so is one letter
+        where <Formula tex="\Q(t)" /> is, and no letter as <Formula tex="\Q" />. Sums of several letters are proved by
+        Steinberg relations among their factors, or refuted at values in some field; where both searches end at their
+        limits the verdict is <i>undecided</i>.
       </>
     ),
     why: (
       <>
-        In independent letters the words <Formula tex="\eta^m[p_S]" />, <Formula tex="[-1]^k[p_S]" /> and{' '}
+        A claim about every field fails when it fails for one, and a sum of relations is zero in every field. In
+        independent letters the words <Formula tex="\eta^m[p_S]" />, <Formula tex="[-1]^k[p_S]" /> and{' '}
         <Formula tex="\eta[-1][p_S]" /> form a basis, by the sequence for <Formula tex="k(t)" /> (Morel,{' '}
         <i>
           <Formula tex="\mathbb{A}^1" />
@@ -172,7 +175,7 @@ const rows: readonly FieldRow[] = [
         , ch. 3), one letter after the other. A statement that holds there holds in every field, by specialisation.
       </>
     ),
-    example: { field: 'any', statement: '[a b^2] = [a] + h[b]' },
+    example: { field: 'any', statement: '[a][b] = [a+b][-b/a]' },
   },
 ];
 

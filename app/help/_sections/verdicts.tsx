@@ -16,7 +16,7 @@ const marks: readonly { of: Mark; name: string; says: string }[] = [
   {
     of: 'undecided',
     name: 'Undecided',
-    says: 'What was compared agrees, and what was compared does not see everything. Over the fields in the table above this does not occur.',
+    says: 'What was compared agrees, and what was compared does not see everything, and no proof was found. The table of fields says where this can occur; the sheet shows what was tried and what can be done.',
   },
   {
     of: 'unread',
@@ -33,7 +33,7 @@ const marks: readonly { of: Mark; name: string; says: string }[] = [
 const maps: readonly { name: string; says: string; tex?: string }[] = [
   { name: 'rank', says: 'the rank of a form, or the rank modulo 2 below degree 0' },
   { name: 'signature', says: 'the signature at the real place' },
-  { name: 'residue', says: 'the residue at a prime, against its default uniformizer', tex: '\\partial_p^{p}' },
+  { name: 'residue', says: 'the residue at a place, against its default uniformizer', tex: '\\partial_p^{p}' },
   { name: 'specialisation', says: 'the value at a place of the part that does not ramify there', tex: 's_p^{p}' },
   { name: 'product', says: 'modulo η in degree 1: the product of the entries', tex: 'F^\\times' },
   { name: 'symbol', says: 'modulo η in degree 2: the norm residue symbol of a local field' },

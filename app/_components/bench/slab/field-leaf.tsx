@@ -14,7 +14,21 @@ import { fieldMeaning, fieldWords, needsService } from '../field-meaning';
 import { Said } from '../phrase';
 
 /** Fields that are asked for most, in the order of the help page. */
-const common = ['Q', 'R', 'C', 'Q_2', 'Q_5', 'F_2', 'F_7', 'F_9', 'F_3[w]/(w^2+1)', 'any'];
+const common = [
+  'Q',
+  'R',
+  'C',
+  'Q_2',
+  'Q_5',
+  'F_2',
+  'F_7',
+  'F_9',
+  'F_3[w]/(w^2+1)',
+  'F_7(t)',
+  'Q(t)',
+  'Q[w]/(w^2-5)',
+  'any',
+];
 
 type ReadName = { readonly name: FieldName } | { readonly error: string } | undefined;
 
