@@ -89,7 +89,7 @@ export class NumberArithmetic {
     );
   }
 
-  /** Whether words in the generators are seen to be 0 by Steinberg relations. */
+  /** Whether words in the generators are seen to be 0 in Milnor K-theory. */
   vanishesBySteinberg(words: Words, degree: number): boolean {
     return vanishesBySteinberg(words, degree, this.field, this.generators, this.budget);
   }

@@ -1,4 +1,5 @@
 import type { Budget } from '../arith/budget';
+import { IntegerLattice, type SparseVector } from '../arith/integer-lattice';
 import { limitedBudget, unlessExhausted } from '../arith/limited-budget';
 import { inverseModulo } from '../arith/modular';
 import { residuesModulo } from '../field/modular-gcd';
@@ -12,10 +13,12 @@ import type { SteinbergPair } from './steinberg-triples';
 /** Steps that a search may take, and products of generators that it looks at. */
 const STEPS = 20_000;
 const PRODUCTS = 3_000;
+/** Of so many generators all are used; of more, those that the class has. */
+const FEW = 8;
 
 /**
- * Whether a class of K^MW_n of a number field, in canonical words of generators, is seen to be 0 by Steinberg relations x + y = 1 among small
- * products of these generators. `false` says only that none was found.
+ * Whether a class of K^M_n of a number field, in canonical words of generators, is seen to be 0 by Steinberg relations x + y = 1 among small
+ * products of these generators, and by such products that are 1. `false` says only that none was found.
  */
 export function vanishesBySteinberg(
   words: Words,
@@ -27,11 +30,13 @@ export function vanishesBySteinberg(
   const limited = limitedBudget(budget, STEPS);
   return unlessExhausted(
     () => {
-      const letters = [...new Set([...words.keys()].flatMap(lettersOf))];
-      const pairs = pairsAmong(field, generators, letters, limited);
-      return (
-        pairs.length > 0 && searchProof('zero', degree, words, pairs, [...words.keys()], limited).proof !== undefined
-      );
+      const letters =
+        generators.length > FEW
+          ? [...new Set([...words.keys()].flatMap(lettersOf))]
+          : generators.slice(1).map((_, letter) => letter);
+      const { pairs, ones } = relationsAmong(field, generators, letters, limited);
+      const hulls = [...words.keys()];
+      return searchProof('zero', degree, words, pairs, hulls, limited, 'eta', ones).proof !== undefined;
     },
     () => false,
   );
@@ -40,13 +45,16 @@ export function vanishesBySteinberg(
 /** A product of powers of generators by their letters; letter i is generator i + 1. */
 type Exponents = ReadonlyMap<number, bigint>;
 
-/** x + y = 1 for x and y among the products of few generators, and their negatives: found modulo a prime, then tested. */
-function pairsAmong(
+/**
+ * Products of few generators, and their negatives, that are 1 (independent ones), and pairs of them that add up to 1: found modulo a
+ * prime, then tested.
+ */
+function relationsAmong(
   field: NumberField,
   generators: readonly NumberFieldElement[],
   letters: readonly number[],
   budget: Budget,
-): readonly SteinbergPair[] {
+): { readonly pairs: readonly SteinbergPair[]; readonly ones: readonly Monomial[] } {
   const spend = (): void => budget.spend(`looking for Steinberg relations in ${field.name}`);
   const exact = (exponents: Exponents): NumberFieldElement =>
     [...exponents].reduce((product, [i, e]) => {
@@ -63,8 +71,20 @@ function pairsAmong(
   );
   const found = new Map<string, Exponents>();
   const products: { readonly exponents: Exponents; readonly residue: readonly number[] }[] = [];
+  const ones: Monomial[] = [];
+  const known = new IntegerLattice(spend);
+  known.insert([[0, 2n]]);
   const put = (exponents: Exponents, residue: readonly number[]): void => {
     products.push({ exponents, residue });
+    for (const negative of [false, true]) {
+      const same = found.get((negative ? ring.subtract([], residue) : residue).join());
+      if (same === undefined) continue;
+      const one = { negative, exponents: quotient(exponents, same) };
+      const vector = vectorOf(one);
+      if (known.express(vector) !== undefined || !isSame(exponents, same, negative)) continue;
+      known.insert(vector, ones.length);
+      ones.push(one);
+    }
     if (!found.has(residue.join())) found.set(residue.join(), exponents);
   };
   put(new Map(), ring.one);
@@ -93,7 +113,12 @@ function pairsAmong(
       }
     }
   }
-  return pairs;
+  return { pairs, ones };
+
+  function isSame(a: Exponents, b: Exponents, negative: boolean): boolean {
+    const [x, y] = [exact(a), exact(b)];
+    return field.equal(x, negative ? field.negate(y) : y);
+  }
 
   function isOne({ x, y }: { readonly x: Monomial; readonly y: Monomial }): boolean {
     const [a, b] = [x, y].map(({ negative, exponents }) => {
@@ -103,6 +128,19 @@ function pairsAmong(
     return field.equal(field.add(a!, b!), field.one);
   }
 }
+
+/** a/b, without exponents that are 0. */
+function quotient(a: Exponents, b: Exponents): Exponents {
+  const result = new Map(a);
+  for (const [i, e] of b) result.set(i, (result.get(i) ?? 0n) - e);
+  return new Map([...result].filter(([, e]) => e !== 0n));
+}
+
+/** The exponents as a vector: that of −1 first, then the letters. */
+const vectorOf = ({ negative, exponents }: Monomial): SparseVector => [
+  ...(negative ? ([[0, 1n]] as const) : []),
+  ...[...exponents].map(([i, e]) => [i + 1, e] as const).sort(([i], [j]) => i - j),
+];
 
 const nameOf = ({ negative, exponents }: Monomial): string =>
   `${negative ? '-' : ''}${[...exponents]

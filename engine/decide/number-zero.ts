@@ -56,6 +56,7 @@ function symbolTest<A, B extends NumberUnit>(
   if (words === 'too long') return { zero: modH ? undefined : false, modEta: undefined, modH };
   if (!arithmetic.tameSymbolsVanish(words)) return { zero: false, modEta: false, modH };
   if (!modH) return { zero: false, modEta: undefined, modH };
+  // Zero in W(L), it remains to see it in K^M_2.
   return arithmetic.vanishesBySteinberg(words, 2)
     ? { zero: true, modEta: true, modH: true }
     : { zero: undefined, modEta: undefined, modH };

@@ -36,6 +36,9 @@ const HULL_LIMIT = 48;
  * taken by every canonical word of the degree that is missing, smallest first, and the integer linear system is solved.
  * Generators that no relation has are coordinates by themselves: the words beside each product of them are looked at apart.
  *
+ * `ones` are products of generators that are 1 in the field at hand, so that [one] = 0 is a relation as well; in `proof` only
+ * Steinberg relations are listed.
+ *
  * `hulls` are sets of generators, as bit masks, in whose unions the proof is looked for first: those of the terms.
  */
 export function searchProof(
@@ -46,13 +49,14 @@ export function searchProof(
   hulls: readonly bigint[],
   budget: Budget,
   modulo: Modulo = 'nothing',
+  ones: readonly Monomial[] = [],
 ): ProofSearch {
-  const inner = pairs.reduce((mask, { x, y }) => mask | supportOf(x) | supportOf(y), 0n);
+  const inner = [...pairs.flatMap(({ x, y }) => [x, y]), ...ones].reduce((mask, m) => mask | supportOf(m), 0n);
   const insideHulls = [...new Set(hulls.map((hull) => hull & inner))];
   const proof: UsedRelation[] = [];
   let relations = 0;
   for (const [beside, words] of besideOthers(target, degree, inner)) {
-    const found = solve(char, degree - countBits(beside), words, pairs, insideHulls, modulo, budget);
+    const found = solve(char, degree - countBits(beside), words, pairs, ones, insideHulls, modulo, budget);
     relations += found.relations;
     if (found.proof === undefined) return { relations, cut: found.cut };
     for (const relation of found.proof) proof.push({ ...relation, beside });
@@ -79,6 +83,7 @@ function solve(
   degree: number,
   target: Words,
   pairs: readonly SteinbergPair[],
+  ones: readonly Monomial[],
   hulls: readonly bigint[],
   modulo: Modulo,
   budget: Budget,
@@ -87,28 +92,31 @@ function solve(
   const ring = wordRing(char, budget);
   const rows = new Rows(char, degree, modulo);
   const lattice = new IntegerLattice(spend);
-  const used: Pick<UsedRelation, 'word' | 'pair'>[] = [];
+  const used: { readonly word: Words; readonly pair: SteinbergPair | undefined }[] = [];
   const goal = rows.vector(target, lattice);
   if (lattice.express(goal) !== undefined) return { relations: 0, cut: false, proof: [] };
-  const relators = pairs.flatMap((pair) => {
-    const [x, y] = [ring.symbol(pair.x), ring.symbol(pair.y)];
-    const value = x && y && ring.multiply(1, x, 1, y);
-    const support = supportOf(pair.x) | supportOf(pair.y);
-    return value === undefined ? [] : [{ pair, value, support, tried: new Set<bigint>() }];
-  });
+  const relator = (own: number, value: Words | undefined, support: bigint, pair?: SteinbergPair) =>
+    value === undefined ? [] : [{ own, value, support, pair, tried: new Set<bigint>() }];
+  const relators = [
+    ...ones.flatMap((one) => relator(1, ring.symbol(one), supportOf(one))),
+    ...pairs.flatMap((pair) => {
+      const [x, y] = [ring.symbol(pair.x), ring.symbol(pair.y)];
+      return relator(2, x && y && ring.multiply(1, x, 1, y), supportOf(pair.x) | supportOf(pair.y), pair);
+    }),
+  ];
   const supports = relators.map(({ support }) => support);
   const sets = growing(hulls, supports);
   for (const hull of sets.slice(0, HULL_LIMIT)) {
     let added = false;
-    for (const { pair, value, support, tried } of relators) {
+    for (const { own, pair, value, support, tried } of relators) {
       if ((support & ~hull) !== 0n || used.length >= RELATION_LIMIT) continue;
       for (const mask of subsets(hull)) {
         if (tried.has(mask)) continue;
         if (used.length >= RELATION_LIMIT) break;
         tried.add(mask);
         spend();
-        for (const word of wordsOf(char, degree - 2, mask)) {
-          const multiple = ring.multiply(degree - 2, word, 2, value);
+        for (const word of wordsOf(char, degree - own, mask)) {
+          const multiple = ring.multiply(degree - own, word, own, value);
           if (multiple === undefined) continue;
           lattice.insert(rows.vector(multiple, lattice), used.length);
           used.push({ word, pair });
@@ -123,7 +131,7 @@ function solve(
         cut: false,
         proof: found.flatMap(([label, coefficient]) => {
           const relation = used[label];
-          return relation === undefined ? [] : [{ ...relation, coefficient }];
+          return relation?.pair === undefined ? [] : [{ word: relation.word, pair: relation.pair, coefficient }];
         }),
       };
     if (used.length >= RELATION_LIMIT) break;

@@ -20,6 +20,30 @@ describe('K_2 of number fields', () => {
   });
 
   it.each([
+    ['Q[w]/(w^2-5)', '[w*(w+1)][3]', '[w][3] + [w+1][3] + eta[w][w+1][3]', 'the product rule'],
+    ['Q[w]/(w^2-5)', '[w*(w+1)][3]', '[w][3] + <w>[w+1][3]', 'twisted additivity'],
+    ['Q[w]/(w^2-5)', '[5][3]', 'h[w][3]', '5 = w^2'],
+    ['Q[w]/(w^2-5)', '[5][3]', '2[w][3]', 'modulo h both are 0 in I^3, where 3 is positive'],
+    ['Q[w]/(w^3-2)', '[w^2][-1]', '2[w][-1] + eta[w][w][-1]', 'the product rule'],
+    ['Q[w]/(w^3-2)', '[2][w]', '3_eps[w][w]', '2 = w^3'],
+    ['Q[w]/(w^2+1)', '[-1][w]', '0', '[w^2][w] = h[w][w] = h[-1][w] = 0'],
+    ['Q[w]/(w^2+1)', '[w][w]', '0', '[w][w] = [-1][w]'],
+    ['Q[y]/(y^2+y+1)', '[y][-1]', '0', 'y = y^4, and h[-1] = 0'],
+    ['Q(t)', '[t^2+1][-1][t]', '0', 'its residue is [-1][y], y^2 = -1'],
+  ])('over %s products that are equal are used: %s = %s, by %s', (name, left, right) => {
+    expect(verdict(name, left, right)).toBe('equal');
+  });
+
+  it.each([
+    ['Q[w]/(w^2-5)', '[5][3]', '[w][3]'],
+    ['Q[w]/(w^2-5)', '[5][3]', '3[w][3]'],
+    ['Q[w]/(w^2+1)', '[-1][w+2]', '0'],
+    ['Q[y]/(y^2+y+1)', '[y][2]', '0'], // y modulo 2 has order 3
+  ])('over %s no product is taken for another: %s ≠ %s', (name, left, right) => {
+    expect(verdict(name, left, right)).toBe('different');
+  });
+
+  it.each([
     ['Q(t)', '[t^2+1][2][3]', '0', '[2][3]'], // −1 in the field with 9 elements
     ['Q(t)', '[t^2+1][-1][3]', '0', '[-1][3]'],
     ['Q[s]/(s^2-2)', '[s+3][2]', '0', ''], // 2 is a square, and 2 modulo a prime above 7 is not 1
