@@ -11,9 +11,9 @@ import { orderModFour } from '../ring/field-units';
 import { residueWords } from '../ring/residue-words';
 import type { Term } from '../ring/term';
 import { writeResidueClass, type WrittenField } from '../ring/write-residue-class';
-import { isZero, total } from '../ring/write-word';
 import type { FiniteFunctionStatement } from './finite-function-statement';
 import type { NormalizedDegree } from './outcome';
+import { WrittenDegrees } from './written-degrees';
 
 /**
  * The tower normal form over k(t), k finite: α = s_∞(α) + Σ_P [P]·r̃_P, unique, so that two classes are equal iff their forms are
@@ -29,20 +29,12 @@ export function finiteFunctionNormalForm<E>(
   statement: FiniteFunctionStatement<E>,
   budget: Budget,
 ): readonly NormalizedDegree[] {
-  const parts = new Map<number, Expression[]>();
-  const put = (degree: number, word: Expression): void => {
-    if (isZero(word)) return;
-    const words = parts.get(degree);
-    if (words === undefined) parts.set(degree, [word]);
-    else words.push(word);
-  };
-  for (const [degree, word] of tower(statement, budget)) put(degree, word);
+  const written = new WrittenDegrees();
+  for (const [degree, word] of tower(statement, budget)) written.put(degree, word);
   const [terms = []] = statement.sides;
   for (const [degree, constant] of evaluate(terms, statement.atInfinity, budget))
-    put(degree, writeResidueClass(statement.base, degree, constant));
-  return [...parts]
-    .sort(([a], [b]) => b - a)
-    .map(([degree, words]) => ({ degree, normalForm: total(words.reverse()), canonical: true }));
+    written.put(degree, writeResidueClass(statement.base, degree, constant));
+  return written.forms(true);
 }
 
 /** The products [P]·r̃_P with their degree, the last place first. */

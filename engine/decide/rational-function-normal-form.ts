@@ -7,7 +7,6 @@ import { writePolynomial } from '../field/write-polynomial';
 import type { FunctionEntry } from '../place/function-entry';
 import { reductionsAt, reductionsAtInfinity } from '../place/reduced-entry';
 import type { Term } from '../ring/term';
-import { isZero, total } from '../ring/write-word';
 import { residueClasses, specialisationClasses } from './function-classes';
 import { numberPlaces } from './function-number-classes';
 import type { FunctionStatement } from './function-statement';
@@ -17,6 +16,7 @@ import { numberWords, writeWords, type NumberWord } from './number-writing';
 import type { NormalizedDegree } from './outcome';
 import { prefixed } from './prefixed';
 import { writtenOverRationals } from './rational-writing';
+import { WrittenDegrees } from './written-degrees';
 
 type Terms = readonly Term<FunctionEntry<Rational>>[];
 
@@ -31,19 +31,11 @@ export function rationalFunctionNormalForm(
   statement: FunctionStatement<Rational>,
   budget: Budget,
 ): readonly NormalizedDegree[] {
-  const parts = new Map<number, Expression[]>();
-  const put = (degree: number, word: Expression): void => {
-    if (isZero(word)) return;
-    const words = parts.get(degree);
-    if (words === undefined) parts.set(degree, [word]);
-    else words.push(word);
-  };
-  for (const [degree, word] of tower(statement, budget)) put(degree, word);
+  const written = new WrittenDegrees();
+  for (const [degree, word] of tower(statement, budget)) written.put(degree, word);
   const constants = specialisationClasses(statement.sides, reductionsAtInfinity());
-  for (const { degree, normalForm } of writtenOverRationals(constants, 0, budget)) put(degree, normalForm);
-  return [...parts]
-    .sort(([a], [b]) => b - a)
-    .map(([degree, words]) => ({ degree, normalForm: total(words.reverse()), canonical: false }));
+  for (const { degree, normalForm } of writtenOverRationals(constants, 0, budget)) written.put(degree, normalForm);
+  return written.forms(false);
 }
 
 /** The products [P]·r̃_P with their degree, the last place first. */

@@ -15,10 +15,11 @@ import { residueWords } from '../ring/residue-words';
 import { rankRing, signatureRing } from '../ring/signature-ring';
 import type { Term } from '../ring/term';
 import { writeResidueClass } from '../ring/write-residue-class';
-import { etaFactors, isZero, minusOneElement, multiple, symbolFactors, total } from '../ring/write-word';
+import { etaFactors, minusOneElement, multiple, symbolFactors, total } from '../ring/write-word';
 import type { NormalizedDegree } from './outcome';
 import type { RationalClasses } from './rational-classes';
 import { incidence } from './rational-statement';
+import { WrittenDegrees } from './written-degrees';
 
 /**
  * The tower normal form over ℚ: α = b + Σ_p [p]·r̃_p, unique, so that two classes are equal iff their forms are identical.
@@ -33,14 +34,8 @@ export function rationalNormalForm<A, B extends Visited>(
   side: number,
   budget: Budget,
 ): readonly NormalizedDegree[] {
-  const parts = new Map<number, Expression[]>();
-  const put = (degree: number, word: Expression): void => {
-    if (isZero(word)) return;
-    const words = parts.get(degree);
-    if (words === undefined) parts.set(degree, [word]);
-    else words.push(word);
-  };
-  for (const [degree, word] of tower(classes, side, budget)) put(degree, word);
+  const written = new WrittenDegrees();
+  for (const [degree, word] of tower(classes, side, budget)) written.put(degree, word);
   const { rational, minusOne } = classes;
   const terms = classes.sides[side] ?? [];
   const rank = BigInt(classes.image(terms, residueRing<B, Int>(rankRing, minusOne), budget).get(0) ?? 0);
@@ -50,10 +45,8 @@ export function rationalNormalForm<A, B extends Visited>(
   );
   const signatures = classes.image(terms, ring, budget);
   for (const degree of new Set([...signatures.keys(), 0]))
-    put(degree, constantPart(degree, BigInt(signatures.get(degree) ?? 0), rank));
-  return [...parts]
-    .sort(([a], [b]) => b - a)
-    .map(([degree, words]) => ({ degree, normalForm: total(words.reverse()), canonical: true }));
+    written.put(degree, constantPart(degree, BigInt(signatures.get(degree) ?? 0), rank));
+  return written.forms(true);
 }
 
 /** The class of B_n with this signature and, for n = 0, this rank. */

@@ -12,6 +12,7 @@ import {
 } from '@/engine/expression/element';
 import { angle, eta, integer, negate, product, sum, symbol, type Expression } from '@/engine/expression/expression';
 import { readFieldName } from '@/grammar/read';
+import { cpuCost, fittedExponent } from '../harness/measure';
 
 // How the cost of a decision over 𝔽_7(t) grows with the number of words. Entries are polynomials and quotients of degree at most 3,
 // read, factored and reduced in the time that is measured.
@@ -38,25 +39,8 @@ const shapes: readonly (() => Expression)[] = [
 ];
 const word = (): Expression => product([integer(1n + upTo(4)), shapes[Number(upTo(shapes.length - 1))]!()]);
 
-/** CPU milliseconds, the least of several runs. */
-function cost(left: Expression, right: Expression): number {
-  let least = Number.POSITIVE_INFINITY;
-  for (let i = 0; i < 7; i += 1) {
-    const from = process.cpuUsage();
-    field.decide(left, right, [], unlimited).findings.every(({ same }) => same);
-    const { user, system } = process.cpuUsage(from);
-    least = Math.min(least, (user + system) / 1000);
-  }
-  return least;
-}
-
-/** The exponent k of the best fit y = c·xᵏ. */
-function exponent(points: readonly (readonly [number, number])[]): number {
-  const logs = points.map(([x, y]) => [Math.log(x), Math.log(y)] as const);
-  const mean = (values: readonly number[]): number => values.reduce((a, b) => a + b, 0) / values.length;
-  const [mx, my] = [mean(logs.map(([x]) => x)), mean(logs.map(([, y]) => y))];
-  return mean(logs.map(([x, y]) => (x - mx) * (y - my))) / mean(logs.map(([x]) => (x - mx) ** 2));
-}
+const cost = (left: Expression, right: Expression): number =>
+  cpuCost(() => void field.decide(left, right, [], unlimited).findings.every(({ same }) => same), 7);
 
 const sizes = [100, 200, 400, 700, 1_000, 1_500, 2_000, 3_000];
 cost(sum(Array.from({ length: 1_000 }, word)), integer(0n)); // compiles
@@ -76,5 +60,5 @@ for (const [name, right] of [
     return [n, cost(sum(words), right(words))] as const;
   });
   console.log(`${name}: ${points.map(([n, ms]) => `${n}: ${ms.toFixed(1)} ms`).join('  ')}`);
-  console.log(`  fitted exponent ${exponent(points).toFixed(2)} (allowed: 1.15)`);
+  console.log(`  fitted exponent ${fittedExponent(points).toFixed(2)} (allowed: 1.15)`);
 }

@@ -7,35 +7,19 @@ import { integerElement } from '@/engine/expression/element';
 import { integer, product, sum, symbol, type Expression } from '@/engine/expression/expression';
 import { readExpression } from '@/grammar/read';
 import { threadLimits } from '@/lib/compute/thread-limits';
+import { cpuCost, fittedExponent } from '../harness/measure';
 
 // In a thread with the limits of the compute threads: how the cost of a decision grows with the number of terms and of primes, and powers that must not be multiplied out.
 
 const stream = seeded(11);
 const upTo = (n: number): bigint => randomBetween(1n, BigInt(n), stream);
 
-/** CPU milliseconds, the least of several runs. */
-function cost(left: Expression, right: Expression): number {
-  let least = Number.POSITIVE_INFINITY;
-  for (let i = 0; i < 20; i += 1) {
-    const from = process.cpuUsage();
-    rationalField.decide(left, right, [], unlimited).findings.every(({ same }) => same);
-    const { user, system } = process.cpuUsage(from);
-    least = Math.min(least, (user + system) / 1000);
-  }
-  return least;
-}
-
-/** The exponent k of the best fit y = c·xᵏ. */
-function exponent(points: readonly (readonly [number, number])[]): number {
-  const logs = points.map(([x, y]) => [Math.log(x), Math.log(y)] as const);
-  const mean = (values: readonly number[]): number => values.reduce((a, b) => a + b, 0) / values.length;
-  const [mx, my] = [mean(logs.map(([x]) => x)), mean(logs.map(([, y]) => y))];
-  return mean(logs.map(([x, y]) => (x - mx) * (y - my))) / mean(logs.map(([x]) => (x - mx) ** 2));
-}
+const cost = (left: Expression, right: Expression): number =>
+  cpuCost(() => void rationalField.decide(left, right, [], unlimited).findings.every(({ same }) => same), 20);
 
 function report(name: string, points: readonly (readonly [number, number])[]): void {
   console.log(`${name}: ${points.map(([n, ms]) => `${n}: ${ms.toFixed(1)} ms`).join('  ')}`);
-  console.log(`  fitted exponent ${exponent(points).toFixed(2)} (allowed: 1.1)`);
+  console.log(`  fitted exponent ${fittedExponent(points).toFixed(2)} (allowed: 1.1)`);
 }
 
 /** c·[a][b]… with one to three entries below 5 000. */

@@ -197,11 +197,11 @@ describe('the link of an invitation', () => {
   test.each([
     ['has run out', { expired: true }, 'This invitation has run out', 'Ask a steward'],
     ['was taken back', { revoked: true }, 'This invitation no longer holds', 'Look for the newest mail'],
-  ])('that %s says what to do', async (_name, state, title, todo) => {
+  ])('that %s says what to do', async (_name, state, title, advice) => {
     const group = await newGroup();
     const page = await openPage(await invitationLink(group.id, freshAddress(), state), { width: 390, height: 844 });
     await page.getByRole('heading', { level: 1, name: title }).waitFor();
-    await page.getByText(todo).waitFor();
+    await page.getByText(advice).waitFor();
     expect(await page.getByRole('textbox').count()).toBe(0);
     expect(await findings(page)).toEqual([]);
   });

@@ -15,6 +15,8 @@ import {
   symbol,
   type Expression,
 } from '@/engine/expression/expression';
+import { mapEntries } from '@/engine/expression/map-entries';
+import { substituteLetters } from '@/engine/expression/substitute';
 
 /** How large random words grow. */
 export interface Size {
@@ -83,43 +85,9 @@ export function homogeneous(unit: fc.Arbitrary<Element>, degree: number): fc.Arb
 
 export const difference = (left: Expression, right: Expression): Expression => sum([left, negate(right)]);
 
-/** Puts words for letters into an expression, entries for letters. */
-export function substitute(expression: Expression, values: ReadonlyMap<string, Element>): Expression {
-  const inside = (e: Element): Element => {
-    switch (e.kind) {
-      case 'integer':
-        return e;
-      case 'letter':
-        return values.get(e.name) ?? e;
-      case 'negate':
-        return { ...e, of: inside(e.of) };
-      case 'sum':
-        return { ...e, terms: e.terms.map(inside) };
-      case 'product':
-        return { ...e, factors: e.factors.map(inside) };
-      case 'quotient':
-        return { ...e, numerator: inside(e.numerator), denominator: inside(e.denominator) };
-      case 'power':
-        return { ...e, base: inside(e.base) };
-    }
-  };
-  switch (expression.kind) {
-    case 'symbol':
-    case 'angle':
-    case 'pfister':
-      return { ...expression, entries: expression.entries.map(inside) };
-    case 'negate':
-      return { ...expression, of: substitute(expression.of, values) };
-    case 'sum':
-      return { ...expression, terms: expression.terms.map((term) => substitute(term, values)) };
-    case 'product':
-      return { ...expression, factors: expression.factors.map((f) => substitute(f, values)) };
-    case 'power':
-      return { ...expression, base: substitute(expression.base, values) };
-    default:
-      return expression;
-  }
-}
+/** Puts entries for letters into an expression. */
+export const substitute = (expression: Expression, values: ReadonlyMap<string, Element>): Expression =>
+  mapEntries(expression, (entry) => substituteLetters(entry, values));
 
 /** The entries of symbols and forms, as they stand. */
 export function entriesOf(node: Expression): readonly Element[] {
